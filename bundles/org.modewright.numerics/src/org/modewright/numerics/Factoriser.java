@@ -1,0 +1,28 @@
+package org.modewright.numerics;
+
+/**
+ * Factorises K - shift M for one pattern of K and M: ordering and symbolic analysis are done once, when it is made.
+ *
+ * <p>The implementation is made by the eigen solvers.
+ */
+public interface Factoriser {
+
+    /**
+     * LDL<sup>T</sup> of K - shift M.
+     *
+     * @param k stiffness, of the pattern that the factoriser was made for
+     * @param m mass, likewise; null if shift is 0
+     * @param shift in the units of the eigenvalue
+     * @param progress told of the fronts eliminated; a cancel is obeyed
+     * @throws IllegalArgumentException if the pattern or the order does not fit
+     * @throws CancelledException on a cancel
+     */
+    Factorisation factorise(SymmetricMatrix k, SymmetricMatrix m, double shift, Progress progress);
+
+    /**
+     * Null vectors of K - shift M, one per zero pivot and in their order: component 1 at its own zero pivot, 0 at the others.
+     *
+     * @param factorisation made by this factoriser
+     */
+    double[][] nullVectors(Factorisation factorisation);
+}

@@ -1,0 +1,50 @@
+package org.modewright.numerics.internal;
+
+import org.modewright.numerics.EigenProblem;
+import org.modewright.numerics.SymmetricMatrix;
+
+/** Measures of how well vectors and values solve an eigenproblem. */
+final class EigenPairChecks {
+
+    private EigenPairChecks() {
+    }
+
+    /** ||K&phi; - &lambda;M&phi;|| / ||K&phi;||; for &lambda; = 0 relative to || |K||&phi;| ||. */
+    static double residual(EigenProblem problem, double value, double[] vector) {
+        double[] force = problem.stiffness().multiply(vector);
+        double reference = value == 0.0 ? VectorMath.norm(absoluteProduct(problem.stiffness(), vector)) : VectorMath.norm(force);
+        double[] inertiaForce = problem.mass().multiply(vector);
+        VectorMath.add(force, -value, inertiaForce);
+        double size = VectorMath.norm(force);
+        return size == 0.0 ? 0.0 : size / reference;
+    }
+
+    /** |K| |x|. */
+    static double[] absoluteProduct(SymmetricMatrix matrix, double[] x) {
+        double[] y = new double[x.length];
+        for (int column = 0; column < matrix.order(); column++) {
+            for (int p = matrix.columnStart()[column]; p < matrix.columnStart()[column + 1]; p++) {
+                int i = matrix.row()[p];
+                double size = Math.abs(matrix.value()[p]);
+                y[column] += size * Math.abs(x[i]);
+                if (i != column) {
+                    y[i] += size * Math.abs(x[column]);
+                }
+            }
+        }
+        return y;
+    }
+
+    /** Largest |&phi;<sub>i</sub><sup>T</sup>M&phi;<sub>j</sub> - &delta;<sub>ij</sub>|; 0 without vectors. */
+    static double worstOrthogonality(SymmetricMatrix mass, double[][] vectors) {
+        double worst = 0.0;
+        for (int j = 0; j < vectors.length; j++) {
+            double[] massTimesVector = mass.multiply(vectors[j]);
+            for (int i = 0; i <= j; i++) {
+                double expected = i == j ? 1.0 : 0.0;
+                worst = Math.max(worst, Math.abs(VectorMath.dot(vectors[i], massTimesVector) - expected));
+            }
+        }
+        return worst;
+    }
+}
