@@ -1,0 +1,52 @@
+package org.modewright.render;
+
+/**
+ * Some rows of a raster to draw into, with the rule of how a pixel is written: only where nothing nearer was drawn; a pixel that is covered by half or more
+ * takes the depth as well, so that thin fringes do not hide what lies behind them.
+ *
+ * <p>Whatever is drawn computes each pixel from its own place alone, so that the picture does not depend on how it is cut into strips.
+ */
+final class Strip {
+
+    static final float IN_FRONT = Float.NEGATIVE_INFINITY;
+
+    private static final int HALF = 128;
+    private static final int FULL = 255;
+
+    final int width;
+    final int firstRow;
+    final int endRow;
+    final int[] colour;
+    final float[] depth;
+
+    Strip(Raster raster, int firstRow, int endRow) {
+        width = raster.width();
+        colour = raster.colour();
+        depth = raster.depth();
+        this.firstRow = firstRow;
+        this.endRow = endRow;
+    }
+
+    /**
+     * @param cover share of the pixel that is covered, 0 to 1
+     */
+    void plot(int index, float z, int argb, double cover) {
+        if (z > depth[index]) {
+            return;
+        }
+        int weight = (int) (cover * 256 + 0.5);
+        int alpha = argb >>> 24;
+        if (alpha != FULL) {
+            weight = weight * alpha / FULL;
+        }
+        if (weight >= FULL) {
+            colour[index] = argb;
+            depth[index] = z;
+            return;
+        }
+        colour[index] = Argb.mix256(colour[index], argb | 0xFF000000, weight);
+        if (weight >= HALF) {
+            depth[index] = z;
+        }
+    }
+}
