@@ -21,124 +21,124 @@ import org.eclipse.emf.common.util.Enumerator;
  */
 public enum UnitSystem implements Enumerator {
 	/**
-	 * The '<em><b>NMKG</b></em>' literal object.
+	 * The '<em><b>NEWTON METRE</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #NMKG_VALUE
+	 * @see #NEWTON_METRE_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	NMKG(0, "N_M_KG", "N-m-kg"),
+	NEWTON_METRE(0, "NEWTON_METRE", "N-m-kg"),
 
 	/**
-	 * The '<em><b>KN MT</b></em>' literal object.
+	 * The '<em><b>KILONEWTON METRE</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KN_MT_VALUE
+	 * @see #KILONEWTON_METRE_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	KN_MT(1, "KN_M_T", "kN-m-t"),
+	KILONEWTON_METRE(1, "KILONEWTON_METRE", "kN-m-t"),
 
 	/**
-	 * The '<em><b>NMM T</b></em>' literal object.
+	 * The '<em><b>NEWTON MILLIMETRE</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #NMM_T_VALUE
+	 * @see #NEWTON_MILLIMETRE_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	NMM_T(2, "N_MM_T", "N-mm-t"),
+	NEWTON_MILLIMETRE(2, "NEWTON_MILLIMETRE", "N-mm-t"),
 
 	/**
-	 * The '<em><b>KIP FT</b></em>' literal object.
+	 * The '<em><b>KIP FOOT</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KIP_FT_VALUE
+	 * @see #KIP_FOOT_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	KIP_FT(3, "KIP_FT", "kip-ft"),
+	KIP_FOOT(3, "KIP_FOOT", "kip-ft"),
 
 	/**
-	 * The '<em><b>KIP IN</b></em>' literal object.
+	 * The '<em><b>KIP INCH</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KIP_IN_VALUE
+	 * @see #KIP_INCH_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	KIP_IN(4, "KIP_IN", "kip-in"),
+	KIP_INCH(4, "KIP_INCH", "kip-in"),
 
 	/**
-	 * The '<em><b>LBF IN</b></em>' literal object.
+	 * The '<em><b>POUND INCH</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #LBF_IN_VALUE
+	 * @see #POUND_INCH_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	LBF_IN(5, "LBF_IN", "lbf-in");
+	POUND_INCH(5, "POUND_INCH", "lbf-in");
 
 	/**
-	 * The '<em><b>NMKG</b></em>' literal value.
+	 * The '<em><b>NEWTON METRE</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #NMKG
+	 * @see #NEWTON_METRE
 	 * @generated
 	 * @ordered
 	 */
-	public static final int NMKG_VALUE = 0;
+	public static final int NEWTON_METRE_VALUE = 0;
 
 	/**
-	 * The '<em><b>KN MT</b></em>' literal value.
+	 * The '<em><b>KILONEWTON METRE</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KN_MT
+	 * @see #KILONEWTON_METRE
 	 * @generated
 	 * @ordered
 	 */
-	public static final int KN_MT_VALUE = 1;
+	public static final int KILONEWTON_METRE_VALUE = 1;
 
 	/**
-	 * The '<em><b>NMM T</b></em>' literal value.
+	 * The '<em><b>NEWTON MILLIMETRE</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #NMM_T
+	 * @see #NEWTON_MILLIMETRE
 	 * @generated
 	 * @ordered
 	 */
-	public static final int NMM_T_VALUE = 2;
+	public static final int NEWTON_MILLIMETRE_VALUE = 2;
 
 	/**
-	 * The '<em><b>KIP FT</b></em>' literal value.
+	 * The '<em><b>KIP FOOT</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KIP_FT
+	 * @see #KIP_FOOT
 	 * @generated
 	 * @ordered
 	 */
-	public static final int KIP_FT_VALUE = 3;
+	public static final int KIP_FOOT_VALUE = 3;
 
 	/**
-	 * The '<em><b>KIP IN</b></em>' literal value.
+	 * The '<em><b>KIP INCH</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #KIP_IN
+	 * @see #KIP_INCH
 	 * @generated
 	 * @ordered
 	 */
-	public static final int KIP_IN_VALUE = 4;
+	public static final int KIP_INCH_VALUE = 4;
 
 	/**
-	 * The '<em><b>LBF IN</b></em>' literal value.
+	 * The '<em><b>POUND INCH</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
-	 * @see #LBF_IN
+	 * @see #POUND_INCH
 	 * @generated
 	 * @ordered
 	 */
-	public static final int LBF_IN_VALUE = 5;
+	public static final int POUND_INCH_VALUE = 5;
 
 	/**
 	 * An array of all the '<em><b>Unit System</b></em>' enumerators.
@@ -148,12 +148,12 @@ public enum UnitSystem implements Enumerator {
 	 */
 	private static final UnitSystem[] VALUES_ARRAY =
 		new UnitSystem[] {
-			NMKG,
-			KN_MT,
-			NMM_T,
-			KIP_FT,
-			KIP_IN,
-			LBF_IN,
+			NEWTON_METRE,
+			KILONEWTON_METRE,
+			NEWTON_MILLIMETRE,
+			KIP_FOOT,
+			KIP_INCH,
+			POUND_INCH,
 		};
 
 	/**
@@ -210,12 +210,12 @@ public enum UnitSystem implements Enumerator {
 	 */
 	public static UnitSystem get(int value) {
 		switch (value) {
-			case NMKG_VALUE: return NMKG;
-			case KN_MT_VALUE: return KN_MT;
-			case NMM_T_VALUE: return NMM_T;
-			case KIP_FT_VALUE: return KIP_FT;
-			case KIP_IN_VALUE: return KIP_IN;
-			case LBF_IN_VALUE: return LBF_IN;
+			case NEWTON_METRE_VALUE: return NEWTON_METRE;
+			case KILONEWTON_METRE_VALUE: return KILONEWTON_METRE;
+			case NEWTON_MILLIMETRE_VALUE: return NEWTON_MILLIMETRE;
+			case KIP_FOOT_VALUE: return KIP_FOOT;
+			case KIP_INCH_VALUE: return KIP_INCH;
+			case POUND_INCH_VALUE: return POUND_INCH;
 		}
 		return null;
 	}

@@ -163,7 +163,7 @@ public class StructuralModelImpl extends MinimalEObjectImpl.Container implements
 	 * @generated
 	 * @ordered
 	 */
-	protected static final UnitSystem UNITS_EDEFAULT = UnitSystem.KN_MT;
+	protected static final UnitSystem UNITS_EDEFAULT = UnitSystem.KILONEWTON_METRE;
 
 	/**
 	 * The cached value of the '{@link #getUnits() <em>Units</em>}' attribute.

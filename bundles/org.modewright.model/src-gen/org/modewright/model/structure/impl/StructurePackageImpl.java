@@ -2192,12 +2192,12 @@ public class StructurePackageImpl extends EPackageImpl implements StructurePacka
 
 		// Initialize enums and add enum literals
 		initEEnum(unitSystemEEnum, UnitSystem.class, "UnitSystem");
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.NMKG);
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.KN_MT);
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.NMM_T);
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.KIP_FT);
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.KIP_IN);
-		addEEnumLiteral(unitSystemEEnum, UnitSystem.LBF_IN);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.NEWTON_METRE);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.KILONEWTON_METRE);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.NEWTON_MILLIMETRE);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.KIP_FOOT);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.KIP_INCH);
+		addEEnumLiteral(unitSystemEEnum, UnitSystem.POUND_INCH);
 
 		initEEnum(massFormulationEEnum, MassFormulation.class, "MassFormulation");
 		addEEnumLiteral(massFormulationEEnum, MassFormulation.CONSISTENT);
