@@ -1,0 +1,10 @@
+#!/bin/sh
+# The command line of Modewright: modewright-cli.command COMMAND ..., for example modewright-cli.command check MODEL; --help lists the commands.
+here=$(cd "$(dirname "$0")" && pwd -P)
+java=${JAVA_HOME:+$JAVA_HOME/bin/}java
+if ! command -v "$java" >/dev/null; then
+    echo "Modewright needs Java 17 or newer: install it, or set JAVA_HOME." >&2
+    exit 2
+fi
+exec "$java" "@$here/java.options" -Djava.awt.headless=true -jar "$here"/plugins/org.eclipse.equinox.launcher_*.jar \
+    -nosplash -data @none -application org.modewright.cli.application "$@"
