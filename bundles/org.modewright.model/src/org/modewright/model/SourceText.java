@@ -1,6 +1,7 @@
 package org.modewright.model;
 
 import java.nio.charset.StandardCharsets;
+import java.util.List;
 
 /**
  * The text of a model file, to say where in it a fault sits. A parser reports the end of a tag; people look for its beginning, or for the
@@ -21,21 +22,25 @@ final class SourceText {
     /**
      * @param line   line that the parser reported, from 1
      * @param column column that the parser reported: just behind the tag
-     * @param token  name or value at fault inside the tag, or null for the tag itself
-     * @return the place of the token, of the tag where it does not hold the token, or what the parser said where there is no tag
+     * @param words  what to look for inside the tag, each behind the one before: name, then value; empty for the tag itself
+     * @return the place of the last word that is found, of the tag where none is, or what the parser said where there is no tag
      */
-    Place locate(int line, int column, String token) {
+    Place locate(int line, int column, List<String> words) {
         if (line < 1) {
             return new Place(0, 0);
         }
         String text = new String(bytes, StandardCharsets.UTF_8);
         int end = offset(text, line, column);
         int tag = text.lastIndexOf('<', Math.max(0, end - 1));
-        if (end < 0 || tag < 0 || token == null && !text.substring(tag, end).contains(">")) {
+        if (end < 0 || tag < 0 || words.isEmpty() && !text.substring(tag, end).contains(">")) {
             return new Place(line, Math.max(1, column));
         }
-        int at = token == null || token.isEmpty() ? -1 : wordIn(text, tag, end, token);
-        return place(text, at < 0 ? tag : at);
+        int found = tag;
+        for (String word : words) {
+            int at = word == null || word.isEmpty() ? -1 : wordIn(text, found + 1, end, word);
+            found = at < 0 ? found : at;
+        }
+        return place(text, found);
     }
 
     private static int wordIn(String text, int from, int to, String word) {

@@ -3,6 +3,7 @@ package org.modewright.model;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.regex.Matcher;
@@ -86,13 +87,13 @@ final class StructureHandler extends SAXXMIHandler {
         }
     }
 
-    private void checkVersion(int version, String token) {
+    private void checkVersion(int version, String word) {
         if (version > ModelFile.FORMAT_VERSION) {
-            throw fault(token, "The file was written by a newer Modewright (file format " + version + "; this one reads up to "
+            throw fault(word, "The file was written by a newer Modewright (file format " + version + "; this one reads up to "
                     + ModelFile.FORMAT_VERSION + ").", "Open it with a newer Modewright.");
         }
         if (version < 1) {
-            throw fault(token, "There is no file format " + version + ".", "Write formatVersion=\"" + ModelFile.FORMAT_VERSION + "\".");
+            throw fault(word, "There is no file format " + version + ".", "Write formatVersion=\"" + ModelFile.FORMAT_VERSION + "\".");
         }
     }
 
@@ -109,14 +110,14 @@ final class StructureHandler extends SAXXMIHandler {
         String id = object.getId();
         String kind = object.eClass().getName();
         if (id == null || id.isEmpty()) {
-            throw fault(start, null, "A " + kind + " has no id.", "Give it an id that no other object of the file has.");
+            throw fault(start, List.of(), "A " + kind + " has no id.", "Give it an id that no other object of the file has.");
         }
         if (!Ids.isWellFormed(id)) {
-            throw fault(start, id, "The id '" + id + "' of a " + kind + " is not valid.",
+            throw fault(start, List.of("id", id), "The id '" + id + "' of a " + kind + " is not valid.",
                     "Write letters, digits, '_', '-' and '.', beginning with a letter, a digit or '_'.");
         }
         if (!ids.add(id)) {
-            throw fault(start, id, "The id '" + id + "' of a " + kind + " is already taken by an earlier object.",
+            throw fault(start, List.of("id", id), "The id '" + id + "' of a " + kind + " is already taken by an earlier object.",
                     "Give one of the two another id and correct the references to it.");
         }
     }
@@ -154,7 +155,7 @@ final class StructureHandler extends SAXXMIHandler {
 
     private LoadFault unresolved(UnresolvedReferenceException e) {
         EStructuralFeature feature = e.getFeature();
-        return new LoadFault(e.getLine(), e.getColumn(), e.getReference(),
+        return new LoadFault(e.getLine(), e.getColumn(), List.of(feature.getName(), e.getReference()),
                 "The " + feature.getName() + " of " + Names.describe(e.getObject()) + " refers to '" + e.getReference()
                         + "', which is not in the file.",
                 "Refer to the id of a " + feature.getEType().getName() + " of the file.", e);
@@ -162,7 +163,7 @@ final class StructureHandler extends SAXXMIHandler {
 
     private LoadFault unknownFeature(FeatureNotFoundException e) {
         String owner = e.getObject() == null ? "This element" : "A " + e.getObject().eClass().getName();
-        return new LoadFault(e.getLine(), e.getColumn(), e.getName(), owner + " has no property '" + e.getName() + "'.",
+        return new LoadFault(e.getLine(), e.getColumn(), List.of(e.getName()), owner + " has no property '" + e.getName() + "'.",
                 "Correct the name or remove the property.", e);
     }
 
@@ -171,10 +172,9 @@ final class StructureHandler extends SAXXMIHandler {
             return wrongTarget(e, reference);
         }
         String value = String.valueOf(e.getValue());
-        EClassifier type = e.getFeature().getEType();
-        return new LoadFault(e.getLine(), e.getColumn(), e.getFeature().getName(),
+        return new LoadFault(e.getLine(), e.getColumn(), List.of(e.getFeature().getName()),
                 "The " + e.getFeature().getName() + " of a " + e.getObject().eClass().getName() + " is '" + value + "', which is not "
-                        + wanted(type) + ".", "Write " + wanted(type) + ".", e);
+                        + wanted(e.getFeature()) + ".", "Write " + wanted(e.getFeature()) + ".", e);
     }
 
     private LoadFault wrongTarget(IllegalValueException e, EReference reference) {
@@ -185,16 +185,17 @@ final class StructureHandler extends SAXXMIHandler {
                         .map(r -> new Place(r.getLineNumber(), r.getColumnNumber())).findFirst())
                 .orElse(new Place(e.getLine(), e.getColumn()));
         String target = e.getValue() instanceof EObject object ? Names.describe(object) : "something else";
-        return new LoadFault(place.line(), place.column(), reference.getName(),
+        return new LoadFault(place.line(), place.column(), List.of(reference.getName()),
                 "The " + reference.getName() + " of " + Names.describe(e.getObject()) + " refers to " + target + ", not to a "
                         + reference.getEType().getName() + ".",
                 "Refer to the id of a " + reference.getEType().getName() + ".", e);
     }
 
-    private static String wanted(EClassifier type) {
+    private static String wanted(EStructuralFeature feature) {
+        EClassifier type = feature.getEType();
         if (type instanceof EEnum choices) {
             return choices.getELiterals().stream().map(EEnumLiteral::getLiteral)
-                    .collect(Collectors.joining("', '", "one of '", "'"));
+                    .collect(Collectors.joining("', '", feature.isMany() ? "a list of '" : "one of '", "'"));
         }
         if (type == EcorePackage.Literals.EDOUBLE) {
             return "a number";
@@ -205,11 +206,11 @@ final class StructureHandler extends SAXXMIHandler {
         return type == EcorePackage.Literals.EBOOLEAN ? "true or false" : "a text";
     }
 
-    private LoadFault fault(String token, String reason, String remedy) {
-        return new LoadFault(getLineNumber(), getColumnNumber(), token, reason, remedy, null);
+    private LoadFault fault(String word, String reason, String remedy) {
+        return new LoadFault(getLineNumber(), getColumnNumber(), word == null ? List.of() : List.of(word), reason, remedy, null);
     }
 
-    private static LoadFault fault(Place place, String token, String reason, String remedy) {
-        return new LoadFault(place.line(), place.column(), token, reason, remedy, null);
+    private static LoadFault fault(Place place, List<String> words, String reason, String remedy) {
+        return new LoadFault(place.line(), place.column(), words, reason, remedy, null);
     }
 }

@@ -82,7 +82,7 @@ public class StructureResource extends XMIResourceImpl {
     private ModelFileException refused(LoadFault fault) {
         getContents().clear();
         getErrors().clear();
-        SourceText.Place place = source.locate(fault.line(), fault.column(), fault.token());
+        SourceText.Place place = source.locate(fault.line(), fault.column(), fault.words());
         return new ModelFileException(label, place.line(), place.column(), fault.reason(), fault.remedy(), fault.getCause());
     }
 
