@@ -1,0 +1,156 @@
+package org.modewright.fem.internal;
+
+import java.util.Arrays;
+
+import org.modewright.numerics.Progress;
+import org.modewright.numerics.SymmetricMatrix;
+
+/**
+ * Sums T<sup>T</sup>kT and T<sup>T</sup>mT element by element over the free unknowns. An element whose components are all free or held
+ * goes in as it is; one with tied components is transformed by its own rows of T.
+ */
+public final class MatrixAssembler {
+
+    private final Transformation transformation;
+    private final SymmetricMatrix.Builder stiffness;
+    private final SymmetricMatrix.Builder mass;
+
+    private MatrixAssembler(Transformation transformation) {
+        this.transformation = transformation;
+        stiffness = SymmetricMatrix.builder(transformation.unknowns());
+        mass = SymmetricMatrix.builder(transformation.unknowns());
+    }
+
+    static MatrixPair assemble(CarrierStore store, Transformation transformation, Progress progress) {
+        MatrixAssembler assembler = new MatrixAssembler(transformation);
+        int count = store.carriers().size();
+        for (int carrier = 0; carrier < count; carrier++) {
+            if (carrier % 1024 == 0) {
+                progress.checkCancelled();
+                progress.report("assembling", (double) carrier / count);
+            }
+            assembler.add(store.places(carrier), store.stiffness(carrier), assembler.stiffness, true);
+            assembler.add(store.places(carrier), store.mass(carrier), assembler.mass, false);
+        }
+        progress.checkCancelled();
+        SymmetricMatrix k = assembler.stiffness.build();
+        progress.checkCancelled();
+        return new MatrixPair(k, assembler.mass.build());
+    }
+
+    private void add(int[] places, double[] packed, SymmetricMatrix.Builder builder, boolean keepZeros) {
+        if (packed.length == 0) {
+            return;
+        }
+        boolean[] active = active(places.length, packed);
+        if (isPlain(places)) {
+            addPlain(places, active, packed, builder, keepZeros);
+        } else {
+            addTransformed(places, active, packed, builder);
+        }
+    }
+
+    /** Components that an element does anything for. */
+    private static boolean[] active(int order, double[] packed) {
+        boolean[] active = new boolean[order];
+        int place = 0;
+        for (int i = 0; i < order; i++) {
+            for (int j = 0; j <= i; j++) {
+                if (packed[place++] != 0.0) {
+                    active[i] = true;
+                    active[j] = true;
+                }
+            }
+        }
+        return active;
+    }
+
+    private boolean isPlain(int[] places) {
+        for (int component : places) {
+            int from = transformation.rowStart(component);
+            int terms = transformation.rowStart(component + 1) - from;
+            if (terms > 1 || terms == 1 && transformation.componentOf(transformation.unknownAt(from)) != component) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private void addPlain(int[] places, boolean[] active, double[] packed, SymmetricMatrix.Builder builder, boolean keepZeros) {
+        int[] unknowns = new int[places.length];
+        Arrays.setAll(unknowns, i -> transformation.isHeld(places[i]) || !active[i]
+                ? -1
+                : transformation.unknownAt(transformation.rowStart(places[i])));
+        int place = 0;
+        for (int i = 0; i < places.length; i++) {
+            for (int j = 0; j <= i; j++) {
+                double value = packed[place++];
+                if (unknowns[i] >= 0 && unknowns[j] >= 0 && (keepZeros || value != 0.0)) {
+                    builder.add(unknowns[i], unknowns[j], value);
+                }
+            }
+        }
+    }
+
+    private void addTransformed(int[] places, boolean[] active, double[] packed, SymmetricMatrix.Builder builder) {
+        int[] unknowns = unknowns(places, active);
+        int count = unknowns.length;
+        double[] rows = new double[places.length * count];
+        for (int i = 0; i < places.length; i++) {
+            for (int p = transformation.rowStart(places[i]); active[i] && p < transformation.rowStart(places[i] + 1); p++) {
+                rows[i * count + Arrays.binarySearch(unknowns, transformation.unknownAt(p))] = transformation.factorAt(p);
+            }
+        }
+        double[] product = product(places.length, packed, rows, count);
+        for (int a = 0; a < count; a++) {
+            for (int b = 0; b <= a; b++) {
+                double value = 0.0;
+                for (int i = 0; i < places.length; i++) {
+                    value += rows[i * count + a] * product[i * count + b];
+                }
+                if (value != 0.0) {
+                    builder.add(unknowns[a], unknowns[b], value);
+                }
+            }
+        }
+    }
+
+    private int[] unknowns(int[] places, boolean[] active) {
+        int[] found = new int[places.length];
+        int count = 0;
+        for (int i = 0; i < places.length; i++) {
+            for (int p = transformation.rowStart(places[i]); active[i] && p < transformation.rowStart(places[i] + 1); p++) {
+                if (count == found.length) {
+                    found = Arrays.copyOf(found, 2 * count);
+                }
+                found[count++] = transformation.unknownAt(p);
+            }
+        }
+        return Arrays.stream(found, 0, count).sorted().distinct().toArray();
+    }
+
+    /** k T, the element's matrix packed and its rows of T full. */
+    private static double[] product(int order, double[] packed, double[] rows, int count) {
+        double[] product = new double[order * count];
+        int place = 0;
+        for (int i = 0; i < order; i++) {
+            for (int j = 0; j <= i; j++) {
+                double value = packed[place++];
+                if (value == 0.0) {
+                    continue;
+                }
+                addRow(product, i, value, rows, j, count);
+                if (i != j) {
+                    addRow(product, j, value, rows, i, count);
+                }
+            }
+        }
+        return product;
+    }
+
+    private static void addRow(double[] product, int to, double value, double[] rows, int from, int count) {
+        for (int a = 0; a < count; a++) {
+            product[to * count + a] += value * rows[from * count + a];
+        }
+    }
+}
