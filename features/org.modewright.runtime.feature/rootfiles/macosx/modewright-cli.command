@@ -6,5 +6,7 @@ if ! command -v "$java" >/dev/null; then
     echo "Modewright needs Java 17 or newer: install it, or set JAVA_HOME." >&2
     exit 2
 fi
-exec "$java" "@$here/java.options" -Djava.awt.headless=true -jar "$here"/plugins/org.eclipse.equinox.launcher_*.jar \
+terminal=false
+[ ! -t 2 ] || terminal=true
+exec "$java" "@$here/java.options" -Djava.awt.headless=true -Dmodewright.terminal=$terminal -jar "$here"/plugins/org.eclipse.equinox.launcher_*.jar \
     -nosplash -data @none -application org.modewright.cli.application "$@"
