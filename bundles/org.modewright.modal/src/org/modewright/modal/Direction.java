@@ -1,0 +1,51 @@
+package org.modewright.modal;
+
+/**
+ * The six directions of rigid-body motion: three translations along the global axes and three rotations about the centre of the movable
+ * mass. The ordinal is the component's place in every array of six.
+ */
+public enum Direction {
+    X("x", "X"),
+    Y("y", "Y"),
+    Z("z", "Z"),
+    RX("rx", "rotation about X"),
+    RY("ry", "rotation about Y"),
+    RZ("rz", "rotation about Z");
+
+    private final String word;
+    private final String label;
+
+    Direction(String word, String label) {
+        this.word = word;
+        this.label = label;
+    }
+
+    /** Word of the direction in files and options, {@code x} to {@code rz}. */
+    public String word() {
+        return word;
+    }
+
+    /** The direction as a sentence names it: "X", "rotation about Z". */
+    public String label() {
+        return label;
+    }
+
+    /** Whether the direction is a translation. */
+    public boolean isTranslation() {
+        return ordinal() < 3;
+    }
+
+    /**
+     * The direction of a file's word.
+     *
+     * @throws IllegalArgumentException if there is no such direction; the message lists them
+     */
+    public static Direction ofWord(String word) {
+        for (Direction direction : values()) {
+            if (direction.word.equalsIgnoreCase(word)) {
+                return direction;
+            }
+        }
+        throw new IllegalArgumentException("There is no direction \"" + word + "\"; directions are x, y, z, rx, ry and rz.");
+    }
+}

@@ -1,0 +1,47 @@
+package org.modewright.modal;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.util.Locale;
+
+/** Numbers as sentences show them, with a decimal point whatever the user's language. */
+public final class Figures {
+
+    private Figures() {
+    }
+
+    /** A number with so many significant digits, without an exponent between 1e-4 and 1e7. */
+    public static String significant(double value, int digits) {
+        if (Double.isNaN(value) || Double.isInfinite(value)) {
+            return Double.isNaN(value) ? "unknown" : value > 0 ? "infinite" : "-infinite";
+        }
+        if (value == 0) {
+            return "0";
+        }
+        double size = Math.abs(value);
+        if (size < 1e-4 || size >= 1e7) {
+            return String.format(Locale.ROOT, "%." + (digits - 1) + "e", value);
+        }
+        return BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_UP)).toPlainString();
+    }
+
+    /** One significant digit and the exponent, "3e-11". */
+    public static String scientific(double value) {
+        if (value == 0) {
+            return "0";
+        }
+        String text = String.format(Locale.ROOT, "%.0e", value);
+        return text.replace("e-0", "e-").replace("e+0", "e").replace("e+", "e");
+    }
+
+    /** A share as a percentage with one decimal, "96.2 %". */
+    public static String percent(double share) {
+        return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+    }
+
+    /** A number of things: "1 mode", "3 modes". */
+    public static String count(int number, String one, String several) {
+        return number + " " + (number == 1 ? one : several);
+    }
+}

@@ -1,0 +1,104 @@
+package org.modewright.modal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.Predicate;
+import org.modewright.numerics.EigenPairs;
+import org.modewright.numerics.EigenProblem;
+import org.modewright.numerics.EigenRequest;
+import org.modewright.numerics.EigenSession;
+import org.modewright.numerics.EigenSolvers;
+import org.modewright.numerics.Progress;
+import org.modewright.numerics.SpectrumCertificate;
+import org.modewright.numerics.SymmetricMatrix;
+
+/** The lower part of a pencil's spectrum, found in steps, with its certificate. */
+final class Spectrum implements AutoCloseable {
+
+    private static final EigenPairs NONE = new EigenPairs(new double[0], new double[0][], new double[0], new double[0], true);
+
+    private final int order;
+    private final EigenSession session;
+    private final List<String> remarks = new ArrayList<>();
+    private EigenPairs pairs = NONE;
+
+    private Spectrum(int order, EigenSession session) {
+        this.order = order;
+        this.session = session;
+    }
+
+    static Spectrum open(SymmetricMatrix stiffness, SymmetricMatrix mass, Progress progress) {
+        int order = stiffness.order();
+        if (order == 0) {
+            return new Spectrum(0, null);
+        }
+        return new Spectrum(order, EigenSolvers.forOrder(order).open(new EigenProblem(stiffness, mass), progress));
+    }
+
+    /** &lambda; = (2&pi;f)&sup2;. */
+    static double eigenvalue(double frequency) {
+        double circular = 2 * Math.PI * frequency;
+        return circular * circular;
+    }
+
+    /** f = &radic;&lambda;/2&pi;; 0 where &lambda; is not positive. */
+    static double frequency(double eigenvalue) {
+        return eigenvalue > 0 ? Math.sqrt(eigenvalue) / (2 * Math.PI) : 0;
+    }
+
+    /** Solves, and solves on in steps while the pairs are not enough and the policy leaves the number open. */
+    void solve(SolveOn policy, Predicate<EigenPairs> enough, Progress progress) {
+        if (session == null) {
+            remarks.add("The structure has no free motion with mass, so it has no modes.");
+            return;
+        }
+        EigenRequest request = policy.first(order);
+        pairs = session.solve(request, progress);
+        int asked = request.count();
+        while (policy.isOpen() && !pairs.exhausted() && pairs.count() < order && !policy.isAtLimit(pairs) && !enough.test(pairs)) {
+            progress.checkCancelled();
+            request = policy.next(pairs, order);
+            pairs = session.solve(request, progress);
+        }
+        remark(policy, enough, asked);
+    }
+
+    private void remark(SolveOn policy, Predicate<EigenPairs> enough, int asked) {
+        boolean met = !policy.isOpen() || enough.test(pairs);
+        if (pairs.count() > asked) {
+            remarks.add("The first " + Figures.count(asked, "mode", "modes") + " did not reach the target; solved on to " + pairs.count()
+                    + (met ? ", which do." : "."));
+        }
+        if (policy.isAtLimit(pairs) && (policy.isOpen() ? !met : true)) {
+            remarks.add("Stopped at the limit of " + Figures.count(pairs.count(), "mode", "modes") + (policy.isOpen()
+                    ? " before the target was reached." : "."));
+        } else if (pairs.exhausted() && pairs.count() > 0) {
+            remarks.add("These are all the modes that the model has: " + pairs.count() + ".");
+        }
+    }
+
+    EigenPairs pairs() {
+        return pairs;
+    }
+
+    List<String> remarks() {
+        return remarks;
+    }
+
+    /** The inertia count above the last pair. Without pairs there is nothing to count below. */
+    Certificate certify(Progress progress) {
+        if (session == null || pairs.count() == 0) {
+            return Certificate.EMPTY;
+        }
+        SpectrumCertificate proof = session.certify(pairs, progress);
+        return new Certificate(proof.complete(), frequency(proof.shift()), proof.counted(), proof.found(), proof.worstResidual(),
+                proof.worstOrthogonality());
+    }
+
+    @Override
+    public void close() {
+        if (session != null) {
+            session.close();
+        }
+    }
+}
