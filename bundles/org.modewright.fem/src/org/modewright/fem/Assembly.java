@@ -129,18 +129,66 @@ public final class Assembly {
      * @return length number of nodes
      */
     public double[] nodalKineticShares(double[] free) {
-        double[] nodal = expand(free);
-        double[] product = parts.store().massTimes(nodal);
+        double[] products = kineticProducts(free);
         double[] shares = new double[snapshot.nodes().size()];
         double sum = 0.0;
-        for (int i = 0; i < nodal.length; i++) {
-            shares[i / Components.COUNT] += nodal[i] * product[i];
-            sum += nodal[i] * product[i];
+        for (int i = 0; i < products.length; i++) {
+            shares[i / Components.COUNT] += products[i];
+            sum += products[i];
         }
         for (int node = 0; node < shares.length; node++) {
             shares[node] = sum == 0.0 ? 0.0 : shares[node] / sum;
         }
         return shares;
+    }
+
+    /**
+     * &phi;<sub>j</sub>(M&phi;)<sub>j</sub> of every component of every node, with M before constraints; not scaled, so they sum to
+     * &phi;<sup>T</sup>M&phi;.
+     *
+     * @param free values of the free degrees of freedom
+     * @return length 6 times the number of nodes, as from {@link #expand}
+     */
+    public double[] kineticProducts(double[] free) {
+        double[] nodal = expand(free);
+        double[] product = parts.store().massTimes(nodal);
+        for (int i = 0; i < nodal.length; i++) {
+            product[i] *= nodal[i];
+        }
+        return product;
+    }
+
+    /** &iota;<sub>x</sub><sup>T</sup>M&iota;<sub>y</sub>, kg: 0 unless skew constraints couple the two plan directions. */
+    public double planCoupling() {
+        double[] origin = new double[3];
+        double[] alongX = parts.rigid().ofUnknowns(0, origin);
+        double[] massTimesY = parts.rigid().massTimes(1, origin);
+        double coupling = 0.0;
+        for (int i = 0; i < alongX.length; i++) {
+            coupling += alongX[i] * massTimesY[i];
+        }
+        return coupling;
+    }
+
+    /**
+     * &phi;<sub>j</sub> (M&phi;)<sub>j</sub> of every component j of every node, with M before constraints; their sum is
+     * &phi;<sup>T</sup>M&phi;.
+     *
+     * @param free values of the free degrees of freedom
+     * @return length 6 times the number of nodes: component c of node i at 6 i + c
+     */
+    public double[] kineticProducts(double[] free) {
+        double[] nodal = expand(free);
+        double[] product = parts.store().massTimes(nodal);
+        for (int i = 0; i < nodal.length; i++) {
+            product[i] *= nodal[i];
+        }
+        return product;
+    }
+
+    /** &iota;<sub>x</sub><sup>T</sup>M&iota;<sub>y</sub> in kg, by which the movable mass varies with the angle in plan. */
+    public double planCoupling() {
+        return parts.rigid().coupling(0, 1);
     }
 
     /** What a free degree of freedom is, for sentences: "X of node N4", "rotation about Z of node N4". */

@@ -66,7 +66,7 @@ public final class RigidMotions {
     }
 
     /** &iota; over the unknowns. */
-    double[] ofUnknowns(int direction, double[] centre) {
+    public double[] ofUnknowns(int direction, double[] centre) {
         double[] u = ofFreeNodes(direction, centre);
         double[] iota = new double[transformation.unknowns()];
         for (int i = 0; i < iota.length; i++) {
@@ -83,6 +83,12 @@ public final class RigidMotions {
             add(iota, solveMass(transformation.reduce(store.massTimes(rest))), 1.0);
         }
         return iota;
+    }
+
+    /** &iota;<sub>a</sub><sup>T</sup>M&iota;<sub>b</sub> of two translations. */
+    public double coupling(int first, int second) {
+        double[] origin = new double[3];
+        return dot(ofUnknowns(first, origin), mass.multiply(ofUnknowns(second, origin)));
     }
 
     /**
