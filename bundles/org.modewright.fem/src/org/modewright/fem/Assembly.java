@@ -143,34 +143,6 @@ public final class Assembly {
     }
 
     /**
-     * &phi;<sub>j</sub>(M&phi;)<sub>j</sub> of every component of every node, with M before constraints; not scaled, so they sum to
-     * &phi;<sup>T</sup>M&phi;.
-     *
-     * @param free values of the free degrees of freedom
-     * @return length 6 times the number of nodes, as from {@link #expand}
-     */
-    public double[] kineticProducts(double[] free) {
-        double[] nodal = expand(free);
-        double[] product = parts.store().massTimes(nodal);
-        for (int i = 0; i < nodal.length; i++) {
-            product[i] *= nodal[i];
-        }
-        return product;
-    }
-
-    /** &iota;<sub>x</sub><sup>T</sup>M&iota;<sub>y</sub>, kg: 0 unless skew constraints couple the two plan directions. */
-    public double planCoupling() {
-        double[] origin = new double[3];
-        double[] alongX = parts.rigid().ofUnknowns(0, origin);
-        double[] massTimesY = parts.rigid().massTimes(1, origin);
-        double coupling = 0.0;
-        for (int i = 0; i < alongX.length; i++) {
-            coupling += alongX[i] * massTimesY[i];
-        }
-        return coupling;
-    }
-
-    /**
      * &phi;<sub>j</sub> (M&phi;)<sub>j</sub> of every component j of every node, with M before constraints; their sum is
      * &phi;<sup>T</sup>M&phi;.
      *

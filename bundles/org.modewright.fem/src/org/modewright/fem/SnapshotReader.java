@@ -164,7 +164,7 @@ final class SnapshotReader {
     private void readSupport(Support support) {
         boolean[] held = {support.isUx(), support.isUy(), support.isUz(), support.isRx(), support.isRy(), support.isRz()};
         int node = index.get(support.getNode());
-        supports.add(new SupportCondition(support.getId(), support.getName(), node, held));
+        supports.add(new SupportCondition(support.getId(), nameOf(support, support.getNode()), node, held));
         double[] elastic = {support.getElasticUx(), support.getElasticUy(), support.getElasticUz(), support.getElasticRx(),
                 support.getElasticRy(), support.getElasticRz()};
         double[] stiffness = new double[36];
@@ -176,7 +176,8 @@ final class SnapshotReader {
             }
         }
         if (isElastic) {
-            elasticSupports.add(new SpringElement(support.getId(), support.getName(), node, SpringElement.GROUND, null, stiffness));
+            elasticSupports.add(new SpringElement(support.getId(), nameOf(support, support.getNode()), node, SpringElement.GROUND, null,
+                    stiffness));
         }
     }
 
@@ -184,7 +185,7 @@ final class SnapshotReader {
         double[] translational = {si(Quantity.MASS, mass.getUx()), si(Quantity.MASS, mass.getUy()), si(Quantity.MASS, mass.getUz())};
         double[] rotary = {si(Quantity.ROTARY_INERTIA, mass.getRx()), si(Quantity.ROTARY_INERTIA, mass.getRy()),
                 si(Quantity.ROTARY_INERTIA, mass.getRz())};
-        pointMasses.add(new PointMass(mass.getId(), mass.getName(), index.get(mass.getNode()), translational, rotary,
+        pointMasses.add(new PointMass(mass.getId(), nameOf(mass, mass.getNode()), index.get(mass.getNode()), translational, rotary,
                 vector(mass.getOffset())));
     }
 
@@ -278,6 +279,11 @@ final class SnapshotReader {
             factors[i] = components[i] < 3 ? term.getFactor() / units.length() : term.getFactor();
         }
         ties.add(new LinearTie(tie.getId(), tie.getName(), at, components, factors));
+    }
+
+    /** Supports and nodal masses without a name of their own are called by their node. */
+    private static String nameOf(Identified object, Node node) {
+        return object.getName() == null || object.getName().isBlank() ? node.getName() : object.getName();
     }
 
     static String nameOf(Identified object) {
