@@ -64,7 +64,8 @@ final class LoadFault extends RuntimeException {
             return new LoadFault(0, 0, List.of(), "The file is not text in the encoding that it states (UTF-8 if it states none).",
                     "Save it as UTF-8.", e);
         }
-        return new LoadFault(0, 0, List.of(), "The model cannot be read (" + e.getMessage() + ").", "Restore an earlier version of the file.", e);
+        return new LoadFault(0, 0, List.of(), "The model cannot be read (" + e.getMessage() + ").",
+                "Restore an earlier version of the file.", e);
     }
 
     private static LoadFault ofParser(SAXParseException e) {
@@ -72,7 +73,8 @@ final class LoadFault extends RuntimeException {
         int column = Math.max(1, e.getColumnNumber());
         String text = String.valueOf(e.getMessage());
         if (text.contains(StructureLoad.DISALLOW_DOCTYPE)) {
-            return new LoadFault(line, column, List.of(), "A DOCTYPE is not allowed in a model file.", "Remove the DOCTYPE and its entities.", e);
+            return new LoadFault(line, column, List.of(), "A DOCTYPE is not allowed in a model file.",
+                    "Remove the DOCTYPE and its entities.", e);
         }
         String detail = text.strip().replaceAll("[.\\s]+$", "");
         return new LoadFault(line, column, List.of(), "The text is not well-formed XML (" + detail + ").",

@@ -113,6 +113,9 @@ public final class Names {
     }
 
     private static String kind(EClass kind) {
+        if (kind == StructurePackage.Literals.MULTI_POINT_TIE) {
+            return "tie";
+        }
         return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 }

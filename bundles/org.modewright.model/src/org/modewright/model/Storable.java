@@ -69,7 +69,8 @@ final class Storable {
         }
         int bad = text.codePoints().filter(c -> !isAllowed(c)).findFirst().orElse(-1);
         if (bad >= 0) {
-            throw refused(String.format("The %s of %s holds the control character U+%04X.", attribute.getName(), Names.describe(object), bad),
+            throw refused(String.format("The %s of %s holds the control character U+%04X.", attribute.getName(),
+                    Names.describe(object), bad),
                     "Remove it.");
         }
     }
