@@ -1,6 +1,7 @@
 #!/bin/sh
 # Starts the workbench of Modewright. Projects are kept in ~/.modewright/workspace, or in the folder that MODEWRIGHT_WORKSPACE names.
 here=$(cd "$(dirname "$0")" && pwd -P)
+JAVA_HOME=${JAVA_HOME:-$(/usr/libexec/java_home -v 17+ 2>/dev/null)}
 java=${JAVA_HOME:+$JAVA_HOME/bin/}java
 if ! command -v "$java" >/dev/null; then
     echo "Modewright needs Java 17 or newer: install it, or set JAVA_HOME." >&2

@@ -1,6 +1,7 @@
 #!/bin/sh
 # The command line of Modewright: modewright-cli.command COMMAND ..., for example modewright-cli.command check MODEL; --help lists the commands.
 here=$(cd "$(dirname "$0")" && pwd -P)
+JAVA_HOME=${JAVA_HOME:-$(/usr/libexec/java_home -v 17+ 2>/dev/null)}
 java=${JAVA_HOME:+$JAVA_HOME/bin/}java
 if ! command -v "$java" >/dev/null; then
     echo "Modewright needs Java 17 or newer: install it, or set JAVA_HOME." >&2
