@@ -31,10 +31,10 @@ public final class ColourRamp {
         }
     }
 
-    /** The ramp for energies and other shares: pale straw through coral to deep violet, the same on light and on dark backgrounds. */
+    /** The ramp for energies and other shares: pale apricot through terracotta to deep mulberry, the same on light and on dark backgrounds. */
     public static ColourRamp energy() {
-        return new ColourRamp(List.of(new Oklch(0.86, 0.10, 98), new Oklch(0.70, 0.155, 42), new Oklch(0.56, 0.185, 4),
-            new Oklch(0.42, 0.17, -48)));
+        return new ColourRamp(List.of(new Oklch(0.86, 0.095, 82), new Oklch(0.70, 0.15, 44), new Oklch(0.54, 0.17, 18),
+            new Oklch(0.38, 0.13, -14)));
     }
 
     /** @param t 0 light to 1 dark; values outside, and NaN as 0, are taken to the ends */

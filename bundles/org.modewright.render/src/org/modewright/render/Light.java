@@ -3,7 +3,7 @@ package org.modewright.render;
 /** One light that stands at the viewer's upper left; both faces of a surface are lit alike (Lambert's cosine law on top of an even light). */
 final class Light {
 
-    private static final double EVEN = 0.62;
+    private static final double EVEN = 0.70;
     private static final double RIGHT = -0.35;
     private static final double UP = 0.65;
     private static final double TOWARDS = 0.675;

@@ -52,7 +52,7 @@ final class MarkerPainter {
     private void node(int vertex, int argb, int ring, boolean emphasised) {
         ProjectedScene p = frame.deformed;
         double half = halfNode(frame, vertex);
-        float z = frame.nearer(p.z[vertex], frame.pixels(3));
+        float z = frame.nearer(p.z[vertex], frame.pixels(3) + frame.bodyThickness * frame.projection.pixelsPerLength(p.z[vertex]));
         if (ring != 0) {
             half = Math.max(half, frame.pixels(NODE_PIXELS));
             shapes.square(p.x[vertex], p.y[vertex], z, half + frame.pixels(RING_PIXELS), ring);

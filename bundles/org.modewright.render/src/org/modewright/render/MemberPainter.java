@@ -8,8 +8,13 @@ final class MemberPainter {
     private static final double OUTLINE_PIXELS = 2.4;
     private static final double EMPHASIS = 1.9;
     private static final double MUTED_SHARE = 0.72;
+    private static final double COLOURED = 1.4;
+    private static final double HIDDEN_PIXELS = 2;
+    private static final int HIDDEN_ALPHA = 150;
+    private static final float STRAIGHT_PIXELS = 0.15f;
 
     private final Frame frame;
+    private final Strip strip;
     private final LinePlotter lines;
     private final ShapePlotter shapes;
     private final SectionPainter sections;
@@ -17,6 +22,7 @@ final class MemberPainter {
 
     MemberPainter(Frame frame, Strip strip) {
         this.frame = frame;
+        this.strip = strip;
         lines = new LinePlotter(strip);
         shapes = new ShapePlotter(strip);
         sections = new SectionPainter(frame, strip);
@@ -48,10 +54,13 @@ final class MemberPainter {
         int middle = first + frame.scene.segments[member] / 2;
         double thickness = p.visible(middle) ? thickness(member, p.z[middle]) : 0;
         int outline = outline(marks);
-        if (sectionShown(thickness) && sections.paint(member, colour(own, marks, p.z[middle]), outline)) {
-            return;
+        if (sectionShown(thickness)) {
+            int body = own != 0 ? own : frame.faded(frame.theme.section(), p.z[middle]);
+            if (sections.paint(member, colour(body, marks, p.z[middle]), outline)) {
+                return;
+            }
         }
-        double width = lineWidth(marks, thickness);
+        double width = lineWidth(own != 0, marks, thickness);
         if (outline != 0) {
             chain(p, member, width + 2 * frame.pixels(OUTLINE_PIXELS), outline, true);
         }
@@ -77,8 +86,8 @@ final class MemberPainter {
         };
     }
 
-    private double lineWidth(int marks, double thickness) {
-        double line = frame.pixels(frame.options.lineWidth());
+    private double lineWidth(boolean coloured, int marks, double thickness) {
+        double line = frame.pixels(frame.options.lineWidth()) * (coloured || frame.scene.vertexColours() != null ? COLOURED : 1);
         double emphasised = (marks & Mark.EMPHASISED.bit()) != 0 ? EMPHASIS * line : line;
         if (frame.options.thickness() == Thickness.LINES) {
             return emphasised;
@@ -101,8 +110,12 @@ final class MemberPainter {
     private void fadedChain(ProjectedScene p, int member, double width) {
         int first = frame.scene.firstVertex[member];
         int end = first + frame.scene.segments[member];
+        if (flat(p, member)) {
+            segment(p, first, end, width, frame.faded(p.z[(first + end) / 2]), 0);
+            return;
+        }
         for (int v = first; v < end; v++) {
-            segment(p, v, width, frame.faded(p.z[v]), 0);
+            segment(p, v, v + 1, width, frame.faded(p.z[v]), 0);
         }
     }
 
@@ -110,25 +123,57 @@ final class MemberPainter {
     private void chain(ProjectedScene p, int member, double width, int argb, boolean outline) {
         int first = frame.scene.firstVertex[member];
         int end = first + frame.scene.segments[member];
-        double back = outline ? -frame.pixels(2) : 0;
-        for (int v = first; v < end; v++) {
-            segment(p, v, width, argb, back);
-            if (outline && p.visible(v)) {
-                shapes.disc(p.x[v], p.y[v], frame.nearer(p.z[v], back), width / 2, argb);
+        double bias = outline ? -frame.pixels(2) : 0;
+        int step = flat(p, member) ? end - first : 1;
+        for (int v = first; v < end; v += step) {
+            segment(p, v, v + step, width, argb, bias);
+            if (outline) {
+                joint(p, v, width, argb, bias);
             }
         }
-        if (outline && p.visible(end)) {
-            shapes.disc(p.x[end], p.y[end], frame.nearer(p.z[end], back), width / 2, argb);
+        if (outline) {
+            joint(p, end, width, argb, bias);
         }
     }
 
-    private void segment(ProjectedScene p, int v, double width, int argb, double bias) {
-        if (!p.visible(v) || !p.visible(v + 1)) {
-            nearPlane.line(p, v, v + 1, lines, width, argb);
+    private void joint(ProjectedScene p, int v, double width, int argb, double bias) {
+        if (p.visible(v)) {
+            shapes.disc(p.x[v], p.y[v], frame.nearer(p.z[v], bias), width / 2, argb);
+        }
+    }
+
+    /** Whether a member looks like one straight line in this frame: no vertex is off its chord by a visible amount. */
+    private boolean flat(ProjectedScene p, int member) {
+        int count = frame.scene.segments[member];
+        int first = frame.scene.firstVertex[member];
+        int end = first + count;
+        if (p == frame.ghost || frame.atRest) {
+            return frame.scene.straight[member] == 1 && p.visible(first) && p.visible(end);
+        }
+        float x0 = p.x[first];
+        float y0 = p.y[first];
+        float dx = p.x[end] - x0;
+        float dy = p.y[end] - y0;
+        float dz = p.z[end] - p.z[first];
+        for (int i = 1; i < count; i++) {
+            float t = i / (float) count;
+            float offX = p.x[first + i] - x0 - t * dx;
+            float offY = p.y[first + i] - y0 - t * dy;
+            float offZ = p.z[first + i] - p.z[first] - t * dz;
+            if (!(offX * offX + offY * offY < STRAIGHT_PIXELS * STRAIGHT_PIXELS && Math.abs(offZ) < frame.flatDepth)) {
+                return false;
+            }
+        }
+        return p.visible(first) && p.visible(end);
+    }
+
+    private void segment(ProjectedScene p, int v, int w, double width, int argb, double bias) {
+        if (!p.visible(v) || !p.visible(w)) {
+            nearPlane.line(p, v, w, lines, width, argb);
         } else if (bias == 0) {
-            lines.line(p.x[v], p.y[v], p.z[v], p.x[v + 1], p.y[v + 1], p.z[v + 1], width, argb);
+            lines.line(p.x[v], p.y[v], p.z[v], p.x[w], p.y[w], p.z[w], width, argb);
         } else {
-            lines.line(p.x[v], p.y[v], frame.nearer(p.z[v], bias), p.x[v + 1], p.y[v + 1], frame.nearer(p.z[v + 1], bias), width, argb);
+            lines.line(p.x[v], p.y[v], frame.nearer(p.z[v], bias), p.x[w], p.y[w], frame.nearer(p.z[w], bias), width, argb);
         }
     }
 
@@ -143,6 +188,29 @@ final class MemberPainter {
             } else {
                 nearPlane.line(p, v, v + 1, lines, width, colours[v] != 0 ? colours[v] : frame.theme.member());
             }
+        }
+    }
+
+    /** Lets selected members shine through whatever hides them. */
+    void paintHiddenSelection() {
+        byte[] marks = frame.scene.marks(PrimitiveKind.MEMBER);
+        strip.behindOnly(true);
+        for (int member = 0; member < marks.length; member++) {
+            if ((marks[member] & (Mark.HIDDEN.bit() | Mark.SELECTED.bit())) == Mark.SELECTED.bit()) {
+                paintHidden(member);
+            }
+        }
+        strip.behindOnly(false);
+    }
+
+    private void paintHidden(int member) {
+        ProjectedScene p = frame.deformed;
+        int first = frame.scene.firstVertex[member];
+        int end = first + frame.scene.segments[member];
+        int argb = Argb.withAlpha(frame.theme.selection(), HIDDEN_ALPHA);
+        for (int v = first; v < end; v++) {
+            double bias = p.visible(v) ? thickness(member, p.z[v]) + frame.pixels(3) : 0;
+            segment(p, v, v + 1, frame.pixels(HIDDEN_PIXELS), argb, bias);
         }
     }
 }

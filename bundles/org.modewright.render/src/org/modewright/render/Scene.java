@@ -18,6 +18,8 @@ public final class Scene {
 
     final int[] firstVertex;
     final int[] segments;
+    /** 1 for a member whose vertices lie evenly on a straight line at rest. */
+    final int[] straight;
     final float[] axisY;
     final float[] sizeY;
     final float[] sizeZ;
@@ -34,6 +36,7 @@ public final class Scene {
     private final byte[][] marks = new byte[PrimitiveKind.values().length][];
     private final int[][] colours = new int[PrimitiveKind.values().length][];
     private int[] vertexColours;
+    private int version;
 
     Scene(SceneBuilder b) {
         double[] xyz = b.xyz.toArray();
@@ -45,6 +48,7 @@ public final class Scene {
         }
         firstVertex = b.firstVertex.toArray();
         segments = b.segments.toArray();
+        straight = b.straight.toArray();
         axisY = b.axisY.toFloats();
         sizeY = b.sizeY.toFloats();
         sizeZ = b.sizeZ.toFloats();
@@ -112,6 +116,7 @@ public final class Scene {
 
     /** Sets the mark on every primitive of a kind whose id passes, and clears it on the others. */
     public void mark(PrimitiveKind kind, Mark mark, IntPredicate byId) {
+        version++;
         byte[] state = marks(kind);
         int[] id = ids[kind.ordinal()];
         for (int i = 0; i < state.length; i++) {
@@ -182,6 +187,11 @@ public final class Scene {
             return 0;
         }
         return ramp.argb(high > low ? (value - low) / (high - low) : 0);
+    }
+
+    /** Grows with every change of a mark. */
+    int version() {
+        return version;
     }
 
     byte[] marks(PrimitiveKind kind) {

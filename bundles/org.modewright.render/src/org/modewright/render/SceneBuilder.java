@@ -9,6 +9,7 @@ public final class SceneBuilder {
     final Numbers xyz = new Numbers();
     final Integers firstVertex = new Integers();
     final Integers segments = new Integers();
+    final Integers straight = new Integers();
     final Numbers axisY = new Numbers();
     final Numbers sizeY = new Numbers();
     final Numbers sizeZ = new Numbers();
@@ -58,7 +59,7 @@ public final class SceneBuilder {
             double t = i / (double) segmentCount;
             vertex(x0 + t * (x1 - x0), y0 + t * (y1 - y0), z0 + t * (z1 - z0));
         }
-        return chain(id, first, segmentCount, localY, width, depth);
+        return chain(id, first, segmentCount, true, localY, width, depth);
     }
 
     /** Adds a plain line through points x, y, z, x, y, z…; answers its member index. A negative id is not pickable. */
@@ -70,10 +71,11 @@ public final class SceneBuilder {
         for (int i = 0; i < points.length; i += 3) {
             vertex(points[i], points[i + 1], points[i + 2]);
         }
-        return chain(id, first, points.length / 3 - 1, new double[3], 0, 0);
+        return chain(id, first, points.length / 3 - 1, points.length == 6, new double[3], 0, 0);
     }
 
-    private int chain(int id, int first, int segmentCount, double[] localY, double width, double depth) {
+    private int chain(int id, int first, int segmentCount, boolean isStraight, double[] localY, double width, double depth) {
+        straight.add(isStraight ? 1 : 0);
         firstVertex.add(first);
         segments.add(segmentCount);
         for (int i = 0; i < 3; i++) {

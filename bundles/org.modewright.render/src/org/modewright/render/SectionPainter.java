@@ -8,7 +8,8 @@ final class SectionPainter {
 
     private static final double[] SIDE_Y = {1, -1, -1, 1};
     private static final double[] SIDE_Z = {1, 1, -1, -1};
-    private static final double EDGE_SHADE = 0.62;
+    private static final double EDGE_SHADE = 0.55;
+    private static final double EDGE_BIAS = 2.5;
     private static final double EDGE_PIXELS = 1.1;
     private static final double OUTLINE_PIXELS = 2.6;
 
@@ -144,8 +145,8 @@ final class SectionPainter {
     }
 
     private void edge(int a, int b, int argb, double width) {
-        lines.line(screen[3 * a], screen[3 * a + 1], frame.nearer((float) screen[3 * a + 2], 1), screen[3 * b], screen[3 * b + 1],
-            frame.nearer((float) screen[3 * b + 2], 1), width, argb);
+        lines.line(screen[3 * a], screen[3 * a + 1], frame.nearer((float) screen[3 * a + 2], EDGE_BIAS), screen[3 * b], screen[3 * b + 1],
+            frame.nearer((float) screen[3 * b + 2], EDGE_BIAS), width, argb);
     }
 
     private static double[] unit(double x, double y, double z) {

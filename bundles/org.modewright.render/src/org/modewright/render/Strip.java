@@ -18,6 +18,7 @@ final class Strip {
     final int endRow;
     final int[] colour;
     final float[] depth;
+    private boolean behindOnly;
 
     Strip(Raster raster, int firstRow, int endRow) {
         width = raster.width();
@@ -27,26 +28,31 @@ final class Strip {
         this.endRow = endRow;
     }
 
-    /**
-     * @param cover share of the pixel that is covered, 0 to 1
-     */
+    /** @param cover share of the pixel that is covered, 0 to 1 */
     void plot(int index, float z, int argb, double cover) {
-        if (z > depth[index]) {
+        blend(index, z, argb, (int) (cover * 256 + 0.5));
+    }
+
+    /** @param weight share of the pixel that is covered, 0 to 256 */
+    void blend(int index, float z, int argb, int weight) {
+        if (behindOnly ? z <= depth[index] : z > depth[index]) {
             return;
         }
-        int weight = (int) (cover * 256 + 0.5);
         int alpha = argb >>> 24;
-        if (alpha != FULL) {
-            weight = weight * alpha / FULL;
-        }
-        if (weight >= FULL) {
+        int share = alpha == FULL ? weight : weight * alpha / FULL;
+        if (share >= FULL) {
             colour[index] = argb;
             depth[index] = z;
             return;
         }
-        colour[index] = Argb.mix256(colour[index], argb | 0xFF000000, weight);
-        if (weight >= HALF) {
+        colour[index] = Argb.mix256(colour[index], argb | 0xFF000000, share);
+        if (share >= HALF && !behindOnly) {
             depth[index] = z;
         }
+    }
+
+    /** Turns the rule round: what is drawn next shows, blended, only where something nearer hides it, and leaves the depth alone. Use translucent colours. */
+    void behindOnly(boolean on) {
+        behindOnly = on;
     }
 }

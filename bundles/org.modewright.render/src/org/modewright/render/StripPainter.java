@@ -34,23 +34,33 @@ final class StripPainter {
 
     /** The ghost is a layer of its own: the depth is cleared after it, so that the structure always stands before it. */
     void paint() {
-        raster.fillGradientRows(frame.theme.backgroundTop(), frame.theme.backgroundBottom(), firstRow, endRow);
-        raster.clearDepthRows(firstRow, endRow);
-        if (frame.ghostShown) {
-            members.paintGhost();
-            raster.clearDepthRows(firstRow, endRow);
-        }
+        paintBackdrop();
         panels.paintOpaque();
         members.paint();
         if (frame.options.markers()) {
             markers.paint();
         }
         panels.paintTranslucent();
+        members.paintHiddenSelection();
         if (frame.options.labels()) {
             texts.paintLabels();
         }
         if (frame.options.tripod()) {
             texts.paintTripod();
+        }
+    }
+
+    private void paintBackdrop() {
+        raster.clearDepthRows(firstRow, endRow);
+        if (frame.ghostShown && frame.backdrop.drawn()) {
+            frame.backdrop.restore(raster, firstRow, endRow);
+            return;
+        }
+        raster.fillGradientRows(frame.theme.backgroundTop(), frame.theme.backgroundBottom(), firstRow, endRow);
+        if (frame.ghostShown) {
+            members.paintGhost();
+            raster.clearDepthRows(firstRow, endRow);
+            frame.backdrop.save(raster, firstRow, endRow);
         }
     }
 }

@@ -6,6 +6,7 @@ final class TextPainter {
     private static final double CAP_PIXELS = 9;
     private static final double STROKE_PIXELS = 1.25;
     private static final double HALO_PIXELS = 3.6;
+    private static final int HALO_ALPHA = 215;
     private static final double LABEL_OFFSET = 7;
     private static final double TRIPOD_PLACE = 46;
     private static final double TRIPOD_ARM = 26;
@@ -14,6 +15,7 @@ final class TextPainter {
     private final LinePlotter lines;
     private final ShapePlotter shapes;
     private final StrokeFont font;
+    private final LabelGrid grid = new LabelGrid();
 
     TextPainter(Frame frame, Strip strip, StrokeFont font) {
         this.frame = frame;
@@ -22,23 +24,39 @@ final class TextPainter {
         shapes = new ShapePlotter(strip);
     }
 
+    /** Labels that would lie on earlier ones are left out; one that would run out on the right stands on the left of its vertex. */
     void paintLabels() {
+        grid.begin(frame.projection.width(), frame.projection.height());
         byte[] marks = frame.scene.marks(PrimitiveKind.LABEL);
         for (int i = 0; i < marks.length; i++) {
-            int vertex = frame.scene.labelVertex[i];
-            if ((marks[i] & Mark.HIDDEN.bit()) == 0 && frame.deformed.visible(vertex)) {
-                int own = frame.scene.colours(PrimitiveKind.LABEL)[i];
-                boolean selected = (marks[i] & Mark.SELECTED.bit()) != 0;
-                text(frame.scene.labelText[i], frame.deformed.x[vertex] + frame.pixels(LABEL_OFFSET),
-                    frame.deformed.y[vertex] - frame.pixels(LABEL_OFFSET),
-                    selected ? frame.theme.selection() : own != 0 ? own : frame.theme.text());
+            if ((marks[i] & Mark.HIDDEN.bit()) == 0 && frame.deformed.visible(frame.scene.labelVertex[i])) {
+                label(i, (marks[i] & Mark.SELECTED.bit()) != 0);
             }
         }
     }
 
+    private void label(int label, boolean selected) {
+        int vertex = frame.scene.labelVertex[label];
+        String text = frame.scene.labelText[label];
+        double offset = frame.pixels(LABEL_OFFSET);
+        double cap = frame.pixels(CAP_PIXELS);
+        double width = font.width(text) * cap / StrokeFont.CAP;
+        double left = frame.deformed.x[vertex] + offset;
+        if (left + width > frame.projection.width() && left - 2 * offset - width >= 0) {
+            left -= 2 * offset + width;
+        }
+        double baseline = frame.deformed.y[vertex] - offset;
+        boolean outside = left > frame.projection.width() || left + width < 0 || baseline < 0 || baseline - cap > frame.projection.height();
+        if (outside || !grid.take(left, baseline - cap, left + width, baseline)) {
+            return;
+        }
+        int own = frame.scene.colours(PrimitiveKind.LABEL)[label];
+        text(text, left, baseline, selected ? frame.theme.selection() : own != 0 ? own : frame.theme.text());
+    }
+
     /** Draws a text whose baseline starts at the given place, on a halo of the background's colour. */
     void text(String text, double x, double baseline, int argb) {
-        strokes(text, x, baseline, frame.pixels(HALO_PIXELS), Argb.withAlpha(frame.background, 190));
+        strokes(text, x, baseline, frame.pixels(HALO_PIXELS), Argb.withAlpha(frame.background, HALO_ALPHA));
         strokes(text, x, baseline, frame.pixels(STROKE_PIXELS), argb);
     }
 

@@ -1,0 +1,2 @@
+/** Measures how fast the renderer draws. */
+package org.modewright.render.bench;
