@@ -9,7 +9,7 @@ public interface EigenSolver {
      * @param problem K and M
      * @param progress told of the stages; a cancel is obeyed
      * @throws SingularPencilException if K and M share a null vector, so that every number is an eigenvalue;
-     *         such motions must be taken out beforehand
+     *         {@link PencilReduction} takes such motions out beforehand
      * @throws CancelledException on a cancel
      */
     EigenSession open(EigenProblem problem, Progress progress);

@@ -1,6 +1,7 @@
 package org.modewright.numerics;
 
-import org.modewright.numerics.internal.DenseEigenSolver;
+import org.modewright.numerics.internal.eigen.DenseEigenSolver;
+import org.modewright.numerics.internal.eigen.LanczosEigenSolver;
 
 /** The eigen solvers on offer. */
 public final class EigenSolvers {
@@ -18,7 +19,7 @@ public final class EigenSolvers {
 
     /** Sparse shift-invert block Lanczos with thick restart. */
     public static EigenSolver lanczos() {
-        return new DenseEigenSolver();
+        return new LanczosEigenSolver();
     }
 
     /** The method that suits a problem of order n. */

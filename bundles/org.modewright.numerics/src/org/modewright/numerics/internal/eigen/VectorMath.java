@@ -1,4 +1,4 @@
-package org.modewright.numerics.internal;
+package org.modewright.numerics.internal.eigen;
 
 /** Elementary operations on vectors. */
 final class VectorMath {

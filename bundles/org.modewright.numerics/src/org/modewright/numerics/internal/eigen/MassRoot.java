@@ -1,5 +1,8 @@
-package org.modewright.numerics.internal;
+package org.modewright.numerics.internal.eigen;
 
+import java.util.Arrays;
+
+import org.ejml.data.DMatrixRMaj;
 import org.modewright.numerics.SymmetricMatrix;
 
 /**
@@ -39,7 +42,7 @@ final class MassRoot {
             columns[rank] = column(dense[pivot], pivot, columns, rank, remaining);
             rank++;
         }
-        return new MassRoot(n, java.util.Arrays.copyOf(columns, rank));
+        return new MassRoot(n, Arrays.copyOf(columns, rank));
     }
 
     private static int next(double[] remaining, double[] original) {
@@ -77,16 +80,14 @@ final class MassRoot {
         return column;
     }
 
-    int order() {
-        return order;
-    }
-
-    int rank() {
-        return columns.length;
-    }
-
-    /** The columns of B, each of length n. */
-    double[][] columns() {
-        return columns;
+    /** B. */
+    DMatrixRMaj matrix() {
+        DMatrixRMaj b = new DMatrixRMaj(order, columns.length);
+        for (int c = 0; c < columns.length; c++) {
+            for (int i = 0; i < order; i++) {
+                b.set(i, c, columns[c][i]);
+            }
+        }
+        return b;
     }
 }

@@ -1,4 +1,4 @@
-package org.modewright.numerics.internal;
+package org.modewright.numerics.internal.eigen;
 
 import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.SymmetricMatrix;

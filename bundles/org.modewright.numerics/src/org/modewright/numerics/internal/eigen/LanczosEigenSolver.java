@@ -1,0 +1,16 @@
+package org.modewright.numerics.internal.eigen;
+
+import org.modewright.numerics.EigenProblem;
+import org.modewright.numerics.EigenSession;
+import org.modewright.numerics.EigenSolver;
+import org.modewright.numerics.Progress;
+
+/** Sparse shift-invert block Lanczos: see {@link LanczosEigenSession}. */
+public final class LanczosEigenSolver implements EigenSolver {
+
+    @Override
+    public EigenSession open(EigenProblem problem, Progress progress) {
+        int rank = MassRank.of(problem.mass(), progress);
+        return new LanczosEigenSession(ShiftedProblem.of(problem, progress), rank);
+    }
+}

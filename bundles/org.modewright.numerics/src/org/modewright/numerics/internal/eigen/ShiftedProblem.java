@@ -1,0 +1,194 @@
+package org.modewright.numerics.internal.eigen;
+
+import java.util.Random;
+
+import org.modewright.numerics.EigenProblem;
+import org.modewright.numerics.Factorisation;
+import org.modewright.numerics.Factoriser;
+import org.modewright.numerics.Factorisers;
+import org.modewright.numerics.Inertia;
+import org.modewright.numerics.PencilReduction;
+import org.modewright.numerics.Progress;
+import org.modewright.numerics.SingularPencilException;
+
+/**
+ * An eigenproblem with the factors of K - &sigma;M, the shift &sigma; lying below every finite eigenvalue: 0 where K is positive definite,
+ * negative for free bodies and buckled structures.
+ */
+final class ShiftedProblem {
+
+    private static final int SCALE_ITERATIONS = 8;
+    private static final int SHIFT_ATTEMPTS = 60;
+    private static final long SEED = 4711L;
+
+    private final EigenProblem problem;
+    private final Factoriser factoriser;
+    private double shift;
+    private Factorisation factorisation;
+    private int negativeInfinities;
+    private int stiffnessZeros;
+
+    private ShiftedProblem(EigenProblem problem, Progress progress) {
+        this.problem = problem;
+        this.factoriser = Factorisers.sparse(problem, progress);
+    }
+
+    /**
+     * Chooses the shift and factorises.
+     *
+     * @throws SingularPencilException if K and M share a null vector
+     */
+    static ShiftedProblem of(EigenProblem problem, Progress progress) {
+        ShiftedProblem shifted = new ShiftedProblem(problem, progress);
+        shifted.chooseShift(progress);
+        return shifted;
+    }
+
+    private void chooseShift(Progress progress) {
+        Factorisation unshifted = factorise(0.0, progress);
+        Inertia inertia = unshifted.inertia();
+        stiffnessZeros = inertia.zero();
+        if (stiffnessZeros > 0) {
+            refuseCommonNullVectors(progress);
+        }
+        if (inertia.negative() > 0) {
+            negativeInfinities = countNegativeInfinities(progress);
+        }
+        if (stiffnessZeros == 0 && inertia.negative() == negativeInfinities) {
+            factorisation = unshifted;
+            return;
+        }
+        shift = -scale(unshifted);
+        for (int attempt = 0; attempt < SHIFT_ATTEMPTS; attempt++) {
+            factorisation = factorise(shift, progress);
+            Inertia shifted = factorisation.inertia();
+            if (shifted.zero() == 0 && shifted.negative() == negativeInfinities) {
+                return;
+            }
+            shift *= 4.0;
+        }
+        throw new ArithmeticException("No shift lies below all eigenvalues: the stiffness is indefinite for motions without mass, or the"
+                + " mass is not positive semidefinite.");
+    }
+
+    private void refuseCommonNullVectors(Progress progress) {
+        PencilReduction reduction = PencilReduction.of(problem, factoriser, progress);
+        if (!reduction.isEmpty()) {
+            throw new SingularPencilException(reduction.nullVectors(), reduction.droppedDegreesOfFreedom());
+        }
+    }
+
+    /**
+     * Negative eigenvalues of K - &sigma;M for &sigma; to minus infinity: those of K on the motions without mass. They belong to no finite
+     * eigenvalue.
+     */
+    private int countNegativeInfinities(Progress progress) {
+        double far = -10.0 * largestDiagonalRatio();
+        Inertia inertia = factorise(far, progress).inertia();
+        for (int attempt = 0; attempt < SHIFT_ATTEMPTS; attempt++) {
+            Inertia farther = factorise(8.0 * far, progress).inertia();
+            if (farther.negative() == inertia.negative()) {
+                return farther.negative();
+            }
+            inertia = farther;
+            far *= 8.0;
+        }
+        return inertia.negative();
+    }
+
+    private double largestDiagonalRatio() {
+        double[] stiffness = problem.stiffness().diagonal();
+        double[] mass = problem.mass().diagonal();
+        double largest = 0.0;
+        for (int i = 0; i < mass.length; i++) {
+            if (mass[i] > 0.0) {
+                largest = Math.max(largest, Math.abs(stiffness[i]) / mass[i]);
+            }
+        }
+        return largest > 0.0 ? largest : 1.0;
+    }
+
+    /**
+     * Estimate of the lowest eigenvalue that is not zero, from inverse iteration on the structure held at its zero pivots. Where that
+     * leaves no moving mass, a small share of the diagonal ratio.
+     */
+    private double scale(Factorisation held) {
+        double[] x = new Random(SEED).doubles(problem.order(), -1.0, 1.0).toArray();
+        int[] heldThere = held.zeroPivots();
+        double flexibility = 0.0;
+        for (int iteration = 0; iteration < SCALE_ITERATIONS; iteration++) {
+            for (int i : heldThere) {
+                x[i] = 0.0;
+            }
+            double norm = Math.sqrt(Math.max(0.0, problem.mass().quadratic(x)));
+            if (norm == 0.0) {
+                break;
+            }
+            VectorMath.scale(x, 1.0 / norm);
+            double[] next = problem.mass().multiply(x);
+            double[] massTimesX = next.clone();
+            held.solve(next);
+            flexibility = Math.abs(VectorMath.dot(massTimesX, next));
+            x = next;
+        }
+        double fallback = 1e-6 * largestDiagonalRatio();
+        double scale = flexibility > 0.0 ? 1.0 / flexibility : fallback;
+        return Double.isFinite(scale) && scale > 0.0 ? scale : fallback;
+    }
+
+    private Factorisation factorise(double at, Progress progress) {
+        return factoriser.factorise(problem.stiffness(), problem.mass(), at, progress);
+    }
+
+    /**
+     * Number of finite eigenvalues below a shift. Where the shift meets an eigenvalue it is moved up a little.
+     *
+     * @param at where to count
+     * @param spacing distance by which the shift may be moved
+     */
+    Count count(double at, double spacing, Progress progress) {
+        double where = at;
+        Inertia inertia = factorise(where, progress).inertia();
+        for (int attempt = 1; inertia.zero() > 0 && attempt <= 6; attempt++) {
+            where = at + spacing * attempt / 7.0;
+            inertia = factorise(where, progress).inertia();
+        }
+        return new Count(where, inertia.negative() - negativeInfinities);
+    }
+
+    /**
+     * Result of a count.
+     *
+     * @param shift where the eigenvalues were counted
+     * @param below number of finite eigenvalues below
+     */
+    record Count(double shift, int below) {
+    }
+
+    EigenProblem problem() {
+        return problem;
+    }
+
+    double shift() {
+        return shift;
+    }
+
+    Factorisation factorisation() {
+        return factorisation;
+    }
+
+    /** Zero pivots of K: at most so many eigenvalues are zero. */
+    int stiffnessZeros() {
+        return stiffnessZeros;
+    }
+
+    /** W &larr; (K - &sigma;M)<sup>-1</sup> M V. */
+    double[][] apply(double[][] v) {
+        double[][] w = new double[v.length][];
+        for (int c = 0; c < v.length; c++) {
+            w[c] = problem.mass().multiply(v[c]);
+        }
+        factorisation.solve(w);
+        return w;
+    }
+}

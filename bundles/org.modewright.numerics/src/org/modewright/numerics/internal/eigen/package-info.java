@@ -1,0 +1,2 @@
+/** Eigen solvers and the certificate of their results. */
+package org.modewright.numerics.internal.eigen;
