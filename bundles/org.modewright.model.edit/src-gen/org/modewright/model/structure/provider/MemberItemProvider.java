@@ -534,6 +534,10 @@ public class MemberItemProvider extends GroupedItemProvider {
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(Member.class)) {
+			case StructurePackage.MEMBER__START:
+			case StructurePackage.MEMBER__END:
+			case StructurePackage.MEMBER__SECTION:
+			case StructurePackage.MEMBER__MATERIAL:
 			case StructurePackage.MEMBER__ROLL:
 			case StructurePackage.MEMBER__START_FREE:
 			case StructurePackage.MEMBER__END_FREE:

@@ -280,6 +280,7 @@ public class NodalMassItemProvider extends IdentifiedItemProvider {
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(NodalMass.class)) {
+			case StructurePackage.NODAL_MASS__NODE:
 			case StructurePackage.NODAL_MASS__UX:
 			case StructurePackage.NODAL_MASS__UY:
 			case StructurePackage.NODAL_MASS__UZ:

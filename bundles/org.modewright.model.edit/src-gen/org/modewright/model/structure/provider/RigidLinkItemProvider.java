@@ -155,6 +155,8 @@ public class RigidLinkItemProvider extends IdentifiedItemProvider {
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(RigidLink.class)) {
+			case StructurePackage.RIGID_LINK__FROM:
+			case StructurePackage.RIGID_LINK__TO:
 			case StructurePackage.RIGID_LINK__COMPONENTS:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
 				return;

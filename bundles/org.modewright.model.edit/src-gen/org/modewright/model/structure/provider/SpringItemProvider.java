@@ -303,6 +303,8 @@ public class SpringItemProvider extends GroupedItemProvider {
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(Spring.class)) {
+			case StructurePackage.SPRING__NODE:
+			case StructurePackage.SPRING__TO:
 			case StructurePackage.SPRING__UX:
 			case StructurePackage.SPRING__UY:
 			case StructurePackage.SPRING__UZ:

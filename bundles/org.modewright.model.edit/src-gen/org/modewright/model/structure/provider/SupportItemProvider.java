@@ -385,6 +385,7 @@ public class SupportItemProvider extends IdentifiedItemProvider {
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(Support.class)) {
+			case StructurePackage.SUPPORT__NODE:
 			case StructurePackage.SUPPORT__UX:
 			case StructurePackage.SUPPORT__UY:
 			case StructurePackage.SUPPORT__UZ:

@@ -173,6 +173,7 @@ public class TieTermItemProvider
 		updateChildren(notification);
 
 		switch (notification.getFeatureID(TieTerm.class)) {
+			case StructurePackage.TIE_TERM__NODE:
 			case StructurePackage.TIE_TERM__COMPONENT:
 			case StructurePackage.TIE_TERM__FACTOR:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));
