@@ -1,6 +1,8 @@
 package org.modewright.render.bench;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Locale;
 
 import org.modewright.render.Bounds;
@@ -16,7 +18,8 @@ import org.modewright.render.StandardView;
 
 /**
  * Times the frames of an animated space frame: a regular grid of columns and beams of four segments each with its ghost, nodes and supports, swaying and twisting,
- * while the camera walks round.
+ * seen by a camera that stands still (as while a mode plays) or walks
+ * round (as while it plays and the mouse drags, when the ghost has to be drawn anew in every frame).
  */
 public final class FrameBenchmark {
 
@@ -34,30 +37,47 @@ public final class FrameBenchmark {
      * @param median  milliseconds per frame, median
      * @param slowest milliseconds per frame, exceeded by one frame in twenty
      * @param strips  threads used
+     * @param walking whether the camera moved
      */
-    public record Result(int members, double median, double slowest, int strips) {
+    public record Result(int members, double median, double slowest, int strips, boolean walking) {
+
+        @Override
+        public String toString() {
+            return String.format(Locale.ROOT, "%,9d members  %7.2f ms a frame (median)  %7.2f ms (19 of 20 below)  %d thread%s, %s", members, median,
+                slowest, strips, strips == 1 ? "" : "s", walking ? "camera walking" : "camera still");
+        }
     }
 
     private FrameBenchmark() {
     }
 
-    /** Prints one line for each of 2,000, 20,000 and 100,000 members, on one thread and on two. */
+    /** Prints one line for each of 2,000, 20,000 and 100,000 members, on one thread and on two, with the camera still and walking. */
     public static void main(String[] arguments) {
+        for (Result result : measureAll()) {
+            System.out.println(result);
+        }
+    }
+
+    /** All twelve measurements that {@link #main} prints. */
+    public static List<Result> measureAll() {
+        List<Result> results = new ArrayList<>();
         for (int strips = 1; strips <= 2; strips++) {
             for (int members : new int[] {2_000, 20_000, 100_000}) {
-                Result result = measure(members, strips);
-                System.out.printf(Locale.ROOT, "%,9d members  %7.2f ms a frame (median)  %7.2f ms (19 of 20 below)  %d thread%s%n", result.members(),
-                    result.median(), result.slowest(), strips, strips == 1 ? "" : "s");
+                results.add(measure(members, strips, false));
+                results.add(measure(members, strips, true));
             }
         }
+        return results;
     }
 
     /**
      * Draws frames of {@value #WIDTH} x {@value #HEIGHT} pixels.
      *
-     * @param wanted about how many members; the grid is the smallest that has as many
+     * @param wanted  about how many members; the grid is the smallest that has as many
+     * @param strips  threads to use
+     * @param walking whether the camera walks round the structure meanwhile
      */
-    public static Result measure(int wanted, int strips) {
+    public static Result measure(int wanted, int strips, boolean walking) {
         Grid grid = Grid.with(wanted);
         Scene scene = grid.scene();
         Deformation shape = grid.shape(scene);
@@ -70,13 +90,13 @@ public final class FrameBenchmark {
         double[] milliseconds = new double[FRAMES];
         for (int i = -WARM_UP; i < FRAMES; i++) {
             long start = System.nanoTime();
-            renderer.render(scene, camera.orbit(0.01 * i, 0), shape, full * Math.sin(0.2 * i), options, raster);
+            renderer.render(scene, walking ? camera.orbit(0.01 * i, 0) : camera, shape, full * Math.sin(0.2 * i), options, raster);
             if (i >= 0) {
                 milliseconds[i] = (System.nanoTime() - start) / 1e6;
             }
         }
         Arrays.sort(milliseconds);
-        return new Result(scene.memberCount(), milliseconds[FRAMES / 2], milliseconds[FRAMES * 19 / 20], strips);
+        return new Result(scene.memberCount(), milliseconds[FRAMES / 2], milliseconds[FRAMES * 19 / 20], strips, walking);
     }
 
     /** A grid of bays in plan and storeys in height. */
