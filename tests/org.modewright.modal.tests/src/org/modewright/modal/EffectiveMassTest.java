@@ -2,6 +2,7 @@ package org.modewright.modal;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -213,11 +214,12 @@ class EffectiveMassTest {
         s.section("bar", 0.001, 1e-8, 1e-8, 1e-8);
         Member brace = s.member("brace", "n00", "n11");
         brace.setAxialOnly(true);
+        s.section("pole", 0.004, 5e-6, 5e-6, 1e-5);
         s.floor("floor 1", "n10", "n11", "n12", "n13").floor("floor 2", "n20", "n21", "n22", "n23");
         s.mass("n21", 4000, 4000, 4000, 10, 20, 3000).massOffset(0.5, -0.3, 0.2);
         s.mass("n12", 2500, 2500, 0, 0, 0, 0).mass("n03", 700, 700, 700, 0, 0, 0);
         s.node("mast", 3, 2, 9).node("arm", 3.5, 2, 9).with("mast", "n22", "mast").link("arm", "mast", "arm").mass("arm", 300, 300, 300, 0, 0, 0);
-        s.node("tip", 6, 5, 8.5).spring("hanger", "n23", "tip", 1e6, 1e6, 1e6, 0, 0, 0).mass("tip", 50, 50, 50, 0, 0, 0);
+        s.node("tip", 6, 5, 8.5).spring("hanger", "n23", "tip", 1e6, 1e6, 1e6, 2e5, 2e5, 2e5).mass("tip", 50, 50, 50, 0, 0, 0);
         return s;
     }
 
@@ -240,8 +242,8 @@ class EffectiveMassTest {
         for (Direction direction : Direction.values()) {
             assertEquals(1, result.capture(direction), 1e-12 * result.modes().size(), direction.word());
         }
-        assertEquals(true, result.modes().size() < result.freeDofs());
-        assertEquals(true, result.isExhausted());
+        assertTrue(result.modes().size() < result.freeDofs());
+        assertTrue(result.isExhausted());
     }
 
     /** A plan direction at an angle agrees with the same structure turned by that angle. */
