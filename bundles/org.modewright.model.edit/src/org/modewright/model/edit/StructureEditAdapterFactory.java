@@ -8,7 +8,9 @@ import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EStructuralFeature;
 import org.eclipse.emf.edit.provider.IItemLabelProvider;
 import org.eclipse.emf.edit.provider.ITreeItemContentProvider;
+import org.modewright.model.structure.Member;
 import org.modewright.model.structure.StructuralModel;
+import org.modewright.model.structure.provider.StructureEditPlugin;
 import org.modewright.model.structure.provider.StructureItemProviderAdapterFactory;
 
 /**
@@ -60,6 +62,9 @@ public final class StructureEditAdapterFactory extends StructureItemProviderAdap
 
         @Override
         public Object getImage(Object object) {
+            if (object instanceof Member member && member.isAxialOnly()) {
+                return StructureEditPlugin.INSTANCE.getImage(StructureItemProvider.icon("Bar"));
+            }
             Object provider = StructureEditAdapterFactory.super.adapt(object, IItemLabelProvider.class);
             return provider instanceof IItemLabelProvider images ? images.getImage(object) : null;
         }
