@@ -1,0 +1,53 @@
+package org.modewright.rcp;
+
+import org.eclipse.core.commands.common.CommandException;
+import org.eclipse.core.runtime.ILog;
+import org.eclipse.swt.graphics.Point;
+import org.eclipse.ui.IWorkbenchPage;
+import org.eclipse.ui.IWorkbenchWindow;
+import org.eclipse.ui.application.ActionBarAdvisor;
+import org.eclipse.ui.application.IActionBarConfigurer;
+import org.eclipse.ui.application.IWorkbenchWindowConfigurer;
+import org.eclipse.ui.application.WorkbenchWindowAdvisor;
+import org.eclipse.ui.handlers.IHandlerService;
+import org.modewright.ui.UiIds;
+
+/** Size, bars and first page of a window. */
+final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
+
+    private static final Point SIZE = new Point(1440, 900);
+
+    ModewrightWindowAdvisor(IWorkbenchWindowConfigurer configurer) {
+        super(configurer);
+    }
+
+    @Override
+    public ActionBarAdvisor createActionBarAdvisor(IActionBarConfigurer configurer) {
+        return new ModewrightActionBarAdvisor(configurer);
+    }
+
+    @Override
+    public void preWindowOpen() {
+        IWorkbenchWindowConfigurer configurer = getWindowConfigurer();
+        configurer.setInitialSize(SIZE);
+        configurer.setTitle(Messages.Application_title);
+        configurer.setShowCoolBar(true);
+        configurer.setShowStatusLine(true);
+        configurer.setShowProgressIndicator(true);
+        configurer.setShowPerspectiveBar(false);
+    }
+
+    @Override
+    public void postWindowOpen() {
+        IWorkbenchWindow window = getWindowConfigurer().getWindow();
+        IWorkbenchPage page = window.getActivePage();
+        if (page == null || page.getEditorReferences().length > 0) {
+            return;
+        }
+        try {
+            window.getService(IHandlerService.class).executeCommand(UiIds.START_PAGE_COMMAND, null);
+        } catch (CommandException failure) {
+            ILog.of(ModewrightWindowAdvisor.class).error("The start page could not be opened.", failure);
+        }
+    }
+}

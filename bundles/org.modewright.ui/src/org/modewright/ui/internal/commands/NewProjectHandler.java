@@ -1,0 +1,18 @@
+package org.modewright.ui.internal.commands;
+
+import org.eclipse.core.commands.AbstractHandler;
+import org.eclipse.core.commands.ExecutionEvent;
+import org.eclipse.core.commands.ExecutionException;
+import org.eclipse.ui.handlers.HandlerUtil;
+import org.modewright.ui.internal.wizards.NewProjectWizard;
+import org.modewright.ui.internal.wizards.Wizards;
+
+/** Opens the wizard for a new project. */
+public final class NewProjectHandler extends AbstractHandler {
+
+    @Override
+    public Object execute(ExecutionEvent event) throws ExecutionException {
+        Wizards.open(HandlerUtil.getActiveWorkbenchWindowChecked(event), new NewProjectWizard());
+        return null;
+    }
+}
