@@ -11,6 +11,7 @@ import java.util.stream.IntStream;
 import org.modewright.fem.Assembly;
 import org.modewright.fem.FrameElement;
 import org.modewright.fem.NodePoint;
+import org.modewright.fem.SupportCondition;
 import org.modewright.modal.Instability.Kind;
 import org.modewright.numerics.EigenPairs;
 
@@ -70,7 +71,7 @@ final class InstabilityFinder {
 
     private List<Instability> unresisted(int part, List<double[]> motions) {
         int[] members = connectivity.parts().get(part);
-        RigidMotion rigid = new RigidMotion(members, nodes);
+        RigidMotion rigid = new RigidMotion(members, nodes, held());
         List<double[]> fitted = new ArrayList<>();
         for (double[] motion : motions) {
             double[] fit = rigid.fit(motion);
@@ -82,6 +83,16 @@ final class InstabilityFinder {
             return List.of(freePart(part, members, rigid.directions(fitted), motions.size()));
         }
         return connectivity.meetsSupport(part) ? mechanisms(motions) : List.of(looseAndMoving(members, motions.size()));
+    }
+
+    private boolean[] held() {
+        boolean[] held = new boolean[6 * nodes.size()];
+        for (SupportCondition support : assembly.snapshot().supports()) {
+            for (int component = 0; component < 6; component++) {
+                held[6 * support.node() + component] = support.held()[component];
+            }
+        }
+        return held;
     }
 
     private Instability freePart(int part, int[] members, boolean[] able, int count) {

@@ -7,7 +7,8 @@ import org.modewright.fem.NodePoint;
 /**
  * Tells whether motions of a part are those of a rigid body, u<sub>i</sub> = t + &omega; &times; r<sub>i</sub>, and in which directions.
  * The fit is a least-squares one over the translations of the part's nodes; a part that does not translate at all is rigid if all its
- * nodes turn alike.
+ * nodes turn alike. A node that does not turn with the rest is no objection where nothing makes it turn (a pin joint), but is one where a
+ * support holds it.
  */
 final class RigidMotion {
 
@@ -17,12 +18,21 @@ final class RigidMotion {
     private final double[] centre = new double[3];
     private final double size;
     private final List<NodePoint> points;
+    private final boolean[] held;
     private final List<double[]> basis = new ArrayList<>();
     private final List<double[]> coefficients = new ArrayList<>();
 
-    RigidMotion(int[] part, List<NodePoint> points) {
+    /**
+     * Of a part.
+     *
+     * @param part indices of its nodes
+     * @param points all nodes
+     * @param held six a node: whether a support holds the component
+     */
+    RigidMotion(int[] part, List<NodePoint> points, boolean[] held) {
         this.part = part;
         this.points = points;
+        this.held = held;
         for (int node : part) {
             centre[0] += points.get(node).x() / part.length;
             centre[1] += points.get(node).y() / part.length;
@@ -96,7 +106,52 @@ final class RigidMotion {
                 rotation = Math.max(rotation, Math.abs(shape[6 * part[i] + 3 + component]));
             }
         }
-        return translation > ROUND_OFF * size * rotation ? fitTranslations(field, translation) : fitSpin(shape, rotation);
+        if (translation <= ROUND_OFF * size * rotation) {
+            return fitSpin(shape, rotation);
+        }
+        double[] motion = fitTranslations(field, translation);
+        if (motion != null && basis.size() < 6) {
+            addSpin(motion, shape);
+        }
+        return motion != null && turnAlike(shape, motion, ROUND_OFF * Math.max(rotation, translation / size)) ? motion : null;
+    }
+
+    /** The mean turn about the line of a straight part, which no translation shows. */
+    private void addSpin(double[] motion, double[] shape) {
+        double[] axis = axis();
+        double spin = 0;
+        for (int node : part) {
+            for (int i = 0; i < 3; i++) {
+                spin += axis[i] * (shape[6 * node + 3 + i] - motion[3 + i]) / part.length;
+            }
+        }
+        for (int i = 0; i < 3; i++) {
+            motion[3 + i] += spin * axis[i];
+        }
+    }
+
+    private double[] axis() {
+        double[] longest = new double[3];
+        for (int node : part) {
+            double[] arm = arm(node);
+            longest = dot(arm, arm) > dot(longest, longest) ? arm : longest;
+        }
+        double length = norm(longest);
+        scale(longest, length > 0 ? 1 / length : 0);
+        return longest;
+    }
+
+    private boolean turnAlike(double[] shape, double[] motion, double tolerance) {
+        for (int node : part) {
+            for (int component = 3; component < 6; component++) {
+                double turned = shape[6 * node + component];
+                boolean still = Math.abs(turned) <= tolerance && !held[6 * node + component];
+                if (!still && Math.abs(turned - motion[component]) > tolerance) {
+                    return false;
+                }
+            }
+        }
+        return true;
     }
 
     private double[] fitTranslations(double[] field, double largest) {
