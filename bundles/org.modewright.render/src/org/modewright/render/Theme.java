@@ -28,6 +28,11 @@ public record Theme(int backgroundTop, int backgroundBottom, int member, int sec
         return new Theme(argb, argb, member, section, ghost, panel, node, support, text, selection, hover);
     }
 
+    /** The same theme with another colour of what is selected. */
+    public Theme withSelection(int argb) {
+        return new Theme(backgroundTop, backgroundBottom, member, section, ghost, panel, node, support, text, argb, hover);
+    }
+
     /** The background's colour in the middle of the picture. */
     public int backgroundMiddle() {
         return Argb.mix(backgroundTop, backgroundBottom, 0.5);

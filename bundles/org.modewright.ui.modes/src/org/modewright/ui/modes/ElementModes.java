@@ -1,0 +1,98 @@
+package org.modewright.ui.modes;
+
+import java.util.List;
+import java.util.Set;
+import java.util.function.IntConsumer;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Label;
+import org.eclipse.swt.widgets.Spinner;
+import org.eclipse.swt.widgets.Table;
+import org.eclipse.swt.widgets.TableColumn;
+import org.eclipse.swt.widgets.TableItem;
+import org.modewright.modal.Dominance;
+import org.modewright.modal.Dominance.ModeShare;
+import org.modewright.modal.ModalResult;
+import org.modewright.modal.Mode;
+import org.modewright.ui.UiIds;
+import org.modewright.ui.widgets.Numbers;
+
+/** The modes in which the selected elements hold more than a chosen share of the strain or kinetic energy. */
+final class ElementModes {
+
+    private final Composite body;
+    private final Label sentence;
+    private final Spinner least;
+    private final Table table;
+    private ModalResult result;
+    private Set<String> elementIds = Set.of();
+    private List<ModeShare> shares = List.of();
+
+    ElementModes(Composite parent, IntConsumer whenPicked) {
+        body = new Composite(parent, SWT.NONE);
+        body.setLayout(new GridLayout(3, false));
+        sentence = new Label(body, SWT.WRAP);
+        GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false, 3, 1);
+        wide.widthHint = 60;
+        sentence.setLayoutData(wide);
+        sentence.setData(UiIds.WIDGET_ID, "dominance.modesSentence");
+        new Label(body, SWT.NONE).setText(Messages.Dominance_atLeast);
+        least = new Spinner(body, SWT.BORDER);
+        least.setValues(50, 1, 1000, 1, 10, 50);
+        least.setData(UiIds.WIDGET_ID, "dominance.least");
+        least.addListener(SWT.Selection, event -> refresh());
+        new Label(body, SWT.NONE).setText("%");
+        table = new Table(body, SWT.FULL_SELECTION | SWT.BORDER);
+        table.setHeaderVisible(true);
+        table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 3, 1));
+        table.setData(UiIds.WIDGET_ID, "dominance.modes");
+        column(SWT.RIGHT, Messages.Column_number, 56);
+        column(SWT.RIGHT, Messages.Column_period, 80);
+        column(SWT.RIGHT, Messages.Dominance_strain, 120);
+        column(SWT.RIGHT, Messages.Dominance_kinetic, 128);
+        column(SWT.LEFT, Messages.Column_character, 200);
+        table.addListener(SWT.Selection, event -> pick(whenPicked));
+    }
+
+    private void column(int style, String header, int width) {
+        TableColumn column = new TableColumn(table, style);
+        column.setText(header);
+        column.setWidth(width);
+    }
+
+    Control control() {
+        return body;
+    }
+
+    void show(ModalResult newResult, Set<String> ids) {
+        result = newResult;
+        elementIds = ids;
+        refresh();
+    }
+
+    private void refresh() {
+        table.removeAll();
+        if (result == null) {
+            return;
+        }
+        double share = least.getSelection() / 1000.0;
+        shares = new Dominance(result).modesOf(elementIds, share);
+        sentence.setText(DominanceSentence.modesOf(result, elementIds, share, shares).replace("&", "&&"));
+        for (ModeShare row : shares) {
+            Mode mode = result.modes().get(row.mode());
+            new TableItem(table, SWT.NONE).setText(new String[] {Integer.toString(mode.number()), Numbers.significant(mode.period()),
+                Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()), mode.character().text()});
+        }
+        body.layout();
+    }
+
+    private void pick(IntConsumer whenPicked) {
+        int index = table.getSelectionIndex();
+        if (index >= 0 && index < shares.size()) {
+            whenPicked.accept(shares.get(index).mode());
+        }
+    }
+}
