@@ -33,7 +33,6 @@ import org.modewright.model.structure.Vector;
 /** Reads a well-formed model into the records of a snapshot, converting to SI units. */
 final class SnapshotReader {
 
-    private final StructuralModel model;
     private final Units units;
     private final double gravity;
     private final Map<Node, Integer> index = new IdentityHashMap<>();
@@ -50,7 +49,6 @@ final class SnapshotReader {
     private final List<LinearTie> ties = new ArrayList<>();
 
     SnapshotReader(StructuralModel model) {
-        this.model = model;
         this.units = Units.of(model);
         this.gravity = Units.gravitySi(model);
         model.getNodes().forEach(this::readNode);
