@@ -9,6 +9,7 @@ import org.eclipse.jface.action.Separator;
 import org.eclipse.jface.action.ToolBarContributionItem;
 import org.eclipse.jface.action.ToolBarManager;
 import org.eclipse.swt.SWT;
+import org.eclipse.ui.ISharedImages;
 import org.eclipse.ui.IWorkbenchActionConstants;
 import org.eclipse.ui.IWorkbenchWindow;
 import org.eclipse.ui.actions.ActionFactory;
@@ -38,6 +39,14 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
             ActionFactory.RESET_PERSPECTIVE, ActionFactory.OPEN_NEW_WINDOW}) {
             register(factory.create(shown));
         }
+        illustrate(ActionFactory.UNDO, ISharedImages.IMG_TOOL_UNDO, ISharedImages.IMG_TOOL_UNDO_DISABLED);
+        illustrate(ActionFactory.REDO, ISharedImages.IMG_TOOL_REDO, ISharedImages.IMG_TOOL_REDO_DISABLED);
+    }
+
+    private void illustrate(ActionFactory factory, String image, String disabled) {
+        ISharedImages images = window.getWorkbench().getSharedImages();
+        action(factory).setImageDescriptor(images.getImageDescriptor(image));
+        action(factory).setDisabledImageDescriptor(images.getImageDescriptor(disabled));
     }
 
     @Override

@@ -3,8 +3,10 @@ package org.modewright.rcp;
 import org.eclipse.core.commands.common.CommandException;
 import org.eclipse.core.runtime.ILog;
 import org.eclipse.swt.graphics.Point;
+import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.ui.IWorkbenchPage;
 import org.eclipse.ui.IWorkbenchWindow;
+import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.application.ActionBarAdvisor;
 import org.eclipse.ui.application.IActionBarConfigurer;
 import org.eclipse.ui.application.IWorkbenchWindowConfigurer;
@@ -15,7 +17,7 @@ import org.modewright.ui.UiIds;
 /** Size, bars and first page of a window. */
 final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
 
-    private static final Point SIZE = new Point(1440, 900);
+    private static final Point SIZE = new Point(1600, 1000);
 
     ModewrightWindowAdvisor(IWorkbenchWindowConfigurer configurer) {
         super(configurer);
@@ -29,7 +31,8 @@ final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
     @Override
     public void preWindowOpen() {
         IWorkbenchWindowConfigurer configurer = getWindowConfigurer();
-        configurer.setInitialSize(SIZE);
+        Rectangle screen = PlatformUI.getWorkbench().getDisplay().getPrimaryMonitor().getClientArea();
+        configurer.setInitialSize(new Point(Math.min(SIZE.x, screen.width), Math.min(SIZE.y, screen.height)));
         configurer.setTitle(Messages.Application_title);
         configurer.setShowCoolBar(true);
         configurer.setShowStatusLine(true);

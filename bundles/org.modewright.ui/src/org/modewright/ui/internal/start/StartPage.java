@@ -2,6 +2,7 @@ package org.modewright.ui.internal.start;
 
 import java.util.List;
 import org.eclipse.core.resources.IFile;
+import org.eclipse.core.resources.ResourcesPlugin;
 import org.eclipse.core.runtime.ILog;
 import org.eclipse.core.runtime.IProgressMonitor;
 import org.eclipse.jface.dialogs.MessageDialog;
@@ -14,12 +15,18 @@ import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.ScrolledComposite;
 import org.eclipse.swt.graphics.Font;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.ui.IEditorInput;
+import org.eclipse.ui.IEditorReference;
 import org.eclipse.ui.IEditorSite;
+import org.eclipse.ui.IPartListener2;
 import org.eclipse.ui.IWorkbenchPage;
+import org.eclipse.ui.IWorkbenchPartReference;
 import org.eclipse.ui.PartInitException;
 import org.eclipse.ui.ide.IDE;
 import org.eclipse.ui.part.EditorPart;
@@ -33,13 +40,19 @@ import org.modewright.ui.widgets.ThemeColours;
 /** Where a session of work begins: a new project, an import, the sample, or a recent model; with the caution, once and briefly. */
 public final class StartPage extends EditorPart {
 
-    private static final int MARGIN = 24;
-    private static final int COLUMN = 300;
+    private static final int MARGIN = 32;
+    private static final int COLUMN = 260;
+    private static final int WIDEST = 900;
+
+    private final IPartListener2 otherEditors = new OtherEditors();
 
     private LocalResourceManager resources;
     private Composite recent;
     private ScrolledComposite scroller;
     private Composite page;
+    private Composite head;
+    private Composite foot;
+    private Label rule;
 
     /** Opens the start page or brings it to the front. */
     public static void open(IWorkbenchPage page) {
@@ -63,15 +76,44 @@ public final class StartPage extends EditorPart {
         scroller = new ScrolledComposite(parent, SWT.V_SCROLL | SWT.H_SCROLL);
         scroller.setExpandHorizontal(true);
         scroller.setExpandVertical(true);
-        page = new Composite(scroller, SWT.NONE);
-        GridLayoutFactory.fillDefaults().margins(MARGIN, MARGIN).numColumns(2).spacing(32, 16).applyTo(page);
+        Composite sheet = new Composite(scroller, SWT.NONE);
+        GridLayoutFactory.fillDefaults().margins(MARGIN, MARGIN).applyTo(sheet);
+        sheet.setBackgroundMode(SWT.INHERIT_FORCE);
+        page = new Composite(sheet, SWT.NONE);
+        GridLayoutFactory.fillDefaults().numColumns(2).spacing(32, 16).applyTo(page);
+        GridDataFactory.fillDefaults().align(SWT.CENTER, SWT.BEGINNING).grab(true, true).applyTo(page);
         createHead();
         createBegin();
         createRecent();
         createFoot();
-        scroller.setContent(page);
+        scroller.setContent(sheet);
         scroller.addListener(SWT.Resize, event -> fit());
         fit();
+        getSite().getPage().addPartListener(otherEditors);
+        parent.getDisplay().asyncExec(this::fillEmptyWindow);
+    }
+
+    @Override
+    public void dispose() {
+        getSite().getPage().removePartListener(otherEditors);
+        super.dispose();
+    }
+
+    /** Without a project there is nothing else to look at: the page takes the whole window. */
+    private void fillEmptyWindow() {
+        IWorkbenchPage window = getSite().getPage();
+        boolean alone = window.getEditorReferences().length == 1 && ResourcesPlugin.getWorkspace().getRoot().getProjects().length == 0;
+        if (alone && !scroller.isDisposed()) {
+            window.setPartState(window.getReference(this), IWorkbenchPage.STATE_MAXIMIZED);
+        }
+    }
+
+    private void giveWay() {
+        IWorkbenchPage window = getSite().getPage();
+        IWorkbenchPartReference reference = window.getReference(this);
+        if (reference != null && window.getPartState(reference) == IWorkbenchPage.STATE_MAXIMIZED) {
+            window.setPartState(reference, IWorkbenchPage.STATE_RESTORED);
+        }
     }
 
     @Override
@@ -101,7 +143,7 @@ public final class StartPage extends EditorPart {
     }
 
     private void createHead() {
-        Composite head = new Composite(page, SWT.NONE);
+        head = new Composite(page, SWT.NONE);
         GridLayoutFactory.fillDefaults().numColumns(2).spacing(24, 4).applyTo(head);
         GridDataFactory.fillDefaults().span(2, 1).grab(true, false).applyTo(head);
         Composite words = new Composite(head, SWT.NONE);
@@ -129,9 +171,9 @@ public final class StartPage extends EditorPart {
     }
 
     private void createFoot() {
-        Label rule = new Label(page, SWT.SEPARATOR | SWT.HORIZONTAL);
+        rule = new Label(page, SWT.SEPARATOR | SWT.HORIZONTAL);
         GridDataFactory.fillDefaults().span(2, 1).indent(0, 8).applyTo(rule);
-        Composite foot = new Composite(page, SWT.NONE);
+        foot = new Composite(page, SWT.NONE);
         GridLayoutFactory.fillDefaults().numColumns(2).spacing(8, 8).applyTo(foot);
         GridDataFactory.fillDefaults().span(2, 1).grab(true, false).applyTo(foot);
         Label sign = new Label(foot, SWT.NONE);
@@ -194,8 +236,30 @@ public final class StartPage extends EditorPart {
     }
 
     private void fit() {
-        int width = Math.max(2 * COLUMN, scroller.getClientArea().width);
-        scroller.setMinSize(page.computeSize(width, SWT.DEFAULT));
+        int room = scroller.getClientArea().width;
+        int width = Math.max(COLUMN, Math.min(WIDEST, room - 2 * MARGIN));
+        GridLayout columns = (GridLayout) page.getLayout();
+        int number = width < 2 * COLUMN + columns.horizontalSpacing ? 1 : 2;
+        if (columns.numColumns != number) {
+            columns.numColumns = number;
+            for (Control wide : List.of(head, rule, foot)) {
+                ((GridData) wide.getLayoutData()).horizontalSpan = number;
+            }
+        }
+        ((GridData) page.getLayoutData()).widthHint = width;
+        scroller.setMinSize(page.getParent().computeSize(Math.max(room, width + 2 * MARGIN), SWT.DEFAULT));
+        page.getParent().layout(true, true);
+    }
+
+    /** Gives way to the first model that is opened. */
+    private final class OtherEditors implements IPartListener2 {
+
+        @Override
+        public void partOpened(IWorkbenchPartReference reference) {
+            if (reference instanceof IEditorReference && reference.getPart(false) != StartPage.this) {
+                giveWay();
+            }
+        }
     }
 
     private static Label wrapped(Composite parent, String text) {
