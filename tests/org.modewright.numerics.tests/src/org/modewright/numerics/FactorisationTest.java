@@ -37,7 +37,7 @@ class FactorisationTest {
         }
     }
 
-    private static double[] denseEigenvalues(SymmetricMatrix matrix) {
+    static double[] denseEigenvalues(SymmetricMatrix matrix) {
         int n = matrix.order();
         DMatrixRMaj full = new DMatrixRMaj(n, n);
         for (int i = 0; i < n; i++) {

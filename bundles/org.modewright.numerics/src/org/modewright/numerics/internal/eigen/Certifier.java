@@ -25,15 +25,18 @@ final class Certifier {
      */
     SpectrumCertificate certify(EigenPairs pairs, int beyond, ShiftedProblem.Count count, Progress progress) {
         double worstResidual = 0.0;
+        boolean accurate = true;
         for (int i = 0; i < pairs.count(); i++) {
             progress.checkCancelled();
-            worstResidual = Math.max(worstResidual,
-                    EigenPairChecks.residual(shifted.problem(), pairs.values()[i], pairs.vectors()[i]));
+            double residual = EigenPairChecks.residual(shifted.problem(), pairs.values()[i], pairs.vectors()[i]);
+            worstResidual = Math.max(worstResidual, residual);
+            accurate &= residual <= LARGEST_RESIDUAL
+                    || residual <= EigenPairChecks.unavoidableResidual(shifted.problem(), pairs.values()[i], pairs.vectors()[i]);
         }
         progress.checkCancelled();
         double orthogonality = EigenPairChecks.worstOrthogonality(shifted.problem().mass(), pairs.vectors());
         int found = pairs.count() + beyond;
-        boolean complete = count.below() == found && worstResidual <= LARGEST_RESIDUAL && orthogonality <= LARGEST_ORTHOGONALITY;
+        boolean complete = count.below() == found && accurate && orthogonality <= LARGEST_ORTHOGONALITY;
         return new SpectrumCertificate(complete, count.shift(), count.below(), found, worstResidual, orthogonality);
     }
 }

@@ -22,6 +22,18 @@ record DenseSpectrum(double[] values, double[][] vectors) {
         return CancellableCall.run(() -> decompose(symmetric), progress);
     }
 
+    /** Spectrum of the symmetric part of L<sup>T</sup>R. */
+    static DenseSpectrum ofProduct(double[][] left, double[][] right, Progress progress) {
+        double[][] product = BlockOperations.transposedProduct(left, left.length, right);
+        DMatrixRMaj symmetric = new DMatrixRMaj(product.length, product.length);
+        for (int i = 0; i < product.length; i++) {
+            for (int j = 0; j < product.length; j++) {
+                symmetric.set(i, j, 0.5 * (product[i][j] + product[j][i]));
+            }
+        }
+        return of(symmetric, progress);
+    }
+
     private static DenseSpectrum decompose(DMatrixRMaj symmetric) {
         int n = symmetric.numRows;
         EigenDecomposition_F64<DMatrixRMaj> eigen = DecompositionFactory_DDRM.eig(n, true, true);

@@ -6,10 +6,12 @@ import org.modewright.numerics.EigenPairs;
 import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.Progress;
 
-/** Makes the answer of a solver from purified vectors: normalises them, measures residuals and bounds errors. */
+/** Makes the answer of a solver from purified vectors: measures residuals and bounds errors. */
 final class EigenPairAssembly {
 
     private static final double ROUND_OFF = 16.0 * Math.ulp(1.0);
+    /** Values below this share of the shift are taken from the Rayleigh quotient. */
+    private static final double NEAR_ZERO = 1e-3;
     private static final int PANEL = 8;
 
     private final ShiftedProblem shifted;
@@ -24,12 +26,11 @@ final class EigenPairAssembly {
      * Assembles eigenpairs.
      *
      * @param values ascending
-     * @param vectors nearly M-orthonormal; normalised in place
+     * @param vectors M-orthonormal; the array is kept
      * @param exhausted whether there are no more finite eigenvalues
      */
     EigenPairs assemble(double[] values, double[][] vectors, boolean exhausted, Progress progress) {
         progress.report("Checking the modes", Double.NaN);
-        orthonormalise(vectors, progress);
         double[] cleaned = cleanZeros(values, vectors);
         double[] residuals = new double[values.length];
         for (int i = 0; i < values.length; i++) {
@@ -40,38 +41,33 @@ final class EigenPairAssembly {
         return new EigenPairs(cleaned, vectors, residuals, errorBounds(cleaned, vectors, progress), exhausted);
     }
 
-    /** Gram-Schmidt from the lowest vector up, so that a vector only loses components that leave its residual small. */
-    private void orthonormalise(double[][] vectors, Progress progress) {
-        double[][] massTimes = new double[vectors.length][];
-        for (int j = 0; j < vectors.length; j++) {
-            progress.checkCancelled();
-            double[][] single = {vectors[j]};
-            double[][] h = BlockOperations.transposedProduct(massTimes, j, single);
-            BlockOperations.subtractProduct(single, vectors, j, h);
-            massTimes[j] = problem.mass().multiply(vectors[j]);
-            double norm = Math.sqrt(VectorMath.dot(vectors[j], massTimes[j]));
-            VectorMath.scale(vectors[j], 1.0 / norm);
-            VectorMath.scale(massTimes[j], 1.0 / norm);
-        }
-    }
-
+    /**
+     * A value near zero went through a shift that is large against it: the Rayleigh quotient is more accurate there, and is zero if it
+     * cannot be told from round-off.
+     */
     private double[] cleanZeros(double[] values, double[][] vectors) {
         double[] cleaned = values.clone();
         if (shifted.stiffnessZeros() == 0) {
             return cleaned;
         }
         for (int i = 0; i < cleaned.length; i++) {
-            double[] size = EigenPairChecks.absoluteProduct(problem.stiffness(), vectors[i]);
-            double reference = 0.0;
-            for (int k = 0; k < size.length; k++) {
-                reference += Math.abs(vectors[i][k]) * size[k];
-            }
-            if (Math.abs(cleaned[i]) <= ROUND_OFF * reference) {
-                cleaned[i] = 0.0;
+            if (Math.abs(cleaned[i]) <= NEAR_ZERO * Math.abs(shifted.shift())) {
+                double quotient = problem.stiffness().quadratic(vectors[i]);
+                double roundOff = ROUND_OFF * (energyOfSizes(vectors[i]) + Math.abs(shifted.shift()));
+                cleaned[i] = Math.abs(quotient) <= roundOff ? 0.0 : quotient;
             }
         }
         Arrays.sort(cleaned);
         return cleaned;
+    }
+
+    private double energyOfSizes(double[] vector) {
+        double[] size = EigenPairChecks.absoluteProduct(problem.stiffness(), vector);
+        double energy = 0.0;
+        for (int k = 0; k < size.length; k++) {
+            energy += Math.abs(vector[k]) * size[k];
+        }
+        return energy;
     }
 
     private static void orient(double[] vector) {

@@ -1,5 +1,7 @@
 package org.modewright.numerics.internal.eigen;
 
+import java.util.Arrays;
+
 import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.SymmetricMatrix;
 
@@ -9,14 +11,30 @@ final class EigenPairChecks {
     private EigenPairChecks() {
     }
 
-    /** ||K&phi; - &lambda;M&phi;|| / ||K&phi;||; for &lambda; = 0 relative to || |K||&phi;| ||. */
+    /** ||K&phi; - &lambda;M&phi;|| / ||K&phi;||; for &lambda; = 0 relative to ||K||<sub>1</sub> ||&phi;||. */
     static double residual(EigenProblem problem, double value, double[] vector) {
         double[] force = problem.stiffness().multiply(vector);
-        double reference = value == 0.0 ? VectorMath.norm(absoluteProduct(problem.stiffness(), vector)) : VectorMath.norm(force);
+        double reference = value == 0.0 ? columnSumNorm(problem.stiffness()) * VectorMath.norm(vector) : VectorMath.norm(force);
         double[] inertiaForce = problem.mass().multiply(vector);
         VectorMath.add(force, -value, inertiaForce);
         double size = VectorMath.norm(force);
         return size == 0.0 ? 0.0 : size / reference;
+    }
+
+    private static double columnSumNorm(SymmetricMatrix matrix) {
+        double[] ones = new double[matrix.order()];
+        Arrays.fill(ones, 1.0);
+        return Arrays.stream(absoluteProduct(matrix, ones)).max().orElse(0.0);
+    }
+
+    /** The residual of a pair that is exact but for the rounding of its components: 32 &epsilon; || |K||&phi;| || / ||K&phi;||. */
+    static double unavoidableResidual(EigenProblem problem, double value, double[] vector) {
+        double roundOff = 32.0 * Math.ulp(1.0);
+        if (value == 0.0) {
+            return roundOff;
+        }
+        double force = VectorMath.norm(problem.stiffness().multiply(vector));
+        return force == 0.0 ? 0.0 : roundOff * VectorMath.norm(absoluteProduct(problem.stiffness(), vector)) / force;
     }
 
     /** |K| |x|. */

@@ -21,13 +21,14 @@ final class LanczosEigenSession extends CertifiedSession {
 
     private final int rank;
     private final LanczosBasis basis;
-    private EigenPairs known = new EigenPairs(new double[0], new double[0][], new double[0], new double[0], false);
+    private EigenPairs known;
     private double nextEstimate = Double.POSITIVE_INFINITY;
 
     LanczosEigenSession(ShiftedProblem shifted, int rank) {
         super(shifted);
         this.rank = rank;
         this.basis = new LanczosBasis(shifted, rank);
+        this.known = new EigenPairs(new double[0], new double[0][], new double[0], new double[0], rank == 0);
     }
 
     @Override
@@ -52,7 +53,7 @@ final class LanczosEigenSession extends CertifiedSession {
             double spacing = 1e-9 * Math.abs(request.below() - shifted().shift());
             limit = Math.min(limit, shifted().count(request.below(), spacing, progress).below());
         }
-        if (limit > known.count() || limit > 0 && known.count() == 0) {
+        if (limit > known.count()) {
             extend(limit, progress);
         }
         return answer(Math.min(request.count(), limit), request.below());
@@ -63,7 +64,7 @@ final class LanczosEigenSession extends CertifiedSession {
         for (int hunt = 0; ; ) {
             RitzPairs ritz = converge(wanted, limit, progress);
             double[] values = ritz.eigenvalues(shifted().shift());
-            int converged = ritz.converged(TOLERANCE);
+            int converged = ritz.converged(TOLERANCE, shifted().shift());
             int end = SpectralGap.endOfCluster(values, Math.min(limit, values.length) - 1, shifted().shift());
             if (end + 1 > converged && converged >= wanted) {
                 wanted = Math.min(rank, end + 1);
@@ -84,8 +85,12 @@ final class LanczosEigenSession extends CertifiedSession {
     }
 
     private void keep(RitzPairs ritz, int count, double next, Progress progress) {
-        double[] values = Arrays.copyOf(ritz.eigenvalues(shifted().shift()), count);
+        double[] theta = Arrays.copyOf(ritz.theta(), count);
         double[][] vectors = basis.purifiedVectors(ritz, count, progress);
+        if (count > 0) {
+            new GradedRefinement(shifted().problem().mass(), shifted()::apply, progress).refine(theta, vectors);
+        }
+        double[] values = Arrays.stream(theta).map(value -> shifted().shift() + 1.0 / value).toArray();
         EigenPairs assembled = new EigenPairAssembly(shifted()).assemble(values, vectors, count == rank, progress);
         known = assembled;
         nextEstimate = next;
@@ -104,7 +109,7 @@ final class LanczosEigenSession extends CertifiedSession {
         while (true) {
             grow(Math.min(capacity, Math.max(enough, basis.size() + EXPANSIONS_PER_CHECK * BLOCK)), progress);
             RitzPairs ritz = basis.ritzPairs(progress);
-            int converged = ritz.converged(TOLERANCE);
+            int converged = ritz.converged(TOLERANCE, shifted().shift());
             progress.report("Converged modes: " + Math.min(converged, asked) + " of " + asked, Math.min(1.0, (double) converged / wanted));
             if (converged >= wanted || basis.nextSize() == 0 && !basis.inject(BLOCK)) {
                 return ritz;

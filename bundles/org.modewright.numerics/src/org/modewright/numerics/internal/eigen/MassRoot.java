@@ -2,7 +2,6 @@ package org.modewright.numerics.internal.eigen;
 
 import java.util.Arrays;
 
-import org.ejml.data.DMatrixRMaj;
 import org.modewright.numerics.SymmetricMatrix;
 
 /**
@@ -13,11 +12,9 @@ final class MassRoot {
 
     private static final double EPSILON = Math.ulp(1.0);
 
-    private final int order;
     private final double[][] columns;
 
-    private MassRoot(int order, double[][] columns) {
-        this.order = order;
+    private MassRoot(double[][] columns) {
         this.columns = columns;
     }
 
@@ -42,7 +39,7 @@ final class MassRoot {
             columns[rank] = column(dense[pivot], pivot, columns, rank, remaining);
             rank++;
         }
-        return new MassRoot(n, Arrays.copyOf(columns, rank));
+        return new MassRoot(Arrays.copyOf(columns, rank));
     }
 
     private static int next(double[] remaining, double[] original) {
@@ -80,14 +77,8 @@ final class MassRoot {
         return column;
     }
 
-    /** B. */
-    DMatrixRMaj matrix() {
-        DMatrixRMaj b = new DMatrixRMaj(order, columns.length);
-        for (int c = 0; c < columns.length; c++) {
-            for (int i = 0; i < order; i++) {
-                b.set(i, c, columns[c][i]);
-            }
-        }
-        return b;
+    /** The columns of B, each of length n. */
+    double[][] columns() {
+        return columns;
     }
 }

@@ -9,14 +9,24 @@ package org.modewright.numerics.internal.eigen;
  */
 record RitzPairs(double[] theta, double[][] coefficients, double[] residuals) {
 
+    /** For values near zero the residual is not measured against K &phi;. */
+    private static final double SMALLEST_SHARE = 1e-3;
+
     int count() {
         return theta.length;
     }
 
-    /** Number of leading pairs whose residual is at most tolerance &theta;. */
-    int converged(double tolerance) {
+    /**
+     * Number of leading pairs whose purified vectors have relative residuals of at most a tolerance: ||r|| / &theta; divided by
+     * &lambda; &theta; = 1 + &sigma; &theta;, which is 1 without a shift.
+     */
+    int converged(double tolerance, double shift) {
         int count = 0;
-        while (count < theta.length && theta[count] > 0.0 && residuals[count] <= tolerance * theta[count]) {
+        while (count < theta.length && theta[count] > 0.0) {
+            double share = Math.min(1.0, Math.max(SMALLEST_SHARE, Math.abs(1.0 + shift * theta[count])));
+            if (residuals[count] > tolerance * theta[count] * share) {
+                break;
+            }
             count++;
         }
         return count;
