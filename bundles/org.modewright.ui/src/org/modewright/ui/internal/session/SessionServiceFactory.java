@@ -15,7 +15,7 @@ public final class SessionServiceFactory extends AbstractServiceFactory {
     private final Map<IWorkbenchWindow, WindowAuditSession> sessions = new HashMap<>();
 
     @Override
-    public Object create(Class serviceInterface, IServiceLocator parent, IServiceLocator locator) {
+    public Object create(@SuppressWarnings("rawtypes") Class serviceInterface, IServiceLocator parent, IServiceLocator locator) {
         IWorkbenchWindow window = locator.getService(IWorkbenchWindow.class);
         return window == null || serviceInterface != AuditSession.class ? null : session(window);
     }
