@@ -1,7 +1,8 @@
 package org.modewright.render;
 
 /**
- * The layer behind a moving structure, kept from frame to frame while the camera and the scene's state stay: background and ghost do not change while a shape swings.
+ * The layer behind a moving structure, kept from frame to frame while the camera and the scene's state stay: background and ghost do not
+ * change while a shape swings.
  */
 final class Backdrop {
 

@@ -117,8 +117,8 @@ public final class Camera {
     }
 
     /**
-     * A camera between this one and another, for a smooth change of view: angles by the shorter way, size in equal ratios, eased at both ends
-     * (3t² - 2t³).
+     * A camera between this one and another, for a smooth change of view: angles by the shorter way, size in equal ratios, eased at both
+     * ends (3t² - 2t³).
      *
      * @param t 0 gives this camera, 1 the other
      */

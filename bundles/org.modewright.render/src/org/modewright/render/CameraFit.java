@@ -3,8 +3,9 @@ package org.modewright.render;
 /**
  * Finds the nearest camera of a given direction that sees a whole box.
  *
- * <p>A corner at (r, d) right of and behind the target is seen if |r - r0| &lt;= H + t d, where r0 is the target's shift, H the half width at the
- * target and t = tan(half the angle of view). So H &gt;= (max(r - t d) - min(r + t d)) / 2 and r0 is the mean of both extremes; likewise upwards.
+ * <p>A corner at (r, d) right of and behind the target is seen if |r - r0| &lt;= H + t d, where r0 is the target's shift, H the half
+ * width at the target and t = tan(half the angle of view). So H &gt;= (max(r - t d) - min(r + t d)) / 2 and r0 is the mean of both
+ * extremes; likewise upwards.
  */
 final class CameraFit {
 

@@ -3,8 +3,8 @@ package org.modewright.render;
 import java.util.List;
 
 /**
- * A ramp from light to dark: straight lines between anchors in OKLCH, walked at an even pace of perceived difference (length in OKLab), so that equal steps of
- * the value look equally large.
+ * A ramp from light to dark: straight lines between anchors in OKLCH, walked at an even pace of perceived difference (length in OKLab),
+ * so that equal steps of the value look equally large.
  */
 public final class ColourRamp {
 
@@ -31,7 +31,10 @@ public final class ColourRamp {
         }
     }
 
-    /** The ramp for energies and other shares: pale apricot through terracotta to deep mulberry, the same on light and on dark backgrounds. */
+    /**
+     * The ramp for energies and other shares: pale apricot through terracotta to deep mulberry, the same on light and on dark
+     * backgrounds.
+     */
     public static ColourRamp energy() {
         return new ColourRamp(List.of(new Oklch(0.86, 0.095, 82), new Oklch(0.70, 0.15, 44), new Oklch(0.54, 0.17, 18),
             new Oklch(0.38, 0.13, -14)));

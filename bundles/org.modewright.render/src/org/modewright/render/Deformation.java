@@ -1,10 +1,12 @@
 package org.modewright.render;
 
 /**
- * The displacement of every vertex of a scene in one shape, computed once and then drawn at any amplitude as position + factor × displacement.
+ * The displacement of every vertex of a scene in one shape, computed once and then drawn at any amplitude as position + factor ×
+ * displacement.
  *
- * <p>A member between its ends i and j of length L with unit axis e follows the cubic Hermite shape functions of the Euler–Bernoulli beam (Przemieniecki,
- * Theory of Matrix Structural Analysis, 1968, ch. 5; from memory): with ξ = 0…1, u⊥ the part of an end displacement square to e and θ the end rotations,
+ * <p>A member between its ends i and j of length L with unit axis e follows the cubic Hermite shape functions of the Euler–Bernoulli beam
+ * (Przemieniecki, Theory of Matrix Structural Analysis, 1968, ch. 5; from memory): with ξ = 0…1, u⊥ the part of an end displacement
+ * square to e and θ the end rotations,
  * <pre>
  * d(ξ) = e ((1 - ξ) e·u_i + ξ e·u_j) + N1 u⊥_i + L N2 θ_i × e + N3 u⊥_j + L N4 θ_j × e
  * N1 = 1 - 3ξ² + 2ξ³, N2 = ξ - 2ξ² + ξ³, N3 = 3ξ² - 2ξ³, N4 = -ξ² + ξ³
@@ -34,7 +36,8 @@ public final class Deformation {
     /**
      * Bends a member.
      *
-     * @param ends u_x, u_y, u_z, θ_x, θ_y, θ_z of the start, then of the end, global components; where an end is released give the rotation of the
+     * @param ends u_x, u_y, u_z, θ_x, θ_y, θ_z of the start, then of the end, global components; where an end is released give the
+     * rotation of the
      *     member's own end
      */
     public void member(int member, double[] ends) {

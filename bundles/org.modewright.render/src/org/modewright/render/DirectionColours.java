@@ -1,8 +1,8 @@
 package org.modewright.render;
 
 /**
- * The colours of the directions, the same in plots, tables and axes: from the palette of Okabe and Ito (Color Universal Design, 2008), which colour-blind
- * readers can tell apart. Never use them as the only sign.
+ * The colours of the directions, the same in plots, tables and axes: from the palette of Okabe and Ito (Color Universal Design, 2008),
+ * which colour-blind readers can tell apart. Never use them as the only sign.
  */
 public final class DirectionColours {
 

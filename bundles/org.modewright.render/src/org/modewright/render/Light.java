@@ -1,6 +1,9 @@
 package org.modewright.render;
 
-/** One light that stands at the viewer's upper left; both faces of a surface are lit alike (Lambert's cosine law on top of an even light). */
+/**
+ * One light that stands at the viewer's upper left; both faces of a surface are lit alike (Lambert's cosine law on top of an even
+ * light).
+ */
 final class Light {
 
     private static final double EVEN = 0.70;

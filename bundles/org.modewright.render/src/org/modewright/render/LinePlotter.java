@@ -1,8 +1,9 @@
 package org.modewright.render;
 
 /**
- * Straight lines with a width in pixels. A line is walked along its longer direction; in each column (or row) the pixels take the share of their height (or
- * width) that the line covers, which is exact but for the ends. Columns count from the first whose centre lies in [start, end), so that
+ * Straight lines with a width in pixels. A line is walked along its longer direction; in each column (or row) the pixels take the share
+ * of their height (or width) that the line covers, which is exact but for the ends. Columns count from the first whose centre lies in
+ * [start, end), so that
  * the pieces of a chain meet without a gap and without a doubled pixel.
  *
  * <p>Ends far outside the picture are harmless: only what lies inside is walked.

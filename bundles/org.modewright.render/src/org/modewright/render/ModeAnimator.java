@@ -1,7 +1,8 @@
 package org.modewright.render;
 
 /**
- * The clock of a moving shape. It knows no real time: the caller says how many seconds have passed, so that a frame can be repeated exactly.
+ * The clock of a moving shape. It knows no real time: the caller says how many seconds have passed, so that a frame can be repeated
+ * exactly.
  *
  * <p>factor = amplitude × model size / largest displacement × sin(phase).
  */

@@ -1,7 +1,8 @@
 package org.modewright.render;
 
 /**
- * The perceptual colour space OKLCH (B. Ottosson, A perceptual color space for image processing, 2020): lightness 0 to 1, chroma, hue in degrees.
+ * The perceptual colour space OKLCH (B. Ottosson, A perceptual color space for image processing, 2020): lightness 0 to 1, chroma, hue in
+ * degrees.
  */
 public record Oklch(double lightness, double chroma, double hue) {
 

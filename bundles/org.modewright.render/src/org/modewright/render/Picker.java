@@ -3,8 +3,9 @@ package org.modewright.render;
 import java.util.Arrays;
 
 /**
- * Finds primitives in the last frame drawn. A marker within reach of the pointer wins over members; of members that lie right under the pointer the nearest to the
- * viewer wins, else the one closest to the pointer; a triangle is found where nothing else is. What an opaque triangle under the pointer
+ * Finds primitives in the last frame drawn. A marker within reach of the pointer wins over members; of members that lie right under the
+ * pointer the nearest to the viewer wins, else the one closest to the pointer; a triangle is found where nothing else is. What an opaque
+ * triangle under the pointer
  * hides is not found.
  */
 final class Picker {

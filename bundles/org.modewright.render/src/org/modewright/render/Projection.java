@@ -4,8 +4,9 @@ package org.modewright.render;
  * A camera applied to a picture of given size: model coordinates to pixels and depth, and back.
  *
  * <p>With r, u, f the camera's right, up and forward axes and p the vector from the target to a point, w = 1 (orthographic) or 1 + f·p / D
- * (perspective, D the viewer's distance): screen x = W/2 + s r·p / w and y = H/2 - s u·p / w, where s is pixels per length at the target. Depth is f·p
- * (orthographic) or -D / w (perspective); both are affine in the picture's plane, so that depth may be interpolated linearly there.
+ * (perspective, D the viewer's distance): screen x = W/2 + s r·p / w and y = H/2 - s u·p / w, where s is pixels per length at the target.
+ * Depth is f·p (orthographic) or -D / w (perspective); both are affine in the picture's plane, so that depth may be interpolated linearly
+ * there.
  */
 public final class Projection {
 

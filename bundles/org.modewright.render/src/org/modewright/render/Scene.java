@@ -156,7 +156,8 @@ public final class Scene {
     public void colourByScalar(PrimitiveKind kind, double[] value, ColourRamp ramp, double low, double high) {
         int[] colour = colours(kind);
         if (value.length != colour.length) {
-            throw new IllegalArgumentException(value.length + " values were given for " + colour.length + " primitives of kind " + kind + ".");
+            throw new IllegalArgumentException(
+                value.length + " values were given for " + colour.length + " primitives of kind " + kind + ".");
         }
         for (int i = 0; i < colour.length; i++) {
             colour[i] = ramped(value[i], ramp, low, high);

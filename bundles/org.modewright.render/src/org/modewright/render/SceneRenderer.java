@@ -3,8 +3,8 @@ package org.modewright.render;
 import java.util.stream.IntStream;
 
 /**
- * Draws scenes into rasters and finds what lies under the pointer in the last frame. Keeps its arrays from frame to frame, so that an animation allocates next to
- * nothing. Use one renderer for each canvas, from one thread.
+ * Draws scenes into rasters and finds what lies under the pointer in the last frame. Keeps its arrays from frame to frame, so that an
+ * animation allocates next to nothing. Use one renderer for each canvas, from one thread.
  */
 public final class SceneRenderer {
 

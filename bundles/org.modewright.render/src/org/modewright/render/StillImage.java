@@ -7,7 +7,8 @@ public final class StillImage {
     }
 
     /** The scene at the given size, drawn at double size and averaged down. */
-    public static Raster render(Scene scene, Camera camera, Deformation deformation, double factor, RenderOptions options, int width, int height) {
+    public static Raster render(Scene scene, Camera camera, Deformation deformation, double factor, RenderOptions options,
+        int width, int height) {
         Raster large = new Raster(2 * width, 2 * height);
         RenderOptions doubled = options.copy().scale(2 * options.scale());
         new SceneRenderer().render(scene, camera, deformation, factor, doubled, large);

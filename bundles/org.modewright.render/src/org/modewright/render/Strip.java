@@ -1,8 +1,8 @@
 package org.modewright.render;
 
 /**
- * Some rows of a raster to draw into, with the rule of how a pixel is written: only where nothing nearer was drawn; a pixel that is covered by half or more
- * takes the depth as well, so that thin fringes do not hide what lies behind them.
+ * Some rows of a raster to draw into, with the rule of how a pixel is written: only where nothing nearer was drawn; a pixel that is
+ * covered by half or more takes the depth as well, so that thin fringes do not hide what lies behind them.
  *
  * <p>Whatever is drawn computes each pixel from its own place alone, so that the picture does not depend on how it is cut into strips.
  */
@@ -35,9 +35,12 @@ final class Strip {
 
     /** @param weight share of the pixel that is covered, 0 to 256 */
     void blend(int index, float z, int argb, int weight) {
-        if (behindOnly ? z <= depth[index] : z > depth[index]) {
-            return;
+        if (z > depth[index] == behindOnly) {
+            write(index, z, argb, weight);
         }
+    }
+
+    private void write(int index, float z, int argb, int weight) {
         int alpha = argb >>> 24;
         int share = alpha == FULL ? weight : weight * alpha / FULL;
         if (share >= FULL) {
@@ -51,7 +54,10 @@ final class Strip {
         }
     }
 
-    /** Turns the rule round: what is drawn next shows, blended, only where something nearer hides it, and leaves the depth alone. Use translucent colours. */
+    /**
+     * Turns the rule round: what is drawn next shows, blended, only where something nearer hides it, and leaves the depth alone. Use
+     * translucent colours.
+     */
     void behindOnly(boolean on) {
         behindOnly = on;
     }

@@ -5,11 +5,11 @@ import java.util.HashMap;
 import java.util.Map;
 
 /**
- * A small font of strokes, for texts inside the drawing at any size: letters, digits and the usual signs. Accents are left off, and a character that the
- * font does not know is an empty box.
+ * A small font of strokes, for texts inside the drawing at any size: letters, digits and the usual signs. Accents are left off, and a
+ * character that the font does not know is an empty box.
  *
- * <p>The design grid is {@value #CAP} units from the baseline to the top of capitals. A glyph is a list of strokes, a stroke a list of points, each an x
- * digit and a y digit; a, b, c are 1, 2, 3 below the baseline.
+ * <p>The design grid is {@value #CAP} units from the baseline to the top of capitals. A glyph is a list of strokes, a stroke a list of
+ * points, each an x digit and a y digit; a, b, c are 1, 2, 3 below the baseline.
  */
 final class StrokeFont {
 
@@ -34,11 +34,15 @@ final class StrokeFont {
         "g|54 36 26 04 02 20 30 52|56 5a 3c 2c 0b", "h|09 00|04 26 36 54 50", "i|06 00|08 09", "j|26 2a 0c|28 29", "k|09 00|46 02|24 50",
         "l|09 00", "m|06 00|04 16 26 44 40|44 56 66 84 80", "n|06 00|04 26 36 54 50", "o|20 30 52 54 36 26 04 02 20",
         "p|06 0c|04 26 36 54 52 30 20 02", "q|56 5c|54 36 26 04 02 20 30 52", "r|06 00|04 26 36", "s|45 36 16 05 04 13 33 42 41 30 10 01",
-        "t|28 21 30 40|06 46", "u|06 02 20 30 52|56 50", "v|06 30 66", "w|06 20 45 60 86", "x|00 56|06 50", "y|06 30|66 1c", "z|06 56 00 50",
+        "t|28 21 30 40|06 46", "u|06 02 20 30 52|56 50", "v|06 30 66", "w|06 20 45 60 86", "x|00 56|06 50", "y|06 30|66 1c",
+        "z|06 56 00 50",
         ".|00 01", ",|11 0b", ":|01 02|05 06", ";|12 11|11 0b|15 16", "-|04 44", "\u2013|04 64", "\u2212|04 64", "+|04 64|31 37",
-        "/|0a 59", "(|29 06 03 20", ")|09 26 23 00", "[|29 09 00 20", "]|09 29 20 00", "=|03 53|05 55", "%|00 69|08 19 28 17 08|41 52 61 50 41",
-        "_|0a 6a", "\u00b1|16 56|34 38|12 52", "*|31 37|13 55|15 53", "#|10 29|40 59|03 63|06 66", "\u00b0|08 19 28 17 08", "\u00b2|08 19 28 05 25",
-        "\u00b3|09 29 17 26 15 05", "'|09 07", "\"|09 07|29 27", "<|57 04 51", ">|07 54 01", "?|07 29 49 67 66 34 33|30 31", "!|09 03|00 01",
+        "/|0a 59", "(|29 06 03 20", ")|09 26 23 00", "[|29 09 00 20", "]|09 29 20 00", "=|03 53|05 55",
+        "%|00 69|08 19 28 17 08|41 52 61 50 41",
+        "_|0a 6a", "\u00b1|16 56|34 38|12 52", "*|31 37|13 55|15 53", "#|10 29|40 59|03 63|06 66", "\u00b0|08 19 28 17 08",
+        "\u00b2|08 19 28 05 25",
+        "\u00b3|09 29 17 26 15 05", "'|09 07", "\"|09 07|29 27", "<|57 04 51", ">|07 54 01", "?|07 29 49 67 66 34 33|30 31",
+        "!|09 03|00 01",
         "\u00b7|04 05", "\u00d7|16 52|12 56", "&|62 40 20 02 03 27 29 39 47 46 60"};
 
     private final Map<Integer, String[]> glyphs = new HashMap<>();

@@ -80,7 +80,8 @@ final class TextPainter {
             int farthest = farthest(p, axes, drawn);
             drawn[farthest] = true;
             double[] a = axes[farthest];
-            arm(cx, cy, p.alongRight(a[0], a[1], a[2]), p.alongUp(a[0], a[1], a[2]), "XYZ".substring(farthest, farthest + 1), colours[farthest]);
+            String name = "XYZ".substring(farthest, farthest + 1);
+            arm(cx, cy, p.alongRight(a[0], a[1], a[2]), p.alongUp(a[0], a[1], a[2]), name, colours[farthest]);
         }
         shapes.disc(cx, cy, Strip.IN_FRONT, frame.pixels(2.2), frame.theme.member());
     }

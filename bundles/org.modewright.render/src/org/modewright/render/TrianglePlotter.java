@@ -1,8 +1,9 @@
 package org.modewright.render;
 
 /**
- * Filled triangles. Corners are rounded to 1/256 pixel and a pixel belongs to the triangle that holds its centre, a centre on an edge to the triangle on the
- * right of or below that edge: triangles that share an edge leave no gap and draw no pixel twice. Depth and colour are linear over the picture.
+ * Filled triangles. Corners are rounded to 1/256 pixel and a pixel belongs to the triangle that holds its centre, a centre on an edge to
+ * the triangle on the right of or below that edge: triangles that share an edge leave no gap and draw no pixel twice. Depth and colour
+ * are linear over the picture.
  */
 final class TrianglePlotter {
 
@@ -43,8 +44,8 @@ final class TrianglePlotter {
         return Math.abs(value) > GUARD;
     }
 
-    private void fill(double x0, double y0, double z0, int argb0, double x1, double y1, double z1, int argb1, double x2, double y2, double z2,
-        int argb2) {
+    private void fill(double x0, double y0, double z0, int argb0, double x1, double y1, double z1, int argb1, double x2, double y2,
+        double z2, int argb2) {
         long ax = Math.round(x0 * SUBPIXELS);
         long ay = Math.round(y0 * SUBPIXELS);
         long bx = Math.round(x1 * SUBPIXELS);
@@ -59,7 +60,8 @@ final class TrianglePlotter {
         }
     }
 
-    private void fill(long ax, long ay, double az, int a, long bx, long by, double bz, int b, long cx, long cy, double cz, int c, long area) {
+    private void fill(long ax, long ay, double az, int a, long bx, long by, double bz, int b, long cx, long cy, double cz, int c,
+        long area) {
         int left = (int) Math.max(0, Math.min(ax, Math.min(bx, cx)) / SUBPIXELS - 1);
         int right = (int) Math.min(strip.width - 1, Math.max(ax, Math.max(bx, cx)) / SUBPIXELS + 1);
         int top = (int) Math.max(strip.firstRow, Math.min(ay, Math.min(by, cy)) / SUBPIXELS - 1);

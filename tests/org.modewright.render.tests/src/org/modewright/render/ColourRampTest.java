@@ -58,7 +58,8 @@ class ColourRampTest {
 
     @Test
     void whiteAndAPrimaryHaveTheirPublishedCoordinates() {
-        // B. Ottosson, A perceptual color space for image processing (2020), from memory: white has L = 1, a = b = 0; sRGB red L = 0.628, a = 0.225, b = 0.126.
+        // B. Ottosson, A perceptual color space for image processing (2020), from memory: white has L = 1, a = b = 0; sRGB red L = 0.628,
+        // a = 0.225, b = 0.126.
         double[] white = Oklch.lab(0xFFFFFFFF);
         assertEquals(1, white[0], 1e-3);
         assertEquals(0, Math.hypot(white[1], white[2]), 1e-3);

@@ -62,7 +62,7 @@ class DeformationTest {
 
     @Test
     void aCantileverWithATipForceBendsAsInTheTextbooks() {
-        // w(x) = F x² (3L - x) / (6EI): with tip deflection 1 and tip slope 3/(2L), w(ξ) = ξ² (3 - ξ) / 2 (closed form, exactly cubic).
+        // Closed form: w(x) = F x² (3L - x) / (6EI): with tip deflection 1 and tip slope 3/(2L), w(ξ) = ξ² (3 - ξ) / 2
         double[] out = new double[3];
         double[] ends = {0, 0, 0, 0, 0, 0, 0, 0, 1, 0, -1.5 / 8, 0};
         for (double xi = 0; xi <= 1; xi += 0.125) {

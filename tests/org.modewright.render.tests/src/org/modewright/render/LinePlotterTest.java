@@ -74,6 +74,14 @@ class LinePlotterTest {
     }
 
     @Test
+    void onlyPixelsCoveredByHalfOrMoreHideWhatLiesBehind() {
+        // The row above takes 0.3 of the line's cover, its own row 0.7.
+        lines.line(0, 8.2, 5, 24, 8.2, 5, 1, BLACK);
+        assertEquals(Float.POSITIVE_INFINITY, raster.depth()[7 * 24 + 12]);
+        assertEquals(5, raster.depth()[8 * 24 + 12]);
+    }
+
+    @Test
     void linesThatCrossInDepthChangeSidesWhereTheyMeet() {
         lines.line(0, 8.5, 0, 24, 8.5, 24, 1, RED);
         lines.line(0, 8.5, 12, 24, 8.5, 12, 1, BLUE);

@@ -134,7 +134,8 @@ class PickerTest {
         renderer.render(b.build(), front, null, 0, options, raster);
         assertArrayEquals(new int[] {3}, renderer.pickRectangle(PrimitiveKind.MEMBER, 5, 30, 40, 60, false));
         assertArrayEquals(new int[] {2, 3}, renderer.pickRectangle(PrimitiveKind.MEMBER, 40, 60, 5, 30, true));
-        assertArrayEquals(new int[] {2}, renderer.pickRectangle(PrimitiveKind.MEMBER, 50, 40, 55, 60, true), "crossing without a vertex inside");
+        assertArrayEquals(new int[] {2}, renderer.pickRectangle(PrimitiveKind.MEMBER, 50, 40, 55, 60, true),
+            "crossing without a vertex inside");
         assertArrayEquals(new int[] {4}, renderer.pickRectangle(PrimitiveKind.MARKER, 5, 30, 40, 60, false));
     }
 }

@@ -90,6 +90,11 @@ class SceneRendererTest {
         int[] second = raster.colour().clone();
         new SceneRenderer().render(scene, front, shape, 2, options, raster);
         assertArrayEquals(raster.colour(), second);
+        Camera aside = front.orbit(0.4, 0);
+        renderer.render(scene, aside, shape, 2, options, raster);
+        int[] turned = raster.colour().clone();
+        new SceneRenderer().render(scene, aside, shape, 2, options, raster);
+        assertArrayEquals(raster.colour(), turned);
         scene.mark(PrimitiveKind.MEMBER, Mark.HIDDEN, id -> true);
         renderer.render(scene, front, shape, 2, options, raster);
         assertFalse(contains(theme.ghost()), "hidden members have no ghost");
@@ -145,8 +150,26 @@ class SceneRendererTest {
         assertNotEquals(GROUND, raster.pixel(50, 63));
         assertEquals(GROUND, raster.pixel(50, 32));
         assertEquals(GROUND, raster.pixel(50, 67));
+        assertEquals(-0.5f, raster.depth()[50 * SIZE + 50], 1e-5f, "its near face is seen, half its width before its axis");
         render(scene, Thickness.LINES);
         assertEquals(GROUND, raster.pixel(50, 40));
+    }
+
+    @Test
+    void aSectionTwistsWithItsMember() {
+        SceneBuilder b = Scene.builder();
+        b.member(0, 0, 0, 5, 10, 0, 5, 2, new double[] {0, 1, 0}, 1, 3);
+        Scene scene = b.build();
+        Deformation quarterTurn = new Deformation(scene);
+        quarterTurn.member(0, new double[] {0, 0, 0, Math.PI / 2, 0, 0, 0, 0, 0, Math.PI / 2, 0, 0});
+        renderer.render(scene, front, quarterTurn, 1, options.ghost(false), raster);
+        assertNotEquals(GROUND, raster.pixel(50, 46));
+        assertEquals(GROUND, raster.pixel(50, 43), "the flat side, 10 pixels high, is seen now");
+        assertEquals(-1.5f, raster.depth()[50 * SIZE + 50], 1e-5f);
+        renderer.render(scene, front, quarterTurn, 0.5, options, raster);
+        // An eighth of a turn: half height = (1 + 3) / 2 * sin 45 degrees = 1.41 units.
+        assertNotEquals(GROUND, raster.pixel(50, 37));
+        assertEquals(GROUND, raster.pixel(50, 33));
     }
 
     private void render(Scene scene, Thickness thickness) {
@@ -283,7 +306,11 @@ class SceneRendererTest {
             // Single precision of pixels below 100.
             assertEquals(50 - 10 * 3 * xi * xi * (3 - xi) / 2, screen[1], 1e-4);
             assertEquals(100 * xi, screen[0], 1e-4);
+            if (v < 8) {
+                assertNotEquals(GROUND, raster.pixel((int) screen[0], (int) screen[1]), "drawn at vertex " + v);
+            }
         }
+        assertEquals(GROUND, raster.pixel(50, 35), "not along the chord");
     }
 
     @Test
@@ -356,6 +383,20 @@ class SceneRendererTest {
         render(scene);
         assertTrue(contains(RED));
         assertFalse(contains(BLUE));
+    }
+
+    @Test
+    void aLabelThatWouldRunOutOnTheRightStandsOnTheLeft() {
+        SceneBuilder b = Scene.builder();
+        b.vertex(0, 0, 0);
+        b.label(0, b.vertex(9.5, 0, 5), "Roof");
+        Scene scene = b.build();
+        scene.colour(PrimitiveKind.LABEL, 0, RED);
+        render(scene);
+        assertTrue(contains(RED));
+        for (int y = 0; y < SIZE; y++) {
+            assertNotEquals(RED, raster.pixel(97, y));
+        }
     }
 
     @Test

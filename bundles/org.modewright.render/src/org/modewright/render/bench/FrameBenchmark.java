@@ -17,8 +17,8 @@ import org.modewright.render.SceneRenderer;
 import org.modewright.render.StandardView;
 
 /**
- * Times the frames of an animated space frame: a regular grid of columns and beams of four segments each with its ghost, nodes and supports, swaying and twisting,
- * seen by a camera that stands still (as while a mode plays) or walks
+ * Times the frames of an animated space frame: a regular grid of columns and beams of four segments each with its ghost, nodes and
+ * supports, swaying and twisting, seen by a camera that stands still (as while a mode plays) or walks
  * round (as while it plays and the mouse drags, when the ghost has to be drawn anew in every frame).
  */
 public final class FrameBenchmark {
@@ -43,8 +43,8 @@ public final class FrameBenchmark {
 
         @Override
         public String toString() {
-            return String.format(Locale.ROOT, "%,9d members  %7.2f ms a frame (median)  %7.2f ms (19 of 20 below)  %d thread%s, %s", members, median,
-                slowest, strips, strips == 1 ? "" : "s", walking ? "camera walking" : "camera still");
+            return String.format(Locale.ROOT, "%,9d members  %7.2f ms a frame (median)  %7.2f ms (19 of 20 below)  %d thread%s, %s",
+                members, median, slowest, strips, strips == 1 ? "" : "s", walking ? "camera walking" : "camera still");
         }
     }
 
