@@ -23,7 +23,9 @@ public final class Figures {
         if (size < 1e-4 || size >= 1e7) {
             return String.format(Locale.ROOT, "%." + (digits - 1) + "e", value);
         }
-        return BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_UP)).toPlainString();
+        BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_UP));
+        int decimals = Math.max(0, digits - rounded.precision() + rounded.scale());
+        return rounded.setScale(decimals, RoundingMode.HALF_UP).toPlainString();
     }
 
     /** One significant digit and the exponent, "3e-11". */

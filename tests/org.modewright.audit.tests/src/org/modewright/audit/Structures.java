@@ -13,6 +13,7 @@ import org.modewright.model.structure.Material;
 import org.modewright.model.structure.Member;
 import org.modewright.model.structure.NodalMass;
 import org.modewright.model.structure.Node;
+import org.modewright.model.structure.RigidFloor;
 import org.modewright.model.structure.RigidLink;
 import org.modewright.model.structure.Spring;
 import org.modewright.model.structure.StructuralModel;
@@ -147,6 +148,52 @@ final class Structures {
         for (Component component : components) {
             (atStart ? member.getStartFree() : member.getEndFree()).add(component);
         }
+    }
+
+    Structures floor(String name, String... members) {
+        RigidFloor floor = FACTORY.createRigidFloor();
+        floor.setName(name);
+        for (String member : members) {
+            floor.getNodes().add(nodes.get(member));
+        }
+        model.getRigidFloors().add(floor);
+        return this;
+    }
+
+    /**
+     * A frame building of 2 by 2 bays with rigid floors, stiffest round the perimeter, so that it sways before it twists; node
+     * {@code n<level><0..8>}, columns {@code c}, beams {@code x} and {@code y}.
+     */
+    static Structures building(int storeys) {
+        Structures s = new Structures("building").material("concrete", 3e10, 0.2, 2500);
+        for (int level = 0; level <= storeys; level++) {
+            for (int i = 0; i < 9; i++) {
+                String name = "n" + level + i;
+                s.node(name, (i % 3) * 6.0, (i / 3) * 5.0, 3.5 * level);
+                if (level == 0) {
+                    s.support(name, "ux uy uz rx ry rz");
+                } else {
+                    boolean corner = i != 4 && i % 2 == 0;
+                    s.section("column " + name, corner ? 0.25 : 0.09, corner ? 5e-3 : 7e-4, corner ? 8e-3 : 7e-4, corner ? 9e-3 : 1e-3);
+                    s.with("c" + level + i, "n" + (level - 1) + i, name).mass(name, i == 4 ? 24000 : 9000, i == 4 ? 24000 : 9000, 9000, 0, 0, 0);
+                }
+            }
+        }
+        s.section("beam", 0.18, 5e-3, 2e-3, 2e-3);
+        for (int level = 1; level <= storeys; level++) {
+            String[] names = new String[9];
+            for (int i = 0; i < 9; i++) {
+                names[i] = "n" + level + i;
+                if (i % 3 < 2) {
+                    s.with("x" + level + i, names[i], "n" + level + (i + 1));
+                }
+                if (i < 6) {
+                    s.with("y" + level + i, names[i], "n" + level + (i + 3));
+                }
+            }
+            s.floor("floor " + level, names);
+        }
+        return s;
     }
 
     Structures link(String name, String from, String to) {

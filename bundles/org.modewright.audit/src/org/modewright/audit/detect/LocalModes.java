@@ -26,6 +26,7 @@ final class LocalModes implements FindingDetector {
     private static final String OF_GROUP = " of group ";
     private static final double LEADING = 0.8;
     private static final int ELEMENTS = 20;
+    private static final double SMALLEST_SHOWN = 0.001;
 
     @Override
     public List<Finding> detect(AuditContext context) {
@@ -56,10 +57,14 @@ final class LocalModes implements FindingDetector {
         }
         boolean one = modes.size() == 1;
         return new Finding(ID, Severity.INFO, objects(modes, modal), (one ? "Mode " + numbers + " is" : "Modes " + numbers + " are")
-                + " local: " + place + ". " + (one ? "It moves" : "Each moves") + " at most " + Figures.percent(largest)
+                + " local: " + place + ". " + (one ? "It moves " : "Each moves ") + atMost(largest)
                 + " of the mass in X, Y or Z.",
                 "Nothing, if that part is meant to be so flexible; otherwise check its sections, connections and mass. Such modes only"
                         + " delay the mass that counts.");
+    }
+
+    private static String atMost(double share) {
+        return share < SMALLEST_SHOWN / 2 ? "less than " + Figures.percent(SMALLEST_SHOWN) : "at most " + Figures.percent(share);
     }
 
     private static List<ObjectRef> objects(List<Mode> modes, ModalResult modal) {
