@@ -3,6 +3,7 @@ package org.modewright.rcp;
 import org.eclipse.jface.action.GroupMarker;
 import org.eclipse.jface.action.ICoolBarManager;
 import org.eclipse.jface.action.IMenuManager;
+import org.eclipse.jface.action.IStatusLineManager;
 import org.eclipse.jface.action.IToolBarManager;
 import org.eclipse.jface.action.MenuManager;
 import org.eclipse.jface.action.Separator;
@@ -62,11 +63,16 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
     protected void fillCoolBar(ICoolBarManager bar) {
         IToolBarManager tools = new ToolBarManager(SWT.FLAT | SWT.RIGHT);
         add(tools, ActionFactory.SAVE);
-        tools.add(new Separator());
+        tools.add(new Separator("history"));
         add(tools, ActionFactory.UNDO);
         add(tools, ActionFactory.REDO);
         bar.add(new ToolBarContributionItem(tools, "org.modewright.rcp.toolbar.main"));
         bar.add(new GroupMarker(IWorkbenchActionConstants.MB_ADDITIONS));
+    }
+
+    @Override
+    protected void fillStatusLine(IStatusLineManager line) {
+        line.add(new CertificateItem(window));
     }
 
     private MenuManager fileMenu() {

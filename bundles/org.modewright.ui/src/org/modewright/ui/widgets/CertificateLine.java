@@ -1,4 +1,4 @@
-package org.modewright.ui.internal;
+package org.modewright.ui.widgets;
 
 import org.eclipse.jface.resource.JFaceResources;
 import org.eclipse.jface.resource.LocalResourceManager;
@@ -6,53 +6,43 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
-import org.eclipse.ui.menus.WorkbenchWindowControlContribution;
 import org.modewright.audit.AuditResult;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
 import org.modewright.ui.UiIds;
-import org.modewright.ui.widgets.Images;
+import org.modewright.ui.internal.Messages;
 
-/** The certificate of the last run in the window's status line: the one line that a reviewer reads. */
-public final class CertificateLine extends WorkbenchWindowControlContribution {
+/** The certificate of the last run: the one line that a reviewer reads. Follows the session until it is disposed. */
+public final class CertificateLine extends Composite {
 
-    private static final int WIDTH = 560;
+    private final LocalResourceManager images = new LocalResourceManager(JFaceResources.getResources(), this);
+    private final AuditSession session;
+    private final Label sign;
+    private final Label text;
 
-    private final AuditSession.Listener listener = this::changed;
-    private AuditSession session;
-    private LocalResourceManager images;
-    private Composite line;
-    private Label sign;
-    private Label text;
-
-    @Override
-    protected Control createControl(Composite parent) {
-        line = new Composite(parent, SWT.NONE);
-        images = new LocalResourceManager(JFaceResources.getResources(), line);
+    public CertificateLine(Composite parent, AuditSession session) {
+        super(parent, SWT.NONE);
+        this.session = session;
         GridLayout layout = new GridLayout(2, false);
         layout.marginHeight = 0;
         layout.marginWidth = 8;
-        line.setLayout(layout);
-        sign = new Label(line, SWT.NONE);
+        setLayout(layout);
+        sign = new Label(this, SWT.NONE);
         GridData signData = new GridData(SWT.LEFT, SWT.CENTER, false, true);
         signData.widthHint = 16;
         sign.setLayoutData(signData);
-        text = new Label(line, SWT.NONE);
-        GridData data = new GridData(SWT.LEFT, SWT.CENTER, true, true);
-        data.widthHint = WIDTH;
-        text.setLayoutData(data);
+        text = new Label(this, SWT.NONE);
+        text.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, true));
         text.setData(UiIds.WIDGET_ID, "certificate");
-        session = getWorkbenchWindow().getService(AuditSession.class);
+        AuditSession.Listener listener = this::changed;
         session.addListener(listener);
-        line.addListener(SWT.Dispose, event -> session.removeListener(listener));
+        addListener(SWT.Dispose, event -> session.removeListener(listener));
         refresh();
-        return line;
     }
 
     private void changed(Change change) {
-        if (change != Change.SELECTION && line != null && !line.isDisposed()) {
+        if (change != Change.SELECTION && !isDisposed()) {
             refresh();
         }
     }
