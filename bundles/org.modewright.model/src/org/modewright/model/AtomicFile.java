@@ -28,7 +28,7 @@ final class AtomicFile {
             if (Files.exists(target) && !Files.isWritable(target)) {
                 throw new AccessDeniedException(target.toString(), null, "the file is write-protected");
             }
-            temporary = target.resolveSibling("." + target.getFileName() + "." + UUID.randomUUID() + ".tmp");
+            temporary = target.resolveSibling(".modewright-" + UUID.randomUUID() + ".tmp");
             writeAndFlush(temporary, bytes);
             keepPermissions(target, temporary);
             Files.move(temporary, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);

@@ -70,15 +70,20 @@ final class NumberChecks {
     }
 
     private void checkNumber(EObject object, EAttribute attribute, double value) {
-        String subject = "The " + attribute.getName() + " of " + Names.describe(object) + " is " + value;
         Range range = rangeOf(object, attribute);
         if (!Double.isFinite(value)) {
-            defects.error("number-not-finite", object, attribute, subject + ".", "Enter a finite number.");
+            defects.error("number-not-finite", object, attribute, subject(object, attribute, value) + ".", "Enter a finite number.");
         } else if (range == Range.POSITIVE && value <= 0) {
-            defects.error("number-not-positive", object, attribute, subject + "; it must be positive.", positiveRemedy(attribute));
+            defects.error("number-not-positive", object, attribute, subject(object, attribute, value) + "; it must be positive.",
+                    positiveRemedy(attribute));
         } else if (range == Range.NOT_NEGATIVE && value < 0) {
-            defects.error("number-negative", object, attribute, subject + "; it must not be negative.", "Enter zero or a positive number.");
+            defects.error("number-negative", object, attribute, subject(object, attribute, value) + "; it must not be negative.",
+                    "Enter zero or a positive number.");
         }
+    }
+
+    private static String subject(EObject object, EAttribute attribute, double value) {
+        return "The " + attribute.getName() + " of " + Names.describe(object) + " is " + value;
     }
 
     private static String positiveRemedy(EAttribute attribute) {

@@ -79,15 +79,16 @@ class BrokenModelFileTest {
 
     @Test
     void danglingReference() {
-        assertFault(document("  <nodes id=\"n1\"/>", "  <members id=\"m1\" name=\"B1\" start=\"n1\" end=\"n9\"/>", "  <nodes id=\"n2\"/>"), 4,
-                46, "The end of member B1 refers to 'n9', which is not in the file.");
+        assertFault(document("  <nodes id=\"n1\"/>", "  <members id=\"m1\" name=\"B1\" start=\"n1\" end=\"n9\"/>",
+                "  <nodes id=\"n2\"/>"), 4, 46, "The end of member B1 refers to 'n9', which is not in the file.");
         assertFault(document("  <nodes id=\"n1\"/>", "  <rigidFloors id=\"f1\" nodes=\"n1 n2\"/>"), 4, 34, "refers to 'n2'");
         assertFault(document("  <rigidFloors id=\"f1\" nodes=\"n1 n2 n3 n4 n5 n6 n7\"/>"), 3, 31, "refers to 'n1'");
     }
 
     @Test
     void referenceToTheWrongKind() {
-        assertFault(document("  <materials id=\"mat1\" name=\"Steel\"/>", "  <members id=\"m1\" start=\"mat1\"/>", "  <nodes id=\"n2\"/>"), 4, 20,
+        assertFault(document("  <materials id=\"mat1\" name=\"Steel\"/>", "  <members id=\"m1\" start=\"mat1\"/>",
+                "  <nodes id=\"n2\"/>"), 4, 20,
                 "The start of member m1 refers to material Steel, not to a Node.");
         assertFault(document("  <materials id=\"mat1\"/>", "  <rigidFloors id=\"f1\" nodes=\"mat1\"/>", "  <nodes id=\"n2\"/>"), 4, 24,
                 "refers to material mat1, not to a Node.");
@@ -170,7 +171,8 @@ class BrokenModelFileTest {
     void notAModelFile() {
         assertFault("<?xml version=\"1.0\"?>\n<html><body/></html>", 2, 2, "This is not a model file");
         assertFault("<xmi:XMI xmlns:xmi=\"http://www.omg.org/XMI\"/>", 1, 2, "This is not a model file");
-        assertFault("<s:Node xmlns:s=\"urn:modewright:structure:1\" id=\"n1\"/>", 1, 2, "The root element is s:Node, not a StructuralModel.");
+        assertFault("<s:Node xmlns:s=\"urn:modewright:structure:1\" id=\"n1\"/>", 1, 2,
+                "The root element is s:Node, not a StructuralModel.");
     }
 
     @Test

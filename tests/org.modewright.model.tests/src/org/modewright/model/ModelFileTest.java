@@ -33,6 +33,7 @@ import org.eclipse.emf.ecore.util.EcoreUtil;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.modewright.model.structure.Node;
+import org.modewright.model.structure.RigidFloor;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructureFactory;
 import org.modewright.model.structure.StructurePackage;
@@ -228,6 +229,29 @@ class ModelFileTest {
         assertThrows(ModelFileException.class, () -> ModelFile.save(Fixtures.sound(), target));
         assertEquals("in the way", Files.readString(target.resolve("content")));
         assertEquals(List.of("taken.modewright"), names());
+    }
+
+    /** Most file systems take names of 255 bytes. */
+    @Test
+    void longNamesCanBeSaved() throws IOException {
+        Path file = folder.resolve("a".repeat(255 - 11) + ".modewright");
+        ModelFile.save(ModelFile.create("long"), file);
+        assertEquals("long", ModelFile.load(file).getName());
+    }
+
+    @Test
+    void aFloorOfManyNodesKeepsTheirOrder() throws IOException {
+        StructuralModel model = ModelFile.create("Slab");
+        RigidFloor floor = Fixtures.FACTORY.createRigidFloor();
+        floor.setName("Slab");
+        for (int i = 0; i < 5000; i++) {
+            floor.getNodes().add(0, Fixtures.node(model, i, 0, 0));
+        }
+        model.getRigidFloors().add(floor);
+        Ids.assignMissing(model);
+        StructuralModel loaded = ModelFile.load(new ByteArrayInputStream(ModelFile.bytes(model)), "slab");
+        assertTrue(EcoreUtil.equals(model, loaded));
+        assertEquals(4999, loaded.getRigidFloors().get(0).getNodes().get(0).getX());
     }
 
     @Test

@@ -64,7 +64,8 @@ class UnitsTest {
         assertEquals(1e12, Units.of(UnitSystem.NEWTON_MILLIMETRE).toSi(Quantity.DENSITY), 1e-3);
         assertEquals(1e-12, Units.of(UnitSystem.NEWTON_MILLIMETRE).toSi(Quantity.SECOND_MOMENT), 1e-27);
         double poundPerCubicFoot = 490 / (32.17404855643044 * 12) / 1728;
-        assertEquals(490 * 0.45359237 / Math.pow(0.3048, 3), poundPerCubicFoot * Units.of(UnitSystem.POUND_INCH).toSi(Quantity.DENSITY), 1e-8);
+        assertEquals(490 * 0.45359237 / Math.pow(0.3048, 3),
+                poundPerCubicFoot * Units.of(UnitSystem.POUND_INCH).toSi(Quantity.DENSITY), 1e-8);
         assertEquals(Math.PI, 180 * Units.of(UnitSystem.KIP_FOOT).toSi(Quantity.ANGLE), 1e-15);
         assertEquals(1.0, Units.of(UnitSystem.KIP_FOOT).toSi(Quantity.NONE));
     }

@@ -98,7 +98,8 @@ class WellFormednessTest {
                         m -> m.getSupports().get(0).setElasticRx(1)),
                 error("number-negative", "modes", m -> m.getAnalysis().setModes(-1), m -> m.getAnalysis().setModes(0)),
                 error("number-negative", "gravity", m -> m.setGravity(-9.81), m -> m.setGravity(9.81)),
-                error("poisson-range", "half", m -> m.getMaterials().get(0).setPoisson(0.5), m -> m.getMaterials().get(0).setPoisson(0.499)),
+                error("poisson-range", "half", m -> m.getMaterials().get(0).setPoisson(0.5),
+                        m -> m.getMaterials().get(0).setPoisson(0.499)),
                 error("poisson-range", "minus one", m -> m.getMaterials().get(0).setPoisson(-1),
                         m -> m.getMaterials().get(0).setPoisson(-0.99)),
                 error("share-range", "local share", m -> m.getAudit().setLocalNodes(1.1), m -> m.getAudit().setLocalNodes(1)),
@@ -117,7 +118,8 @@ class WellFormednessTest {
                         m -> m.getMembers().get(0).setEndOffset(Fixtures.vector(0, 0, -2.9))),
                 error("member-rigid-too-long", "both zones", m -> rigid(m, 1.5, 1.5), m -> rigid(m, 1.5, 1.49)),
                 warning("release-repeated", "same component twice",
-                        m -> ((InternalEList<Component>) m.getMembers().get(0).getEndFree()).addAllUnique(List.of(Component.RY, Component.RY)),
+                        m -> ((InternalEList<Component>) m.getMembers().get(0).getEndFree())
+                                .addAllUnique(List.of(Component.RY, Component.RY)),
                         m -> m.getMembers().get(0).getEndFree().addAll(List.of(Component.RY, Component.RZ))),
                 warning("release-leaves-motion", "spins about its axis", m -> release(m, List.of(Component.RX), List.of(Component.RX)),
                         m -> release(m, List.of(Component.RX), List.of())),
@@ -176,7 +178,8 @@ class WellFormednessTest {
         StructuralModel faulty = Fixtures.sound();
         c.fault().accept(faulty);
         List<Defect> found = WellFormedness.check(faulty);
-        Defect defect = found.stream().filter(d -> d.id().equals(c.id())).findFirst().orElseThrow(() -> new AssertionError("found " + found));
+        Defect defect = found.stream().filter(d -> d.id().equals(c.id())).findFirst()
+                .orElseThrow(() -> new AssertionError("found " + found));
         assertEquals(c.severity(), defect.severity());
         assertEquals(c.severity() != ERROR, WellFormedness.isComputable(found.stream().filter(d -> d.id().equals(c.id())).toList()));
         assertFalse(defect.text().isBlank() || defect.remedy().isBlank());

@@ -14,7 +14,6 @@ import org.eclipse.emf.edit.provider.IEditingDomainItemProvider;
 import org.eclipse.emf.edit.provider.IItemLabelProvider;
 import org.eclipse.emf.edit.provider.IItemPropertyDescriptor;
 import org.eclipse.emf.edit.provider.IItemPropertySource;
-import org.eclipse.emf.edit.provider.IStructuredItemContentProvider;
 import org.eclipse.emf.edit.provider.ITreeItemContentProvider;
 import org.eclipse.emf.edit.provider.ItemProviderAdapter;
 import org.modewright.model.structure.StructuralModel;
@@ -24,8 +23,8 @@ import org.modewright.model.structure.provider.StructureEditPlugin;
  * A tree node that stands for one list of a model, such as "Nodes (120)". It is its own item provider, shows the list itself without
  * copying it, and cannot be edited.
  */
-public final class CategoryItemProvider extends ItemProviderAdapter implements IEditingDomainItemProvider, IStructuredItemContentProvider,
-        ITreeItemContentProvider, IItemLabelProvider, IItemPropertySource {
+public final class CategoryItemProvider extends ItemProviderAdapter implements IEditingDomainItemProvider, ITreeItemContentProvider,
+        IItemLabelProvider, IItemPropertySource {
 
     private final ItemProviderAdapter owner;
     private final StructuralModel model;

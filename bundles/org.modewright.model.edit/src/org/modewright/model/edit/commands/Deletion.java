@@ -22,9 +22,9 @@ import org.modewright.model.structure.StructurePackage;
 import org.modewright.model.structure.TieTerm;
 
 /**
- * The deletion of objects with all that cannot be without them: the members, springs, supports, masses, links, ties and loads of a node, the
- * loads of a member, the members of a section or material, a floor that is left with fewer than two nodes. Elements of a deleted group stay,
- * without a group.
+ * The deletion of objects with all that cannot be without them: the members, springs, supports, masses, links, ties and loads of a
+ * node, the loads of a member, the members of a section or material, a floor that is left with fewer than two nodes. Elements of a
+ * deleted group stay, without a group.
  */
 public final class Deletion {
 
