@@ -8,7 +8,7 @@ import java.util.Map;
 
 import org.eclipse.emf.common.command.Command;
 import org.eclipse.emf.common.command.CompoundCommand;
-import org.eclipse.emf.common.command.IdentityCommand;
+import org.eclipse.emf.common.command.UnexecutableCommand;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.ecore.EStructuralFeature;
@@ -84,9 +84,10 @@ final class Edit {
         }));
     }
 
+    /** One command for all steps; one that cannot be executed, and so leaves no trace on the stack, where there is nothing to change. */
     Command toCommand() {
         if (steps.isEmpty()) {
-            return new IdentityCommand(label, result);
+            return UnexecutableCommand.INSTANCE;
         }
         return new OneAct(label, steps, List.copyOf(result));
     }

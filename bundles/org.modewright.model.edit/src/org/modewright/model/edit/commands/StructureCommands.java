@@ -23,7 +23,8 @@ import org.modewright.model.structure.StructurePackage;
 
 /**
  * What a user does to a model, each act one command: one undo takes it back completely. The commands change nothing until they are
- * executed, and are to be executed on the model as it was when they were made.
+ * executed, and are to be executed on the model as it was when they were made. Where nothing would change the command cannot be executed,
+ * and the stack ignores it.
  */
 public final class StructureCommands {
 

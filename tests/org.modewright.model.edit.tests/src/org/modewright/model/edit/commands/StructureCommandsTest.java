@@ -224,6 +224,7 @@ class StructureCommandsTest {
         String before = shop.text();
         shop.domain.getCommandStack().execute(command);
         assertEquals(before, shop.text());
+        assertFalse(shop.domain.getCommandStack().canUndo());
     }
 
     @Test
