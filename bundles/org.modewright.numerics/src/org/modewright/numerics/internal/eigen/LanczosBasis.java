@@ -14,7 +14,10 @@ import org.modewright.numerics.Progress;
  */
 final class LanczosBasis {
 
+    /** A remainder below this share of the operator's norm is round-off. */
     private static final double DEPENDENT = 1e-12;
+    /** So is a vector whose mass is a smaller share than this of the mass it would have without cancellation. */
+    private static final double MASSLESS = 1e-10;
     /** A column that loses more than this share of its length is orthogonalised once more. */
     private static final double CANCELLED = 1e-2;
     private static final int RANDOM_ATTEMPTS = 3;
@@ -22,12 +25,15 @@ final class LanczosBasis {
 
     private final ShiftedProblem shifted;
     private final int dimension;
+    private final double[] massDiagonal;
     private final Random random = new Random(SEED);
 
     private double[][] v = new double[16][];
     private int size;
     private double[][] t = new double[16][16];
     private double[][] next = {};
+    /** Largest M-norm of A times an M-normalised vector so far. */
+    private double operatorNorm;
     /** C: one row per basis vector, one column per vector of the next block. */
     private double[][] coupling = {};
 
@@ -40,6 +46,7 @@ final class LanczosBasis {
     LanczosBasis(ShiftedProblem shifted, int dimension) {
         this.shifted = shifted;
         this.dimension = dimension;
+        this.massDiagonal = shifted.problem().mass().diagonal();
     }
 
     int size() {
@@ -60,6 +67,7 @@ final class LanczosBasis {
         int width = next.length;
         double[][] w = shifted.apply(next);
         double[] lengths = massNorms(w);
+        operatorNorm = Math.max(operatorNorm, Arrays.stream(lengths).max().orElse(0.0));
         append(next);
         double[][] h = orthogonalise(w, size);
         addTo(h, orthogonalise(w, size));
@@ -130,7 +138,7 @@ final class LanczosBasis {
         double[][] r = new double[w.length][w.length];
         int count = 0;
         for (int c = 0; c < w.length && size + count < dimension; c++) {
-            if (acceptColumn(w[c], lengths[c], accepted, count, r, c)) {
+            if (acceptColumn(w[c], lengths[c], DEPENDENT * operatorNorm, accepted, count, r, c)) {
                 count++;
             }
         }
@@ -143,8 +151,9 @@ final class LanczosBasis {
         }
     }
 
-    private boolean acceptColumn(double[] column, double length, double[][] accepted, int count, double[][] r, int c) {
-        double norm = massNorm(column);
+    private boolean acceptColumn(double[] column, double length, double negligible, double[][] accepted, int count, double[][] r,
+            int c) {
+        double norm;
         double before = length;
         while (true) {
             double[] projections = project(column, accepted, count);
@@ -152,7 +161,7 @@ final class LanczosBasis {
                 r[a][c] += projections[a];
             }
             norm = massNorm(column);
-            if (norm <= DEPENDENT * length) {
+            if (norm <= negligible || isMassless(column, norm)) {
                 return false;
             }
             if (norm > CANCELLED * before) {
@@ -165,6 +174,14 @@ final class LanczosBasis {
         r[count][c] = norm;
         accepted[count] = column;
         return true;
+    }
+
+    private boolean isMassless(double[] column, double norm) {
+        double without = 0.0;
+        for (int i = 0; i < column.length; i++) {
+            without += massDiagonal[i] * column[i] * column[i];
+        }
+        return norm * norm <= MASSLESS * without;
     }
 
     private double[] project(double[] column, double[][] accepted, int count) {
@@ -200,7 +217,7 @@ final class LanczosBasis {
             double[][] accepted = Arrays.copyOf(next, next.length + 1);
             orthogonalise(w, size);
             orthogonalise(w, size);
-            if (length > 0.0 && acceptColumn(w[0], length, accepted, next.length, new double[next.length + 1][1], 0)) {
+            if (length > 0.0 && acceptColumn(w[0], length, DEPENDENT * length, accepted, next.length, new double[next.length + 1][1], 0)) {
                 next = accepted;
                 for (int i = 0; i < size; i++) {
                     coupling[i] = Arrays.copyOf(coupling[i], next.length);

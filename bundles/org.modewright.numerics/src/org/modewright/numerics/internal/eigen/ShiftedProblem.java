@@ -1,5 +1,6 @@
 package org.modewright.numerics.internal.eigen;
 
+import java.util.Arrays;
 import java.util.Random;
 
 import org.modewright.numerics.EigenProblem;
@@ -58,7 +59,7 @@ final class ShiftedProblem {
             factorisation = unshifted;
             return;
         }
-        shift = -scale(unshifted);
+        shift = -scale(unshifted, progress);
         for (int attempt = 0; attempt < SHIFT_ATTEMPTS; attempt++) {
             factorisation = factorise(shift, progress);
             Inertia shifted = factorisation.inertia();
@@ -109,17 +110,17 @@ final class ShiftedProblem {
     }
 
     /**
-     * Estimate of the lowest eigenvalue that is not zero, from inverse iteration on the structure held at its zero pivots. Where that
-     * leaves no moving mass, a small share of the diagonal ratio.
+     * Estimate of the smallest eigenvalue that is not zero, by power iteration with the flexibility of the structure held at its zero
+     * pivots, on the M-orthogonal complement of the motions without stiffness: loads in equilibrium deform it as if it were free. At most
+     * the largest ratio of the diagonals, which is all there is where nothing deforms.
      */
-    private double scale(Factorisation held) {
+    private double scale(Factorisation held, Progress progress) {
+        double[][] motions = massOrthonormal(factoriser.nullVectors(held), progress);
         double[] x = new Random(SEED).doubles(problem.order(), -1.0, 1.0).toArray();
-        int[] heldThere = held.zeroPivots();
         double flexibility = 0.0;
         for (int iteration = 0; iteration < SCALE_ITERATIONS; iteration++) {
-            for (int i : heldThere) {
-                x[i] = 0.0;
-            }
+            progress.checkCancelled();
+            removeMotions(x, motions);
             double norm = Math.sqrt(Math.max(0.0, problem.mass().quadratic(x)));
             if (norm == 0.0) {
                 break;
@@ -128,12 +129,32 @@ final class ShiftedProblem {
             double[] next = problem.mass().multiply(x);
             double[] massTimesX = next.clone();
             held.solve(next);
+            removeMotions(next, motions);
             flexibility = Math.abs(VectorMath.dot(massTimesX, next));
             x = next;
         }
-        double fallback = 1e-6 * largestDiagonalRatio();
-        double scale = flexibility > 0.0 ? 1.0 / flexibility : fallback;
-        return Double.isFinite(scale) && scale > 0.0 ? scale : fallback;
+        double largest = largestDiagonalRatio();
+        return flexibility * largest > 1.0 ? 1.0 / flexibility : largest;
+    }
+
+    private double[][] massOrthonormal(double[][] motions, Progress progress) {
+        double[][] orthonormal = new double[motions.length][];
+        for (int j = 0; j < motions.length; j++) {
+            progress.checkCancelled();
+            double[] x = motions[j].clone();
+            removeMotions(x, Arrays.copyOf(orthonormal, j));
+            removeMotions(x, Arrays.copyOf(orthonormal, j));
+            double norm = Math.sqrt(Math.max(0.0, problem.mass().quadratic(x)));
+            VectorMath.scale(x, norm > 0.0 ? 1.0 / norm : 0.0);
+            orthonormal[j] = x;
+        }
+        return orthonormal;
+    }
+
+    private void removeMotions(double[] x, double[][] motions) {
+        double[][] massTimesX = {problem.mass().multiply(x)};
+        double[][] h = BlockOperations.transposedProduct(motions, motions.length, massTimesX);
+        BlockOperations.subtractProduct(new double[][] {x}, motions, motions.length, h);
     }
 
     private Factorisation factorise(double at, Progress progress) {
