@@ -1,5 +1,8 @@
 package org.modewright.samples;
 
+import java.io.FileNotFoundException;
+import java.io.IOException;
+import java.io.InputStream;
 import java.util.List;
 import java.util.Optional;
 
@@ -16,6 +19,9 @@ public final class Samples {
             new Sample("three-storeys", "Three-storey frame"),
             new Sample("mass-chain", "Masses in series on springs"));
 
+    private static final List<String> DEMO_PACKAGE = List.of("datapackage.json", "frame_sections.csv", "gravity_loads.csv", "levels.csv",
+            "mass_rule.csv", "masses.csv", "materials.csv", "members.csv", "nodes.csv", "rigid_floors.csv", "rigid_links.csv", "supports.csv");
+
     private Samples() {
     }
 
@@ -27,5 +33,23 @@ public final class Samples {
     /** The model of a name. */
     public static Optional<Sample> named(String name) {
         return ALL.stream().filter(sample -> sample.name().equals(name)).findFirst();
+    }
+
+    /** Names of the files of the demonstration as a table package. */
+    public static List<String> demoPackageFiles() {
+        return DEMO_PACKAGE;
+    }
+
+    /**
+     * Opens a file of the demonstration's table package; the caller closes it.
+     *
+     * @throws IOException if there is no such file
+     */
+    public static InputStream openDemoPackageFile(String name) throws IOException {
+        InputStream stream = DEMO_PACKAGE.contains(name) ? Samples.class.getResourceAsStream("/samples/demo/" + name) : null;
+        if (stream == null) {
+            throw new FileNotFoundException(name + " is not part of the demonstration's table package");
+        }
+        return stream;
     }
 }

@@ -21,7 +21,8 @@ import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** The main job: solves a model, judges its modes, names what is suspicious. */
-@Command(name = "check", sortOptions = false, header = "Solves a model, audits its modes and prints the verdict.",
+@Command(name = "check", sortOptions = false, header = {"Solves a model, audits its modes and prints the verdict.", ""},
+        customSynopsis = "modewright check MODEL [OPTIONS]",
         footer = {"", "MODEL is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
             "Exit status: 0 the audit passes; 1 it does not; 2 bad input or options; 3 the run could not be completed", "(unstable structure, "
                     + "incomplete modes, out of memory)."})
@@ -32,7 +33,7 @@ public final class CheckCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(paramLabel = "MODEL", arity = "0..1", description = "The model.")
+    @Parameters(paramLabel = "MODEL", arity = "0..1", hideParamSyntax = true, description = "The model.")
     private String model;
 
     @Mixin

@@ -24,7 +24,8 @@ import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** Model file, table package, matrices: from one to the other. */
-@Command(name = "convert", sortOptions = false, header = "Converts between model file, table package and matrices.",
+@Command(name = "convert", sortOptions = false, header = {"Converts between model file, table package and matrices.", ""},
+        customSynopsis = "modewright convert IN OUT [OPTIONS]",
         footer = {"", "IN is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
             "OUT decides what is written:", "  NAME.modewright       a model file", "  NAME.zip, or a folder  a table package",
             "  NAME.mtx              NAME.K.mtx, NAME.M.mtx and NAME.dofs.csv: stiffness, mass and the free degrees of freedom, SI",

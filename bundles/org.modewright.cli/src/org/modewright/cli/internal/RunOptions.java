@@ -31,7 +31,7 @@ final class RunOptions {
     @Option(names = "--list-rules", description = "Lists the rule packs and does nothing else.")
     private boolean listRules;
 
-    @Option(names = "--directions", paramLabel = "x,y,z", split = ",", converter = Translation.class,
+    @Option(names = "--directions", paramLabel = "x,y,z", split = ",", hideParamSyntax = true, converter = Translation.class,
             description = "The directions judged. Without it: those of the model's settings, else x,y.")
     private List<Direction> directions;
 

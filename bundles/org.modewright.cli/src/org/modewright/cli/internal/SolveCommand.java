@@ -33,7 +33,8 @@ import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
 /** Modes and certificate, of a model or of a pair of matrices. */
-@Command(name = "solve", sortOptions = false, header = "Solves a model, or a pair of matrices, and prints modes and certificate.",
+@Command(name = "solve", sortOptions = false, header = {"Solves a model, or a pair of matrices, and prints modes and certificate.", ""},
+        customSynopsis = {"modewright solve MODEL [OPTIONS]", "       modewright solve K.mtx M.mtx [OPTIONS]"},
         footer = {"", "MODEL is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
             "K.mtx M.mtx is a pair of MatrixMarket files (coordinate, real, symmetric); without --modes its first 50 modes.",
             "The rigid-body modes of a free structure stand at 0 Hz.",
@@ -48,7 +49,8 @@ public final class SolveCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(paramLabel = "MODEL | K.mtx M.mtx", arity = "0..2", description = "The model, or the stiffness and the mass matrix.")
+    @Parameters(paramLabel = "MODEL, or K.mtx M.mtx", arity = "0..2", hideParamSyntax = true,
+            description = "The model, or the stiffness and the mass matrix.")
     private List<String> arguments = List.of();
 
     @Mixin

@@ -26,11 +26,13 @@ final class DemoModel {
     private static final double SLAB = 4.2;
     private static final double LIVE = 3;
     private static final double CLADDING = 3.6;
+    private static final double ARCHIVE = 7.5;
 
     private final ModelBuilder builder = new ModelBuilder("quay-house", "Quay House, Port Veldrin", "kN-m-t", """
             Demonstration model; place and project are invented. Five-storey steel frame of offices with composite slabs: L-shaped plan, \
-            set-back at floor 4, braces along X in two lines and along Y in line A alone, a lattice mast on the roof and an \
-            entrance canopy in the inner corner. Seismic mass: own mass and dead load, cladding, 0.3 of the live load. The corner of the \
+            set-back at floor 4, braces along X in two lines, along Y in line A and, below the archive \
+            on floor 1, in three lines more; a lattice mast on the roof and an entrance canopy in the inner corner. Seismic mass: own mass \
+            and dead load, cladding, 0.3 of the live load, 0.8 of the archive. The corner of the \
             canopy was meant to hang on the building: the audit finds that it does not.""");
     private final Material steel = builder.material("S355 steel", 210e6, 0.3, 7.85);
     private final FrameSection column = builder.iSection("column I 360x360", 0.36, 0.36, 0.014, 0.024);
@@ -40,6 +42,7 @@ final class DemoModel {
     private final FrameSection secondary = builder.iSection("secondary I 300x150", 0.3, 0.15, 0.007, 0.0105);
     private final FrameSection braceX = builder.tube("brace tube 193.7x8", 0.1937, 0.008);
     private final FrameSection braceY = builder.tube("brace tube 168.3x6.3", 0.1683, 0.0063);
+    private final FrameSection braceGround = builder.tube("brace tube 273x12.5", 0.273, 0.0125);
     private final FrameSection mastLeg = builder.tube("mast leg tube 60.3x4", 0.0603, 0.004);
     private final FrameSection mastLattice = builder.tube("mast lattice tube 33.7x3", 0.0337, 0.003);
     private final FrameSection canopyPost = builder.tube("canopy post tube 88.9x5", 0.0889, 0.005);
@@ -53,6 +56,7 @@ final class DemoModel {
         builder.pattern("dead", 1);
         builder.pattern("cladding", 1);
         builder.pattern("live", 0.3);
+        builder.pattern("archive", 0.8);
         builder.level("ground", HEIGHTS[0]);
         for (int floor = 1; floor <= STOREYS; floor++) {
             builder.level("floor " + floor, HEIGHTS[floor]);
@@ -154,7 +158,7 @@ final class DemoModel {
                     Member member = builder.member("BY-" + letter(i) + (j + 1) + (j + 2) + "-" + floor, grid(i, j, floor),
                             grid(i, j + 1, floor), beam, steel, "beams Y");
                     int bays = (bay(i, j, floor) ? 1 : 0) + (bay(i - 1, j, floor) ? 1 : 0);
-                    slab(member, 1.5 * bays);
+                    slab(member, 1.5 * bays, floor);
                     if (bays == 1) {
                         builder.lineLoad("cladding", member, CLADDING);
                     }
@@ -171,12 +175,12 @@ final class DemoModel {
                 middle(i, j + 1, floor), secondary, steel, "secondary beams");
         member.getStartFree().addAll(List.of(Component.RY, Component.RZ));
         member.getEndFree().addAll(List.of(Component.RY, Component.RZ));
-        slab(member, 3);
+        slab(member, 3, floor);
     }
 
-    private void slab(Member member, double width) {
+    private void slab(Member member, double width, int floor) {
         builder.lineLoad("dead", member, SLAB * width);
-        builder.lineLoad("live", member, LIVE * width);
+        builder.lineLoad(floor == 1 ? "archive" : "live", member, (floor == 1 ? ARCHIVE : LIVE) * width);
     }
 
     private void floorPlate(int floor) {
@@ -198,8 +202,11 @@ final class DemoModel {
         for (int floor = 1; floor <= STOREYS; floor++) {
             chevron(1, 0, floor);
             chevron(1, 3, floor);
-            cross(0, 1, floor);
+            cross(0, 1, floor, floor == 1 ? braceGround : braceY);
         }
+        cross(0, 0, 1, braceGround);
+        cross(2, 1, 1, braceGround);
+        cross(5, 0, 1, braceGround);
     }
 
     /** Two braces that meet under the middle of a girder along X. */
@@ -210,10 +217,10 @@ final class DemoModel {
     }
 
     /** Two crossing braces along Y. */
-    private void cross(int i, int j, int floor) {
+    private void cross(int i, int j, int floor, FrameSection section) {
         String name = "BRY-" + letter(i) + (j + 1) + (j + 2) + "-" + floor;
-        builder.bar(name + "a", grid(i, j, floor - 1), grid(i, j + 1, floor), braceY, steel, "braces Y");
-        builder.bar(name + "b", grid(i, j + 1, floor - 1), grid(i, j, floor), braceY, steel, "braces Y");
+        builder.bar(name + "a", grid(i, j, floor - 1), grid(i, j + 1, floor), section, steel, "braces Y");
+        builder.bar(name + "b", grid(i, j + 1, floor - 1), grid(i, j, floor), section, steel, "braces Y");
     }
 
     private void mast() {
@@ -230,7 +237,7 @@ final class DemoModel {
         }
         for (int corner = 0; corner < 4; corner++) {
             builder.link("mast base " + (corner + 1), grid(2, 2, STOREYS), mastNode(0, corner));
-            builder.mass(mastNode(panels, corner), 0.06, 0.06, 0.06);
+            builder.mass(mastNode(panels, corner), 0.12, 0.12, 0.12);
         }
         for (int level = 1; level <= panels; level++) {
             for (int corner = 0; corner < 4; corner++) {
