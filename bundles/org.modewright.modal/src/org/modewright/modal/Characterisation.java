@@ -88,7 +88,11 @@ final class Characterisation {
         return String.format(Locale.ROOT, "at %.0f° to X", degrees).replace('-', '\u2212');
     }
 
-    private static Character mixed(double[] split) {
+    private Character mixed(double[] split) {
+        if (split[0] + split[1] >= rules.straight()) {
+            String direction = split[0] >= rules.straight() ? "X" : split[1] >= rules.straight() ? "Y" : "X and Y";
+            return new Character(Kind.MIXED, "in " + direction + ", parts against each other");
+        }
         String[] names = {"X", "Y", "Z", "rotation"};
         StringBuilder text = new StringBuilder();
         for (int i = 0; i < names.length; i++) {

@@ -1,10 +1,14 @@
 package org.modewright.modal;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.modewright.fem.Assembly;
+import org.modewright.fem.NodePoint;
 import org.modewright.fem.Snapshot;
 import org.modewright.numerics.EigenPairs;
 import org.modewright.numerics.Progress;
+import org.modewright.numerics.SingularPencilException;
 
 /** Finds the modes of a structure. */
 public final class ModalRun {
@@ -32,7 +36,8 @@ public final class ModalRun {
     public static ModalResult run(Snapshot snapshot, ModalRequest request, Progress progress) {
         long start = System.nanoTime();
         Assembly assembly = Assembly.of(snapshot, progress);
-        return run(assembly, request, progress).withSeconds("assemble", since(start) - 0);
+        double assembling = since(start);
+        return run(assembly, request, progress).withSeconds("assemble", assembling);
     }
 
     /** Solves a model that is assembled already. */
@@ -45,6 +50,15 @@ public final class ModalRun {
         builder.model(snapshot.name(), snapshot.members().size(), 0, assembly.freeDofs()).nodes(snapshot.nodes())
                 .carriers(assembly.carriers()).mass(assembly.ledger(), assembly.planCoupling());
         ModeFigures figures = new ModeFigures(assembly, request.rules());
+        try {
+            solve(figures);
+        } catch (SingularPencilException e) {
+            builder.certificate(new Certificate(false, 0, 0, 0, 0, 0), false).instabilities(List.of(withoutStiffnessOrMass(e)));
+        }
+        return builder.build();
+    }
+
+    private void solve(ModeFigures figures) {
         long start = System.nanoTime();
         try (Spectrum spectrum = Spectrum.open(assembly.stiffness(), assembly.mass(), progress)) {
             builder.seconds("factor", since(start));
@@ -53,9 +67,22 @@ public final class ModalRun {
             builder.certificate(spectrum.certify(progress), spectrum.pairs().exhausted());
             spectrum.remarks().forEach(builder::remark);
             collect(figures, spectrum.pairs());
+            builder.instabilities(instabilities(spectrum.throughZero(progress)));
             builder.seconds("eigen", since(start));
         }
-        return builder.build();
+    }
+
+    /** Assembling drops such motions; what is left of them is at the limit of round-off. */
+    private Instability withoutStiffnessOrMass(SingularPencilException singular) {
+        int[] nodes = IntStream.of(singular.degreesOfFreedom()).map(assembly::nodeOf).distinct().sorted().toArray();
+        List<NodePoint> points = assembly.snapshot().nodes();
+        boolean[] able = new boolean[6];
+        IntStream.of(singular.degreesOfFreedom()).forEach(dof -> able[assembly.componentOf(dof)] = true);
+        List<String> directions = NodeWords.directions(able);
+        return new Instability(Instability.Kind.MECHANISM, NodeWords.ids(nodes, points), NodeWords.names(nodes, points), directions,
+                NodeWords.list(nodes, points) + " can move with hardly any stiffness and mass (" + String.join(", ", directions)
+                        + "), too little to tell from round-off, so no mode can be found.",
+                "Hold these motions, or give them a stiffness that compares with the rest of the structure.");
     }
 
     private boolean isEnough(ModeFigures figures, EigenPairs pairs) {
@@ -74,11 +101,12 @@ public final class ModalRun {
             ModeFigures.Figured figured = figures.figure(i, pairs);
             builder.mode(figured.mode(), figured.shape(), figured.strainShares(), figured.kineticShares());
         }
-        builder.instabilities(instabilities(pairs));
     }
 
     private List<Instability> instabilities(EigenPairs pairs) {
-        return new InstabilityFinder(assembly, pairs).find();
+        List<Instability> instabilities = new ArrayList<>(new InstabilityFinder(assembly, pairs).find());
+        new HiddenBuckling(assembly, pairs).find(progress).ifPresent(instabilities::add);
+        return instabilities;
     }
 
     private static double since(long start) {

@@ -17,6 +17,8 @@ final class Spectrum implements AutoCloseable {
 
     private static final EigenPairs NONE = new EigenPairs(new double[0], new double[0][], new double[0], new double[0], true);
 
+    private static final int RIGID_MOTIONS = 6;
+
     private final int order;
     private final EigenSession session;
     private final List<String> remarks = new ArrayList<>();
@@ -79,6 +81,16 @@ final class Spectrum implements AutoCloseable {
 
     EigenPairs pairs() {
         return pairs;
+    }
+
+    /** The pairs, and beyond their number as many as it takes to have every eigenvalue that is not positive. */
+    EigenPairs throughZero(Progress progress) {
+        EigenPairs all = pairs;
+        while (all.count() > 0 && all.values()[all.count() - 1] <= 0 && !all.exhausted() && all.count() < order) {
+            int more = Math.min(order, all.count() + RIGID_MOTIONS + 1);
+            all = session.solve(new EigenRequest(more, Double.POSITIVE_INFINITY), progress);
+        }
+        return all;
     }
 
     List<String> remarks() {

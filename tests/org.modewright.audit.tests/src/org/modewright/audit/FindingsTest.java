@@ -237,7 +237,7 @@ class FindingsTest {
         s.member("pole 2", "m1", "m2").setGroup(mast);
         Finding finding = only(audit(s), "local-modes");
         assertEquals(Severity.INFO, finding.severity());
-        assertTrue(finding.text().matches("Modes 1, 2.* are local: roof mast\\. Each moves less than 0\\.1 % of the mass in X, Y or Z\\."),
+        assertTrue(finding.text().matches("Modes 1, 2.* are local to group roof mast\\. Each moves less than 0\\.1 % of the mass in X, Y or Z\\."),
                 finding.text());
         assertTrue(names(finding).contains("pole 1"));
         assertEquals(List.of(), of(audit(Structures.building(3)), "local-modes"));

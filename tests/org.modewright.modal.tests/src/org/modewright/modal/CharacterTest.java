@@ -145,6 +145,19 @@ class CharacterTest {
         assertTrue(local.character().text().startsWith("local: member pole 1"), local.character().text());
     }
 
+    /** Masses in a row at one height: what moves as one is sway, what does not is said so. */
+    @Test
+    void massesInARow() {
+        Structures s = new Structures("row").node("0", 0, 0, 0).support("0", "ux uy uz rx ry rz");
+        for (int i = 1; i <= 3; i++) {
+            s.node("" + i, i, 0, 0).support("" + i, "uy uz rx ry rz").mass("" + i, 1, 0, 0, 0, 0, 0)
+                    .spring("s" + i, "" + (i - 1), "" + i, 1, 0, 0, 0, 0, 0);
+        }
+        ModalResult result = s.allModes();
+        assertEquals("sway X", text(result, 1));
+        assertEquals("in X, parts against each other", text(result, 3));
+    }
+
     /** Split of the kinetic energy of a single mass that moves in X and turns. */
     @Test
     void splitOfTheKineticEnergy() {

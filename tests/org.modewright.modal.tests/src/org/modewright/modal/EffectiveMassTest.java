@@ -7,8 +7,10 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.modewright.fem.Assembly;
 import org.modewright.model.structure.Component;
 import org.modewright.model.structure.Member;
+import org.modewright.numerics.Progress;
 
 /** Effective masses of beams, eccentric floors and appendages, and the sums over all modes. */
 class EffectiveMassTest {
@@ -244,6 +246,37 @@ class EffectiveMassTest {
         }
         assertTrue(result.modes().size() < result.freeDofs());
         assertTrue(result.isExhausted());
+    }
+
+    /** A pin joint of bars, whose turns have neither stiffness nor mass, changes nothing in the sums. */
+    @Test
+    void allModesTogetherHoldAllMassBesideDroppedMotions() {
+        Structures s = everything().section("rod", 0.002, 1e-8, 1e-8, 1e-8).node("joint", 9, 2, 4);
+        for (String end : new String[] {"n01", "n11", "n21", "n13"}) {
+            s.member("rod " + end, "joint", end).setAxialOnly(true);
+        }
+        Assembly assembly = Assembly.of(s.snapshot(), Progress.NONE);
+        assertEquals(3, assembly.dropped().size());
+        ModalResult result = ModalRun.run(assembly, ModalRequest.ofAllModes(), Progress.NONE);
+        for (Direction direction : Direction.values()) {
+            assertEquals(1, result.capture(direction), 1e-12 * result.modes().size(), direction.word());
+        }
+    }
+
+    /** A support that slides along a line at 30 degrees to X: the plan directions are coupled, and every angle is captured whole. */
+    @Test
+    void skewSlideCouplesThePlanDirections() {
+        double c = Math.cos(Math.toRadians(30));
+        double sine = Math.sin(Math.toRadians(30));
+        Structures s = new Structures("slide").node("a", 0, 0, 0).support("a", "uz rx ry rz").mass("a", 40, 40, 0, 0, 0, 0)
+                .tie("line", "a", Component.UX, sine, "a", Component.UY, -c).spring("k", "a", null, 1000, 1000, 0, 0, 0, 0);
+        ModalResult result = s.allModes();
+        assertEquals(1, result.modes().size());
+        assertEquals(Math.sqrt(1000 / 40.0), 2 * Math.PI * result.modes().get(0).frequency(), 1e-12);
+        for (double degrees : new double[] {0, 17, 30, 90, 154}) {
+            assertEquals(1, result.capture(Math.toRadians(degrees)), 1e-12, degrees + " degrees");
+        }
+        assertTrue(result.planCoupling() > 1);
     }
 
     /** A plan direction at an angle agrees with the same structure turned by that angle. */

@@ -129,6 +129,29 @@ class EnergyTest {
         assertTrue(with.strainShare(sway, carrier(with, "ab")) < without.strainShare(sway, carrier(without, "ab")) - 1e-3);
     }
 
+    /**
+     * d&lambda;/dk<sub>j</sub> = (&phi;<sub>j</sub> &minus; &phi;<sub>j-1</sub>)&sup2; = share &lambda;/k and d&lambda;/dm<sub>j</sub> =
+     * &minus;&lambda;&phi;<sub>j</sub>&sup2; = &minus;share &lambda;/m: R. L. Fox and M. P. Kapoor, AIAA Journal 6 (1968) 2426-2429; uniform
+     * five-storey frame, k = 100, m = 1, first and fifth mode (from memory, recomputed).
+     */
+    @Test
+    void eigenvalueDerivativesOfTheUniformFrame() {
+        ModalResult result = Structures.chain(new double[] {1, 1, 1, 1, 1}, new double[] {100, 100, 100, 100, 100}).allModes();
+        double[][] byStiffness = {{0.028862994030694235, 0.024375813605183212, 0.016826100834358978, 0.00861083617923691,
+            0.002338308121531873}, {0.10628817945420235, 0.7648331751186055, 1.3119721309911165, 1.1080066082619484, 0.39140697183648965}};
+        double[][] byMass = {{-0.23383081215318754, -0.8610836179236828, -1.6826100834358961, -2.437581360518329, -2.8862994030694398},
+            {-39.14069718364892, -110.80066082619479, -131.1972130991116, -76.48331751186053, -10.628817945420248}};
+        int[] modes = {0, 4};
+        for (int i = 0; i < 2; i++) {
+            double eigenvalue = result.modes().get(modes[i]).eigenvalue();
+            for (int storey = 0; storey < 5; storey++) {
+                assertEquals(byStiffness[i][storey],
+                        result.strainShare(modes[i], carrier(result, "storey " + (storey + 1))) * eigenvalue / 100, 1e-11);
+                assertEquals(byMass[i][storey], -result.kineticShare(modes[i], carrier(result, "floor " + (storey + 1))) * eigenvalue, 1e-9);
+            }
+        }
+    }
+
     @Test
     void rankingDescendsAndRuns() {
         ModalResult result = portal().modes(3);

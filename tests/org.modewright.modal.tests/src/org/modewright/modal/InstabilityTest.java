@@ -58,6 +58,15 @@ class InstabilityTest {
                 + " body (X, Y, Z, rotation about X, rotation about Y, rotation about Z); 6 modes at 0 Hz.", part.text());
     }
 
+    /** All six motions are named even where fewer modes were asked for. */
+    @Test
+    void allMotionsAreNamedWhateverTheNumberOfModes() {
+        ModalResult result = skewBeam(5).modes(2);
+        assertEquals(2, result.modes().size());
+        assertEquals(6, result.instabilities().get(0).directions().size());
+        assertTrue(result.instabilities().get(0).text().endsWith("6 modes at 0 Hz."), result.instabilities().get(0).text());
+    }
+
     @Test
     void beamOnOneBallJointCanTurnThreeWays() {
         ModalResult result = skewBeam(4).support("n0", "ux uy uz").modes(6);
@@ -181,6 +190,30 @@ class InstabilityTest {
         assertTrue(buckling.nodeNames().contains("n8"));
         assertTrue(buckling.text().contains("members"), buckling.text());
         assertTrue(!buckling.elementIds().isEmpty());
+    }
+
+    /** A column without mass of its own that buckles between its ends shows in no mode, and is found by the inertia of the stiffness. */
+    private static Structures masslessColumn(double ofEuler) {
+        Structures s = steel("massless column").node("n0", 0, 0, 0).support("n0", "ux uy uz rz");
+        double euler = Math.PI * Math.PI * 2.1e11 * 3e-5 / 36;
+        for (int i = 1; i <= 6; i++) {
+            s.node("n" + i, 0, 0, i);
+            s.member("m" + i, "n" + (i - 1), "n" + i).setAxialForce(-ofEuler * euler);
+        }
+        s.support("n6", "ux uy").mass("n6", 900, 900, 900, 0, 0, 0).model().setSelfMassFactor(0);
+        return s;
+    }
+
+    @Test
+    void bucklingWithoutMassIsFound() {
+        assertEquals(List.of(), masslessColumn(0.9).allModes().instabilities());
+        ModalResult buckled = masslessColumn(1.1).allModes();
+        assertTrue(buckled.modes().stream().allMatch(mode -> mode.eigenvalue() > 0));
+        assertEquals(1, buckled.instabilities().size());
+        Instability hidden = buckled.instabilities().get(0);
+        assertEquals(Instability.Kind.INDEFINITE, hidden.kind());
+        assertTrue(hidden.text().startsWith("The stiffness is indefinite in 1 shape without mass"), hidden.text());
+        assertEquals(5, hidden.elementIds().size());
     }
 
     /** A second, unsupported part beside a sound structure. */

@@ -11,6 +11,7 @@ import org.modewright.model.structure.Level;
 import org.modewright.model.structure.MassFormulation;
 import org.modewright.model.structure.Material;
 import org.modewright.model.structure.Member;
+import org.modewright.model.structure.MultiPointTie;
 import org.modewright.model.structure.NodalMass;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.RigidFloor;
@@ -19,6 +20,7 @@ import org.modewright.model.structure.Spring;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructureFactory;
 import org.modewright.model.structure.Support;
+import org.modewright.model.structure.TieTerm;
 import org.modewright.model.structure.UnitSystem;
 import org.modewright.model.structure.Vector;
 import org.modewright.numerics.Progress;
@@ -181,6 +183,21 @@ final class Structures {
         link.setFrom(nodes.get(from));
         link.setTo(nodes.get(to));
         model.getRigidLinks().add(link);
+        return this;
+    }
+
+    /** The sum of factor times component is zero; terms as node, component, factor in turn. */
+    Structures tie(String name, Object... terms) {
+        MultiPointTie tie = FACTORY.createMultiPointTie();
+        tie.setName(name);
+        for (int i = 0; i < terms.length; i += 3) {
+            TieTerm term = FACTORY.createTieTerm();
+            term.setNode(nodes.get((String) terms[i]));
+            term.setComponent((Component) terms[i + 1]);
+            term.setFactor((Double) terms[i + 2]);
+            tie.getTerms().add(term);
+        }
+        model.getTies().add(tie);
         return this;
     }
 

@@ -42,10 +42,11 @@ final class LocalModes implements FindingDetector {
         return findings;
     }
 
+    /** The group that the mode is local to, whatever the number of its members; else what its character names. */
     private static String place(Mode mode) {
         String text = mode.character().text().replace(PREFIX, "");
         int group = text.indexOf(OF_GROUP);
-        return group < 0 ? text : text.substring(group + OF_GROUP.length());
+        return group < 0 ? ": " + text : " to group " + text.substring(group + OF_GROUP.length());
     }
 
     private static Finding finding(String place, List<Mode> modes, ModalResult modal) {
@@ -57,7 +58,7 @@ final class LocalModes implements FindingDetector {
         }
         boolean one = modes.size() == 1;
         return new Finding(ID, Severity.INFO, objects(modes, modal), (one ? "Mode " + numbers + " is" : "Modes " + numbers + " are")
-                + " local: " + place + ". " + (one ? "It moves " : "Each moves ") + atMost(largest)
+                + " local" + place + ". " + (one ? "It moves " : "Each moves ") + atMost(largest)
                 + " of the mass in X, Y or Z.",
                 "Nothing, if that part is meant to be so flexible; otherwise check its sections, connections and mass. Such modes only"
                         + " delay the mass that counts.");
