@@ -26,8 +26,8 @@ public final class CliApplication implements IApplication {
     public Object start(IApplicationContext context) {
         String[] arguments = (String[]) context.getArguments().get(IApplicationContext.APPLICATION_ARGS);
         try (Interruption interruption = new Interruption()) {
-            CommandContext commands = new CommandContext(program(), writer(System.out, "stdout"), writer(System.err, "stderr"), isTerminal(),
-                    interruption::isRequested);
+            CommandContext commands = new CommandContext(program(), writer(System.out, "stdout"), writer(System.err, "stderr"),
+                    isTerminal(), interruption::isRequested);
             return new ModewrightProgram(commands, offered()).run(arguments);
         }
     }

@@ -1,6 +1,7 @@
 package org.modewright.cli;
 
 import java.util.List;
+import java.util.concurrent.Callable;
 
 import org.modewright.cli.internal.CheckCommand;
 import org.modewright.cli.internal.ConvertCommand;
@@ -11,6 +12,7 @@ import org.modewright.cli.internal.SolveCommand;
 import picocli.CommandLine;
 import picocli.CommandLine.Help.Ansi;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.ISetter;
 import picocli.CommandLine.Model.PositionalParamSpec;
 
 /** The command line: takes arguments, writes to the writers it was given and returns the exit status. It never ends the process. */
@@ -64,7 +66,7 @@ public final class ModewrightProgram {
     }
 
     /** Calls an offered command with the arguments that were parsed for it. */
-    private static final class Offered implements java.util.concurrent.Callable<Integer>, picocli.CommandLine.Model.ISetter {
+    private static final class Offered implements Callable<Integer>, ISetter {
 
         private final OfferedCommand command;
         private final CommandContext context;

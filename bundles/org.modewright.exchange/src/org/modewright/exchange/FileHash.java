@@ -16,8 +16,8 @@ import java.util.stream.Stream;
 
 /**
  * The fingerprint by which a result names the model it was made from: SHA-256 of the file. For the folder of a table package it is the
- * SHA-256 of the lines that the usual check-sum tools print for {@code datapackage.json} and the {@code .csv} files of the folder, sorted by
- * name: hash, two blanks, name, line feed.
+ * SHA-256 of the lines that the usual check-sum tools print for {@code datapackage.json} and the {@code .csv} files of the folder, sorted
+ * by name: hash, two blanks, name, line feed.
  */
 public final class FileHash {
 

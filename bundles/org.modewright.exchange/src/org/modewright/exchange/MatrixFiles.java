@@ -9,8 +9,8 @@ import org.modewright.exchange.internal.tables.TableText;
 import org.modewright.fem.Assembly;
 
 /**
- * The matrices of a model as files: {@code NAME.K.mtx} and {@code NAME.M.mtx} over the free degrees of freedom, and {@code NAME.dofs.csv} with
- * the node and the component of each row. Everything in SI: N/m, N, N m; kg, kg m, kg m2.
+ * The matrices of a model as files: {@code NAME.K.mtx} and {@code NAME.M.mtx} over the free degrees of freedom, and {@code NAME.dofs.csv}
+ * with the node and the component of each row. Everything in SI: N/m, N, N m; kg, kg m, kg m2.
  */
 public final class MatrixFiles {
 

@@ -13,8 +13,8 @@ import org.modewright.exchange.internal.MatrixReader;
 import org.modewright.numerics.SymmetricMatrix;
 
 /**
- * Symmetric matrices as MatrixMarket files, coordinate format (R. F. Boisvert, R. Pozo, K. A. Remington, The Matrix Market Exchange Formats:
- * Initial Design, NISTIR 5935, 1996). Rows and columns count from 1; the file holds the lower triangle.
+ * Symmetric matrices as MatrixMarket files, coordinate format (R. F. Boisvert, R. Pozo, K. A. Remington, The Matrix Market Exchange
+ * Formats: Initial Design, NISTIR 5935, 1996). Rows and columns count from 1; the file holds the lower triangle.
  */
 public final class MatrixMarket {
 

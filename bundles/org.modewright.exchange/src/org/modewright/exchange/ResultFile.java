@@ -13,8 +13,9 @@ import org.modewright.modal.MatrixRun;
 import org.modewright.modal.ModalResult;
 
 /**
- * The result file: JSON, everything in SI, numbers in full double precision, shares as fractions of 1. What has no finite value, such as the
- * period of a rigid-body mode, is null. Elements and objects of findings are given by their names, which in a table package are their ids.
+ * The result file: JSON, everything in SI, numbers in full double precision, shares as fractions of 1. What has no finite value, such as
+ * the period of a rigid-body mode, is null. Elements and objects of findings are given by their names, which in a table package are their
+ * ids.
  */
 public final class ResultFile {
 

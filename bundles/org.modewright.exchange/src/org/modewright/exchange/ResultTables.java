@@ -170,10 +170,12 @@ public final class ResultTables {
     }
 
     private static TableText verdicts(List<Verdict> verdicts) {
-        TableText table = new TableText(List.of("rule pack", "clause", "direction", "captured", "required", "pass", "reached at mode", "verdict"));
+        TableText table = new TableText(List.of("rule pack", "clause", "direction", "captured", "required", "pass", "reached at mode",
+                "verdict"));
         for (Verdict verdict : verdicts) {
             table.text(verdict.rulePack()).text(verdict.clause()).text(verdict.direction().word()).number(verdict.captured())
-                    .number(verdict.required()).text(verdict.pass() ? "yes" : "no").number(verdict.reachedAtMode()).text(verdict.text()).end();
+                    .number(verdict.required()).text(verdict.pass() ? "yes" : "no").number(verdict.reachedAtMode()).text(verdict.text())
+                    .end();
         }
         return table;
     }

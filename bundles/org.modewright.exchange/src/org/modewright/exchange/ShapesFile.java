@@ -14,8 +14,8 @@ import io.jhdf.WritableHdfFile;
 import io.jhdf.exceptions.HdfException;
 
 /**
- * Mode shapes as an HDF5 file with the datasets {@code frequency} (Hz, one a mode), {@code shape} (mode &times; node &times; ux uy uz rx ry rz,
- * &phi;<sup>T</sup>M&phi; = 1 in SI) and {@code node} (names in the order of the shapes).
+ * Mode shapes as an HDF5 file with the datasets {@code frequency} (Hz, one a mode), {@code shape} (mode &times; node &times; ux uy uz rx
+ * ry rz, &phi;<sup>T</sup>M&phi; = 1 in SI) and {@code node} (names in the order of the shapes).
  */
 public final class ShapesFile {
 

@@ -97,7 +97,8 @@ public final class TablePackage {
     }
 
     private static void zip(Map<String, byte[]> files, Path path) throws IOException {
-        try (OutputStream out = Files.newOutputStream(path, StandardOpenOption.CREATE_NEW); ZipOutputStream zip = new ZipOutputStream(out)) {
+        try (OutputStream out = Files.newOutputStream(path, StandardOpenOption.CREATE_NEW);
+                ZipOutputStream zip = new ZipOutputStream(out)) {
             for (Map.Entry<String, byte[]> file : files.entrySet()) {
                 ZipEntry entry = new ZipEntry(file.getKey());
                 entry.setTimeLocal(NO_TIME);

@@ -20,7 +20,8 @@ public final class Samples {
             new Sample("mass-chain", "Masses in series on springs"));
 
     private static final List<String> DEMO_PACKAGE = List.of("datapackage.json", "frame_sections.csv", "gravity_loads.csv", "levels.csv",
-            "mass_rule.csv", "masses.csv", "materials.csv", "members.csv", "nodes.csv", "rigid_floors.csv", "rigid_links.csv", "supports.csv");
+            "mass_rule.csv", "masses.csv", "materials.csv", "members.csv", "nodes.csv", "rigid_floors.csv", "rigid_links.csv",
+            "supports.csv");
 
     private Samples() {
     }

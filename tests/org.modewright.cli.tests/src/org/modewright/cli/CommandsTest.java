@@ -233,8 +233,8 @@ class CommandsTest {
         assertFalse(Files.exists(name));
         Path ofMatrices = temporary.resolve("matrices.json");
         Path ofModel = temporary.resolve("model.json");
-        Console solved = Console.run("solve", temporary.resolve("demo.K.mtx").toString(), temporary.resolve("demo.M.mtx").toString(), "--modes", "20",
-                "--json", ofMatrices.toString());
+        Console solved = Console.run("solve", temporary.resolve("demo.K.mtx").toString(), temporary.resolve("demo.M.mtx").toString(),
+                "--modes", "20", "--json", ofMatrices.toString());
         assertEquals(0, solved.status(), solved.toString());
         assertEquals(0, Console.run("solve", "sample:demo", "--modes", "20", "--json", ofModel.toString()).status());
         StoredResult pair = ResultFile.read(ofMatrices);
@@ -249,16 +249,18 @@ class CommandsTest {
     }
 
     /**
-     * BCSSTK01 and BCSSTM01 (Harwell-Boeing collection, Duff, Grimes, Lewis 1989; read from a Debian source package), 24 of the 48 masses are 0. The
-     * finite eigenvalues are recomputed (static condensation and a dense solver, cross-checked by the eigenvalues of the flexibility times mass);
-     * their relative tolerance is 1e-8, so half of that in frequency.
+     * BCSSTK01 and BCSSTM01 (Harwell-Boeing collection, Duff, Grimes, Lewis 1989; read from a Debian source package), 24 of the 48 masses
+     * are 0. The finite eigenvalues are recomputed (static condensation and a dense solver, cross-checked by the eigenvalues of the
+     * flexibility times mass); their relative tolerance is 1e-8, so half of that in frequency.
      */
     @Test
     void theFortyEightDegreePairHasItsTwentyFourModes() throws IOException {
-        double[] expected = {27.270485478597507, 69.67379039831948, 77.52223582693743, 155.65142905464523, 258.20594251617956, 442.694085111,
-            453.4672583177813, 510.23304711034024, 4656.041789186303, 5095.092452908314, 5130.720110854082, 5162.968163119432, 10025.499396383928,
-            23803.734073304982, 26265.375354056876, 27722.87903320297, 27728.78683741727, 27762.09795837693, 28529.366829529474, 33822.60100349292,
-            39509.96689196434, 55914.66347391951, 56181.14771162551, 56234.05918002483};
+        double[] expected = {
+            27.270485478597507, 69.67379039831948, 77.52223582693743, 155.65142905464523, 258.20594251617956, 442.694085111,
+            453.4672583177813, 510.23304711034024, 4656.041789186303, 5095.092452908314, 5130.720110854082, 5162.968163119432,
+            10025.499396383928, 23803.734073304982, 26265.375354056876, 27722.87903320297, 27728.78683741727, 27762.09795837693,
+            28529.366829529474, 33822.60100349292, 39509.96689196434, 55914.66347391951, 56181.14771162551, 56234.05918002483
+        };
         Path json = temporary.resolve("r.json");
         Console console = Console.run("solve", resource("bcsst01.K.mtx"), resource("bcsst01.M.mtx"), "--json", json.toString());
         assertEquals(0, console.status(), console.toString());
@@ -307,15 +309,15 @@ class CommandsTest {
         Files.writeString(folder.resolve("nodes.csv"), "id,x,y,z\nN1,0,0,0\nN2,0,0,3\n");
         Files.writeString(folder.resolve("materials.csv"), "id,young,poisson,density\nsteel,210e9,0.3,7850\n");
         Files.writeString(folder.resolve("frame_sections.csv"), "id,area,iy,iz,torsion\nS,0.01,1e-4,5e-5,1e-6\n");
-        Files.writeString(folder.resolve("members.csv"), "id,start,end,section,material,start_free,end_free\nM1,N1,N2,S,steel," + startFree + ","
-                + endFree + "\n");
+        Files.writeString(folder.resolve("members.csv"), "id,start,end,section,material,start_free,end_free\nM1,N1,N2,S,steel,"
+                + startFree + "," + endFree + "\n");
         Files.writeString(folder.resolve("supports.csv"), "node,ux,uy,uz,rx,ry,rz\n" + supports);
         StringBuilder resources = new StringBuilder();
         for (String name : List.of("nodes", "materials", "frame_sections", "members", "supports")) {
             resources.append(resources.isEmpty() ? "" : ", ").append("{\"name\": \"" + name + "\", \"path\": \"" + name + ".csv\"}");
         }
-        Files.writeString(folder.resolve("datapackage.json"), "{\"name\": \"stick\", \"structure\": {\"units\": \"N-m-kg\"}, \"resources\": ["
-                + resources + "]}");
+        Files.writeString(folder.resolve("datapackage.json"),
+                "{\"name\": \"stick\", \"structure\": {\"units\": \"N-m-kg\"}, \"resources\": [" + resources + "]}");
         return folder;
     }
 

@@ -88,13 +88,15 @@ class MalformedPackageTest {
                 fault("mass_rule.csv", "live,0.3", "dead,0.3", 4, "pattern", "dead", "already"),
                 fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-kg\"", 0, "structure/units", "kN-m-kg", "N-mm-t"),
                 fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-t\", \"gravity\": -1", 0, "structure/gravity", "-1", "positive"),
-                fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-t\", \"massMatrix\": \"thick\"", 0, "structure/massMatrix", "thick", "lumped"),
+                fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-t\", \"massMatrix\": \"thick\"", 0, "structure/massMatrix", "thick",
+                        "lumped"),
                 fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-t\", \"shearDeformation\": \"no\"", 0, "structure/shearDeformation", "no",
                         "true or false"),
                 fault("datapackage.json", "\"version\": 1", "\"version\": 2", 0, "structure/version", "2", "version 1"),
                 fault("datapackage.json", "\"nodes.csv\"", "\"../nodes.csv\"", 0, "resources/0/path", "../nodes.csv", "leaves the package"),
                 fault("datapackage.json", "\"nodes.csv\"", "\"/etc/hosts\"", 0, "resources/0/path", "/etc/hosts", "leaves the package"),
-                fault("datapackage.json", "\"nodes.csv\"", "\"file:nodes.csv\"", 0, "resources/0/path", "file:nodes.csv", "leaves the package"),
+                fault("datapackage.json", "\"nodes.csv\"", "\"file:nodes.csv\"", 0, "resources/0/path", "file:nodes.csv",
+                        "leaves the package"),
                 fault("datapackage.json", "\"nodes.csv\"", "\"C:\\\\nodes.csv\"", 0, "resources/0/path", "C:\\nodes.csv", "backslash"),
                 fault("datapackage.json", "\"name\": \"levels\"", "\"name\": \"masses\"", 0, "resources/9/name", "masses", "given twice"),
                 fault("datapackage.json", "\"resources\": [", "\"resources\": ]", 3, "15", "", "not valid JSON"));
@@ -135,7 +137,8 @@ class MalformedPackageTest {
         PackageException exception = assertThrows(PackageException.class, () -> TablePackage.read(folder));
         assertEquals(List.of("datapackage.json", "nodes.csv", "materials.csv", "supports.csv", "supports.csv"),
                 exception.problems().stream().map(Problem::file).toList(), exception.getMessage());
-        assertTrue(exception.getMessage().contains("nodes.csv, row 4, column x, value \"x\": this is not a number"), exception.getMessage());
+        assertTrue(exception.getMessage().contains("nodes.csv, row 4, column x, value \"x\": this is not a number"),
+                exception.getMessage());
     }
 
     @Test
@@ -215,7 +218,8 @@ class MalformedPackageTest {
     @Test
     void zeroIsAllowedWhereTheConventionsSaySo() throws IOException {
         PackageFixture fixture = new PackageFixture().replace("materials.csv", "0.3", "0").replace("frame_sections.csv", ",,0.004", ",0,0")
-                .replace("masses.csv", "N2,5,5,5", "N2,0,0,0").replace("springs.csv", "100", "0").replace("mass_rule.csv", "self,0.5", "self,0");
+                .replace("masses.csv", "N2,5,5,5", "N2,0,0,0").replace("springs.csv", "100", "0")
+                        .replace("mass_rule.csv", "self,0.5", "self,0");
         assertEquals(0, TablePackage.read(fixture.folder(temporary)).model().getSelfMassFactor());
     }
 

@@ -57,7 +57,8 @@ final class PackageFixture {
         StringBuilder resources = new StringBuilder();
         files.keySet().stream().filter(file -> file.endsWith(".csv")).forEach(file -> resources.append(resources.isEmpty() ? "" : ",\n  ")
                 .append("{\"name\": \"").append(file.replace(".csv", "")).append("\", \"path\": \"").append(file).append("\"}"));
-        return put("datapackage.json", "{\"name\": \"portal\", \"title\": \"A portal\",\n \"structure\": {\"version\": 1, \"units\": \"kN-m-t\"},\n"
+        return put("datapackage.json",
+                "{\"name\": \"portal\", \"title\": \"A portal\",\n \"structure\": {\"version\": 1, \"units\": \"kN-m-t\"},\n"
                 + " \"resources\": [\n  " + resources + "]}\n");
     }
 

@@ -12,6 +12,7 @@ import java.nio.ByteOrder;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipOutputStream;
 
@@ -30,7 +31,8 @@ class PackageSafetyTest {
     Path temporary;
 
     @ParameterizedTest
-    @ValueSource(strings = {"../evil.csv", "a/../../evil.csv", "..", "/etc/passwd", "C:/evil.csv", "a\\..\\evil.csv", "~/evil", "file:evil", "a\u0001b"})
+    @ValueSource(strings = {"../evil.csv", "a/../../evil.csv", "..", "/etc/passwd", "C:/evil.csv", "a\\..\\evil.csv", "~/evil",
+            "file:evil", "a\u0001b"})
     void entriesThatLeaveThePackageAreRefused(String name) throws IOException {
         Path zip = new PackageFixture().put(name, "x").zip(temporary.resolve("p.zip"));
         Problem problem = only(zip);
@@ -105,7 +107,7 @@ class PackageSafetyTest {
     void brokenZipsGiveOneProblem() throws IOException {
         Path zip = new PackageFixture().zip(temporary.resolve("p.zip"));
         byte[] bytes = Files.readAllBytes(zip);
-        Files.write(zip, java.util.Arrays.copyOf(bytes, bytes.length / 2));
+        Files.write(zip, Arrays.copyOf(bytes, bytes.length / 2));
         assertEquals(1, assertThrows(PackageException.class, () -> TablePackage.read(zip)).total());
         Files.writeString(zip, "this is no zip");
         assertTrue(only(zip).text().contains("no zip"));

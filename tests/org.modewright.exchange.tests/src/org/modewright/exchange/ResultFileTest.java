@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -23,6 +24,7 @@ import org.modewright.audit.AuditRequest;
 import org.modewright.audit.AuditResult;
 import org.modewright.audit.AuditRun;
 import org.modewright.exchange.samples.SampleModels;
+import org.modewright.fem.Assembly;
 import org.modewright.fem.Snapshot;
 import org.modewright.modal.Direction;
 import org.modewright.modal.MatrixRun;
@@ -134,8 +136,8 @@ class ResultFileTest {
 
     @Test
     void aRigidBodyModeHasNoPeriod() throws IOException {
-        StructuralModel model = TablePackage.read(new PackageFixture().remove("supports.csv").remove("springs.csv").remove("rigid_links.csv")
-                .remove("rigid_floors.csv").describe().folder(temporary)).model();
+        StructuralModel model = TablePackage.read(new PackageFixture().remove("supports.csv").remove("springs.csv")
+                .remove("rigid_links.csv").remove("rigid_floors.csv").describe().folder(temporary)).model();
         ModalResult result = ModalRun.run(Snapshot.of(model), ModalRequest.ofModes(8), Progress.NONE);
         Path file = temporary.resolve("r.json");
         ResultFile.write(result, FACTS, file, false);
@@ -232,7 +234,7 @@ class ResultFileTest {
     @Test
     void matricesOfAModelGiveItsFrequencies() throws IOException {
         StructuralModel model = SampleModels.all().get("cantilever");
-        List<Path> files = MatrixFiles.write(org.modewright.fem.Assembly.of(Snapshot.of(model), Progress.NONE), temporary.resolve("c.mtx"));
+        List<Path> files = MatrixFiles.write(Assembly.of(Snapshot.of(model), Progress.NONE), temporary.resolve("c.mtx"));
         assertEquals(List.of("c.K.mtx", "c.M.mtx", "c.dofs.csv"), files.stream().map(file -> file.getFileName().toString()).toList());
         MatrixRun.Result pair = MatrixRun.run(MatrixMarket.read(files.get(0)), MatrixMarket.read(files.get(1)), ModalRequest.ofModes(9),
                 Progress.NONE);
@@ -241,7 +243,7 @@ class ResultFileTest {
             // the same matrices, so the same frequencies but for the rounding of the eigen solution
             assertEquals(modes.modes().get(i).frequency(), pair.frequencies()[i], 1e-9 * pair.frequencies()[i]);
         }
-        try (CSVParser parser = CSVParser.parse(files.get(2), java.nio.charset.StandardCharsets.UTF_8, CSVFormat.RFC4180)) {
+        try (CSVParser parser = CSVParser.parse(files.get(2), StandardCharsets.UTF_8, CSVFormat.RFC4180)) {
             List<CSVRecord> rows = parser.getRecords();
             assertEquals(List.of("row", "node", "component"), rows.get(0).toList());
             assertEquals(19, rows.size());
@@ -251,7 +253,8 @@ class ResultFileTest {
 
     private List<CSVRecord> table(String name) throws IOException {
         CSVFormat format = CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true).get();
-        try (CSVParser parser = CSVParser.parse(temporary.resolve("tables").resolve(name), java.nio.charset.StandardCharsets.UTF_8, format)) {
+        try (CSVParser parser = CSVParser.parse(temporary.resolve("tables").resolve(name), StandardCharsets.UTF_8,
+                format)) {
             return parser.getRecords();
         }
     }

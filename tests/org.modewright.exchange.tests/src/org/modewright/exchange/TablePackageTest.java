@@ -155,7 +155,8 @@ class TablePackageTest {
 
     @Test
     void columnsMayComeInAnyOrderAndOptionalOnesMayBeAbsent() throws IOException {
-        PackageFixture fixture = new PackageFixture().put("members.csv", "material,section,end,start,id\nsteel,C,N2,N1,M1\nsteel,C,N3,N2,M2\n");
+        PackageFixture fixture = new PackageFixture().put("members.csv",
+                "material,section,end,start,id\nsteel,C,N2,N1,M1\nsteel,C,N3,N2,M2\n");
         StructuralModel model = TablePackage.read(fixture.folder(temporary)).model();
         assertEquals("N2", model.getMembers().get(0).getEnd().getName());
         assertNull(model.getMembers().get(0).getGroup());
@@ -164,7 +165,8 @@ class TablePackageTest {
     @Test
     void unknownColumnsResourcesAndFilesAreNamedInWarnings() throws IOException {
         PackageFixture fixture = new PackageFixture().put("nodes.csv", "id,x,y,z,colour\nN1,0,0,0,red\nN2,0,0,3,\nN3,4,0,3,\nN4,4,0,0,\n")
-                .put("weather.csv", "a\n1\n").describe().put("stray.csv", "x\n").replace("datapackage.json", "\"version\": 1", "\"version\": 1, \"soil\": 2");
+                .put("weather.csv", "a\n1\n").describe().put("stray.csv", "x\n")
+                        .replace("datapackage.json", "\"version\": 1", "\"version\": 1, \"soil\": 2");
         List<String> warnings = TablePackage.read(fixture.folder(temporary)).warnings();
         assertTrue(warnings.contains("nodes.csv: the column colour is not known and was ignored"), warnings.toString());
         assertTrue(warnings.contains("datapackage.json: the resource weather is not known and was ignored"), warnings.toString());
@@ -187,7 +189,8 @@ class TablePackageTest {
     @Test
     void namesThatASpreadsheetMightRunReadBackUnchanged() throws IOException {
         StructuralModel model = TablePackage.read(new PackageFixture().folder(temporary)).model();
-        String[] names = {"=SUM(A1)", "+plus", "-minus", "@at", "'=quoted", "''@twice", "'plain", "-5", "a,b", "say \"hi\"", "two\nlines", "Ünïcödé"};
+        String[] names = {"=SUM(A1)", "+plus", "-minus", "@at", "'=quoted", "''@twice", "'plain", "-5", "a,b", "say \"hi\"", "two\nlines",
+                "Ünïcödé"};
         Path out = temporary.resolve("out");
         for (String name : names) {
             model.getNodes().get(0).setName(name);
@@ -234,7 +237,8 @@ class TablePackageTest {
         String warnings = String.join("\n", TablePackage.write(model, out));
         for (String expected : List.of("Offsets of members are not part of a table package and were left out: M1.", "were left out: M2.",
                 "the one of the model was written: M3.", "Couplings of springs are not part of a table package and were left out: S1.",
-                "springs to ground: N4.", "put at their nodes: N2.", "Multi-point ties are not part of a table package and were left out: T1.",
+                "springs to ground: N4.", "put at their nodes: N2.",
+                        "Multi-point ties are not part of a table package and were left out: T1.",
                 "Groups without elements are not part of a table package and were left out: nobody.", "left out: columns.",
                 "The settings of the analysis are not part of a table package")) {
             assertTrue(warnings.contains(expected), expected + " in " + warnings);

@@ -24,8 +24,8 @@ import picocli.CommandLine.Spec;
 @Command(name = "check", sortOptions = false, header = {"Solves a model, audits its modes and prints the verdict.", ""},
         customSynopsis = "modewright check MODEL [OPTIONS]",
         footer = {"", "MODEL is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
-            "Exit status: 0 the audit passes; 1 it does not; 2 bad input or options; 3 the run could not be completed", "(unstable structure, "
-                    + "incomplete modes, out of memory)."})
+            "Exit status: 0 the audit passes; 1 it does not; 2 bad input or options; 3 the run could not be completed",
+            "(unstable structure, incomplete modes, out of memory)."})
 public final class CheckCommand implements Callable<Integer> {
 
     private final CommandContext context;

@@ -67,7 +67,8 @@ final class CheckReport {
         }
         Map<Direction, Verdict> verdicts = result.verdicts().stream().collect(Collectors.toMap(Verdict::direction, Function.identity()));
         out.println();
-        out.println("Mass capture" + result.verdicts().stream().findFirst().map(verdict -> " (rule pack " + verdict.rulePack() + ")").orElse(""));
+        String pack = result.verdicts().isEmpty() ? "" : " (rule pack " + result.verdicts().get(0).rulePack() + ")";
+        out.println("Mass capture" + pack);
         TextTable table = new TextTable("direction", ">captured", ">required", ">margin", "reached at", "verdict");
         for (Direction direction : TRANSLATIONS) {
             Verdict verdict = verdicts.get(direction);

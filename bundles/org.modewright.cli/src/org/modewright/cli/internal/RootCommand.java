@@ -10,7 +10,8 @@ import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 
 /** The program itself: says what commands there are. */
-@Command(name = "modewright", customSynopsis = {"modewright COMMAND [OPTIONS]", "       modewright COMMAND --help"}, sortOptions = false, subcommands = CommandLine.HelpCommand.class,
+@Command(name = "modewright", customSynopsis = {"modewright COMMAND [OPTIONS]", "       modewright COMMAND --help"}, sortOptions = false,
+        subcommands = CommandLine.HelpCommand.class,
         description = {"Proves that the modes of a finite element model are right, enough and understood.", ""},
         commandListHeading = "%nCommands:%n",
         footer = {"", "MODEL is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",

@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import org.modewright.exchange.ResultFile;
 import org.modewright.exchange.StoredResult;
 
+import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonNode;
@@ -33,7 +34,8 @@ public final class ResultReader {
             }
             return mapper.treeToValue(result, StoredResult.class);
         } catch (JsonProcessingException e) {
-            String place = e.getLocation() == null ? "" : ", line " + e.getLocation().getLineNr() + ", column " + e.getLocation().getColumnNr();
+            JsonLocation at = e.getLocation();
+            String place = at == null ? "" : ", line " + at.getLineNr() + ", column " + at.getColumnNr();
             throw new IOException(file + place + ": this is no result file: " + e.getOriginalMessage(), e);
         }
     }

@@ -11,8 +11,8 @@ import org.modewright.model.structure.Node;
 import org.modewright.model.structure.StructuralModel;
 
 /**
- * The demonstration model: an irregular five-storey steel frame of an invented place, with an L-shaped plan, a set-back at the fourth floor,
- * braces, a lattice mast on the roof and an entrance canopy whose corner was meant to hang on the building and was not joined.
+ * The demonstration model: an irregular five-storey steel frame of an invented place, with an L-shaped plan, a set-back at the fourth
+ * floor, braces, a lattice mast on the roof and an entrance canopy whose corner was meant to hang on the building and was not joined.
  */
 final class DemoModel {
 

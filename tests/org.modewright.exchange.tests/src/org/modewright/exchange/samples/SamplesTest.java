@@ -9,6 +9,7 @@ import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.stream.Stream;
 
@@ -45,7 +46,7 @@ class SamplesTest {
 
     @Test
     void filesAreWhatTheGeneratorMakes() throws IOException {
-        assertEquals(SampleModels.all().keySet(), new java.util.LinkedHashSet<>(Samples.all().stream().map(Sample::name).toList()));
+        assertEquals(SampleModels.all().keySet(), new LinkedHashSet<>(Samples.all().stream().map(Sample::name).toList()));
         for (Sample sample : Samples.all()) {
             try (InputStream stream = sample.open()) {
                 assertEquals(new String(ModelFile.bytes(SampleModels.all().get(sample.name())), StandardCharsets.UTF_8),
@@ -95,14 +96,18 @@ class SamplesTest {
         assertEquals(1, grave.size(), grave.toString());
         assertEquals("nodes-not-joined", grave.get(0).id());
         assertEquals(List.of("D2-1", "K1"), grave.get(0).objects().stream().map(ObjectRef::name).sorted().toList());
-        String local = result.findings().stream().filter(finding -> finding.id().equals("local-modes")).map(Finding::text).toList().toString();
+        String local = result.findings().stream().filter(finding -> finding.id().equals("local-modes")).map(Finding::text).toList()
+                .toString();
         assertTrue(local.contains("entrance canopy") && local.contains("roof mast"), local);
         assertEquals(List.of(), WellFormedness.check(SampleModels.all().get("demo")));
         int members = SampleModels.all().get("demo").getMembers().size();
         assertTrue(members >= 300 && members <= 900, "members: " + members);
     }
 
-    /** f = sqrt(3EI/(mL^3))/2pi, sqrt(EA/(mL))/2pi: deflection and elongation of a cantilever under a force at its tip, any textbook of statics. */
+    /**
+     * f = sqrt(3EI/(mL^3))/2pi, sqrt(EA/(mL))/2pi: deflection and elongation of a cantilever under a force at its tip, any textbook of
+     * statics.
+     */
     @Test
     void tipMass() {
         ModalResult result = audit("tip-mass").modal();
@@ -151,8 +156,9 @@ class SamplesTest {
     }
 
     /**
-     * Shear building m = 1.0, 1.5, 2.0 kip s2/in, k = 60, 120, 180 kip/in from the top: Clough and Penzien, Dynamics of Structures, Example E11-1
-     * with a tenth of its stiffness, as in a university course handout (Example - modal analysis; read), recomputed to the digits given.
+     * Shear building m = 1.0, 1.5, 2.0 kip s2/in, k = 60, 120, 180 kip/in from the top: Clough and Penzien, Dynamics of Structures,
+     * Example E11-1 with a tenth of its stiffness, as in a university course handout (Example - modal analysis; read), recomputed to the
+     * digits given.
      */
     @Test
     void threeStoreys() {
@@ -169,7 +175,8 @@ class SamplesTest {
 
     /**
      * omega_n = 2 sqrt(k/m) sin((2n-1)pi/(2(2N+1))) of a uniform chain held at one end (Rayleigh, Theory of Sound; any textbook) and the
-     * effective masses of the uniform five-storey shear building (closed form, recomputed; A. K. Chopra, Dynamics of Structures, from memory).
+     * effective masses of the uniform five-storey shear building (closed form, recomputed; A. K. Chopra, Dynamics of Structures, from
+     * memory).
      */
     @Test
     void massChain() {

@@ -20,7 +20,8 @@ final class TeachingModels {
     static StructuralModel tipMass() {
         ModelBuilder builder = new ModelBuilder("tip-mass", "Massless cantilever with a mass at its tip", "N-m-kg", """
                 A round tube of 4 m, clamped at its foot, carries 2000 kg at its tip; its own mass is left out. Sway in X and in Y: \
-                f = (1/2π)·√(3EI/(mL³)) = 1.59 Hz; along Z: (1/2π)·√(EA/(mL)) = 47 Hz. One mode in each direction holds all of the mass.""");
+                f = (1/2π)·√(3EI/(mL³)) = 1.59 Hz; along Z: (1/2π)·√(EA/(mL)) = 47 Hz. One mode in each direction holds \
+                all of the mass.""");
         Material steel = builder.material("steel", 210e9, 0.3, ANY_DENSITY);
         FrameSection tube = builder.section("tube", 3.326e-3, 2.0308e-5, 2.0308e-5, 4.0616e-5);
         builder.node("foot", 0, 0, 0);
@@ -35,8 +36,10 @@ final class TeachingModels {
     /** Two storeys in series: f = sqrt(k1 k2 / ((k1 + k2) m)) / 2 pi, k = 2 * 12 EI / h^3. */
     static StructuralModel twoStoreys() {
         ModelBuilder builder = new ModelBuilder("two-storeys", "Two-storey frame with mass on the top only", "kN-m-t", """
-                A shear frame in the plane X-Z: rigid girders, columns without mass, 30 t on the top floor and nothing on the first. The storeys \
-                act in series: k = k₁k₂/(k₁+k₂), f = (1/2π)·√(k/m), with 24EI/h³ a storey. The first floor moves without mass of its own: \
+                A shear frame in the plane X-Z: rigid girders, columns without mass, 30 t on the top floor and nothing on the first. \
+                The storeys \
+                act in series: k = k₁k₂/(k₁+k₂), f = (1/2π)·√(k/m), with 24EI/h³ a storey. The first floor moves without mass of its \
+                own: \
                 one mode holds all of the mass.""");
         Material concrete = builder.material("concrete", 30e6, 0.2, 2.5);
         FrameSection column = builder.section("column 40x40", 0.16, 2.1333333333333333e-3, 2.1333333333333333e-3, 3.6e-3);
@@ -47,7 +50,8 @@ final class TeachingModels {
     /** Flexibility x_i^2 (3 x_j - x_i) / (6 EI), x_i not above x_j. */
     static StructuralModel cantilever() {
         ModelBuilder builder = new ModelBuilder("cantilever", "Cantilever with three masses", "kN-m-t", """
-                A chimney-like cantilever of 30 m with 12, 9 and 6 t at 10, 20 and 30 m; its own mass is left out. The flexibility under a unit \
+                A chimney-like cantilever of 30 m with 12, 9 and 6 t at 10, 20 and 30 m; its own mass is left out. The flexibility \
+                under a unit \
                 force at x_j is x_i²(3x_j − x_i)/(6EI) at x_i ≤ x_j; the eigenvalues of flexibility times mass are 1/ω². Three modes in \
                 each direction hold all of the mass; the first holds 68 %.""");
         Material steel = builder.material("steel", 210e6, 0.3, 7.85);
@@ -67,7 +71,8 @@ final class TeachingModels {
     /** Shear frame with m = 2, 1.5, 1 kip s2/in and k = 180, 120, 60 kip/in from the bottom. */
     static StructuralModel threeStoreys() {
         ModelBuilder builder = new ModelBuilder("three-storeys", "Three-storey frame", "kip-in", """
-                A shear frame in the plane X-Z with storey stiffnesses 180, 120 and 60 kip/in and masses 2.0, 1.5 and 1.0 kip·s²/in from the \
+                A shear frame in the plane X-Z with storey stiffnesses 180, 120 and 60 kip/in and masses 2.0, 1.5 and 1.0 kip·s²/in \
+                from the \
                 bottom to the top: periods 1.368, 0.640 and 0.431 s. The first mode holds 81 % of the mass, the first two 96 %.""");
         Material steel = builder.material("steel", 29000, 0.3, 7.35e-7);
         double[] stiffness = {180, 120, 60};

@@ -95,7 +95,9 @@ final class CsvTable {
         }
     }
 
-    /** Index of each column; null, with a problem, where the first row is no header of this table. Unnamed columns count but hold nothing. */
+    /**
+     * Index of each column; null, with a problem, where the first row is no header of this table. Unnamed columns count but hold nothing.
+     */
     private Map<String, Integer> header(String[] names) {
         if (wrongDelimiter(names)) {
             return null;

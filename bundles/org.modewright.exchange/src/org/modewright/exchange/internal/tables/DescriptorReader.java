@@ -124,7 +124,8 @@ final class DescriptorReader {
         }
         double value = gravity.isNumber() ? gravity.asDouble() : Double.NaN;
         if (!Double.isFinite(value) || value <= 0) {
-            fault("structure/gravity", plain(gravity), "the acceleration of gravity must be a positive number, or be left out for 9.80665 m/s2");
+            fault("structure/gravity", plain(gravity),
+                    "the acceleration of gravity must be a positive number, or be left out for 9.80665 m/s2");
             return 0;
         }
         return value;

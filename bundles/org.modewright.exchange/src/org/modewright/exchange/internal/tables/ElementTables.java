@@ -78,7 +78,8 @@ final class ElementTables {
         }
         double length = distance(start, end);
         if (start == end || length == 0) {
-            row.problem("end", start == end ? "the member ends at the node at which it starts" : "the member has no length; its nodes coincide");
+            row.problem("end", start == end ? "the member ends at the node at which it starts"
+                    : "the member has no length; its nodes coincide");
         } else if (member.getStartRigid() + member.getEndRigid() >= length) {
             row.problem(member.getStartRigid() > 0 ? "start_rigid" : "end_rigid",
                     "the rigid end zones take up the whole member; its length is " + length);

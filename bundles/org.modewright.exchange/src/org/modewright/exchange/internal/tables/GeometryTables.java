@@ -103,7 +103,8 @@ final class GeometryTables {
             } else if (floor.getNodes().size() == rows.size()) {
                 int odd = Coplanarity.firstOutside(floor.getNodes());
                 if (odd >= 0) {
-                    rows.get(odd).problem("node", "the nodes of the floor " + floor.getName() + " are not coplanar; this one stands out of their plane");
+                    rows.get(odd).problem("node", "the nodes of the floor " + floor.getName()
+                            + " are not coplanar; this one stands out of their plane");
                 }
             }
         }

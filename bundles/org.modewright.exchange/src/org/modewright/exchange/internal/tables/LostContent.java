@@ -65,7 +65,8 @@ final class LostContent {
                 renamed.add(mass);
             }
         }
-        warn("Names of masses are not part of a table package; on reading they get the names of their nodes", model.getMasses(), renamed::contains);
+        warn("Names of masses are not part of a table package; on reading they get the names of their nodes", model.getMasses(),
+                renamed::contains);
     }
 
     private void groups() {
@@ -73,7 +74,8 @@ final class LostContent {
         List<Grouped> elements = new ArrayList<>(model.getMembers());
         elements.addAll(model.getSprings());
         elements.forEach(element -> used.add(element.getGroup()));
-        warn("Groups without elements are not part of a table package and were left out", model.getGroups(), group -> !used.contains(group));
+        warn("Groups without elements are not part of a table package and were left out", model.getGroups(),
+                group -> !used.contains(group));
         warn("Descriptions of groups are not part of a table package and were left out", model.getGroups(),
                 group -> group.getDescription() != null && !group.getDescription().isEmpty());
     }

@@ -7,7 +7,8 @@ final class NumberText {
 
     private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)?");
     private static final Pattern DECIMAL_COMMA = Pattern.compile("[+-]?\\d*,\\d+([eE][+-]?\\d+)?");
-    private static final Pattern NOT_FINITE = Pattern.compile("[+-]?(nan|inf|infinity|#n/a|#num!|#div/0!|#value!)", Pattern.CASE_INSENSITIVE);
+    private static final Pattern NOT_FINITE = Pattern.compile("[+-]?(nan|inf|infinity|#n/a|#num!|#div/0!|#value!)",
+            Pattern.CASE_INSENSITIVE);
 
     private NumberText() {
     }

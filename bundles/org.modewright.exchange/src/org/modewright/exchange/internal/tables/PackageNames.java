@@ -29,7 +29,8 @@ final class PackageNames {
                 id = base + " (" + i + ")";
             }
             if (!id.equals(name)) {
-                warnings.add("The " + kind + " \"" + name + "\" was written as \"" + id + "\": a table needs a unique id without blanks around it.");
+                warnings.add("The " + kind + " \"" + name + "\" was written as \"" + id
+                        + "\": a table needs a unique id without blanks around it.");
             }
             names.put(object, id);
         }

@@ -1,6 +1,7 @@
 package org.modewright.exchange.internal.tables;
 
 import java.io.IOException;
+import java.nio.file.Path;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -32,8 +33,8 @@ public final class PackageReader {
         this.content = content;
         target = new Import(ModelFile.create(""));
         geometry = new GeometryTables(target);
-        indices = Map.of(TableSchema.NODES, target.nodes, TableSchema.MATERIALS, target.materials, TableSchema.FRAME_SECTIONS, target.sections,
-                TableSchema.MEMBERS, target.members);
+        indices = Map.of(TableSchema.NODES, target.nodes, TableSchema.MATERIALS, target.materials, TableSchema.FRAME_SECTIONS,
+                target.sections, TableSchema.MEMBERS, target.members);
         ElementTables elements = new ElementTables(target);
         MassTables masses = new MassTables(target);
         readers.put(TableSchema.NODES, geometry::node);
@@ -56,7 +57,7 @@ public final class PackageReader {
      * @param location a folder, a zip, or a datapackage.json
      * @throws PackageException with every problem of the package
      */
-    public static Imported read(java.nio.file.Path location) throws IOException {
+    public static Imported read(Path location) throws IOException {
         try (PackageContent content = PackageContent.of(location)) {
             return new PackageReader(content).read(String.valueOf(location.getFileName()));
         }

@@ -163,7 +163,8 @@ public final class PackageWriter {
         if (model.getSelfMassFactor() != 1) {
             row(TableSchema.MASS_RULE).text(MassTables.SELF).number(model.getSelfMassFactor()).end();
         }
-        model.getLoadPatterns().forEach(pattern -> row(TableSchema.MASS_RULE).text(patternId(pattern)).number(pattern.getMassFactor()).end());
+        model.getLoadPatterns().forEach(pattern -> row(TableSchema.MASS_RULE).text(patternId(pattern)).number(pattern.getMassFactor())
+                .end());
     }
 
     private void loads(LoadPattern pattern) {

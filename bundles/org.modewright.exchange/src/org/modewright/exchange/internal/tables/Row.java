@@ -80,7 +80,10 @@ final class Row {
         return id;
     }
 
-    /** A number that must be there; not-a-number, with a problem, where it is not, so that nothing that follows from it is a further fault. */
+    /**
+     * A number that must be there; not-a-number, with a problem, where it is not, so that nothing that follows from it is a further
+     * fault.
+     */
     double required(String column, Range range) {
         if (isBlank(column)) {
             if (columns.containsKey(column)) {

@@ -11,9 +11,14 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import java.util.zip.ZipEntry;
+import java.util.zip.ZipException;
 import java.util.zip.ZipFile;
 
-/** A package in a zip. Every name is checked before anything is read, and reading stops at the limits whatever the zip says of its sizes. */
+import org.modewright.exchange.PackageException;
+
+/**
+ * A package in a zip. Every name is checked before anything is read, and reading stops at the limits whatever the zip says of its sizes.
+ */
 final class ZipContent implements PackageContent {
 
     private final ZipFile zip;
@@ -30,7 +35,7 @@ final class ZipContent implements PackageContent {
     /**
      * Opens a zip and checks the names of its entries.
      *
-     * @throws org.modewright.exchange.PackageException if it is no zip, or an entry is unsafe, or the description is not at its root
+     * @throws PackageException if it is no zip, or an entry is unsafe, or the description is not at its root
      */
     static ZipContent open(Path location, ZipLimits limits) throws IOException {
         ProblemList problems = new ProblemList();
@@ -40,9 +45,9 @@ final class ZipContent implements PackageContent {
             checkNames(name, ZipDirectory.read(location), limits, problems);
             problems.throwIfAny();
             zip = new ZipFile(location.toFile());
-        } catch (java.util.zip.ZipException e) {
+        } catch (ZipException e) {
             problems.add(name, 0, "", "", "the zip cannot be read: " + e.getMessage());
-        } catch (org.modewright.exchange.PackageException e) {
+        } catch (PackageException e) {
             throw e;
         } catch (IOException e) {
             problems.add(name, 0, "", "", e.getMessage());
@@ -69,7 +74,8 @@ final class ZipContent implements PackageContent {
         }
         if (!seen.contains(DESCRIPTOR)) {
             seen.stream().filter(path -> path.endsWith("/" + DESCRIPTOR)).sorted().findFirst().ifPresentOrElse(
-                    path -> problems.add(zip, 0, "", path, "datapackage.json must stand at the root of the zip; zip the files, not their folder"),
+                    path -> problems.add(zip, 0, "", path,
+                            "datapackage.json must stand at the root of the zip; zip the files, not their folder"),
                     () -> problems.add(zip, 0, "", "", "the zip holds no datapackage.json at its root"));
         }
     }
@@ -87,7 +93,8 @@ final class ZipContent implements PackageContent {
 
     @Override
     public List<String> rootTables() {
-        return files.keySet().stream().filter(path -> path.indexOf('/') < 0 && path.toLowerCase(Locale.ROOT).endsWith(".csv")).sorted().toList();
+        return files.keySet().stream().filter(path -> path.indexOf('/') < 0 && path.toLowerCase(Locale.ROOT).endsWith(".csv")).sorted()
+                .toList();
     }
 
     @Override

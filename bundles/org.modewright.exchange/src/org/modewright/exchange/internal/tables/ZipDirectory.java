@@ -11,8 +11,9 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The central directory of a zip as far as safety needs it: names and kinds of entries. The JDK does not tell links from files; the upper half
- * of the external attributes of an entry made on Unix does (PKWARE, .ZIP File Format Specification, sections 4.3.12, 4.3.16 and 4.4.15).
+ * The central directory of a zip as far as safety needs it: names and kinds of entries. The JDK does not tell links from files; the upper
+ * half of the external attributes of an entry made on Unix does (PKWARE, .ZIP File Format Specification, sections 4.3.12, 4.3.16 and
+ * 4.4.15).
  */
 final class ZipDirectory {
 
