@@ -12,7 +12,8 @@ import java.util.Objects;
  * @param period 1/frequency, s; infinite where the frequency is 0
  * @param residual &#8214;K&phi; &minus; &lambda;M&phi;&#8214;&#8322; / &#8214;K&phi;&#8214;&#8322;
  * @param errorBound bound of the frequency's relative error
- * @param participation &Gamma; = &phi;<sup>T</sup>M&iota; for the six {@link Direction directions}; &radic;kg, for rotations &radic;kg&middot;m
+ * @param participation &Gamma; = &phi;<sup>T</sup>M&iota; for the six {@link Direction directions}; &radic;kg, for rotations
+ *        &radic;kg&middot;m
  * @param effectiveMassShare &Gamma;&sup2; over the movable mass of the direction, or over the rotary mass about its centre
  * @param spread 1/&Sigma;p&sup2; over the nodes' shares p of the kinetic energy: how many nodes effectively move
  * @param split shares of the kinetic energy in X, Y, Z and in the nodes' rotations

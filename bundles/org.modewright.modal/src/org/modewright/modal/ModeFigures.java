@@ -5,9 +5,9 @@ import org.modewright.fem.MassLedger;
 import org.modewright.numerics.EigenPairs;
 
 /**
- * Turns eigenpairs into modes: sign, participation, effective mass, spread, split, energy shares and character. Definitions: participation
- * &Gamma; = &phi;<sup>T</sup>M&iota;, effective mass share &Gamma;&sup2;/&iota;<sup>T</sup>M&iota;, spread 1/&Sigma;p&sup2; with p the nodes'
- * shares of the kinetic energy.
+ * Turns eigenpairs into modes: sign, participation, effective mass, spread, split, energy shares and character. Definitions:
+ * participation &Gamma; = &phi;<sup>T</sup>M&iota;, effective mass share &Gamma;&sup2;/&iota;<sup>T</sup>M&iota;, spread 1/&Sigma;p&sup2;
+ * with p the nodes' shares of the kinetic energy.
  */
 final class ModeFigures {
 

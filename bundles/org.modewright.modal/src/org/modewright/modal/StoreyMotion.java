@@ -9,8 +9,8 @@ import org.modewright.fem.NodePoint;
 /**
  * The part of a shape in which every horizontal plane of nodes moves as one: the plane's mean translation u&#772; and its mean twist
  * &theta;&#772; about its own centre of mass, with the kinetic energies &Sigma;m u&#772;<sub>x</sub>&sup2;, &Sigma;m
- * u&#772;<sub>y</sub>&sup2;, &Sigma;m u&#772;<sub>x</sub>u&#772;<sub>y</sub> and &Sigma;I&theta;&#772;&sup2;. It tells sway from torsion in modes
- * of any order, where effective masses, which are small in high modes, do not.
+ * u&#772;<sub>y</sub>&sup2;, &Sigma;m u&#772;<sub>x</sub>u&#772;<sub>y</sub> and &Sigma;I&theta;&#772;&sup2;. It tells sway from torsion
+ * in modes of any order, where effective masses, which are small in high modes, do not.
  */
 final class StoreyMotion {
 

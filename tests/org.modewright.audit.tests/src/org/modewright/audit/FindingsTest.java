@@ -141,7 +141,8 @@ class FindingsTest {
     void incompleteCertificate() {
         Structures s = Structures.building(2);
         Finding missing = only(detected(context(s, new Certificate(false, 14.2, 5, 3, 1e-12, 1e-13))), "incomplete-certificate");
-        assertEquals("The modes are not proven complete: the inertia count finds 5 eigenvalues below 14.2 Hz, the solver 3.", missing.text());
+        assertEquals("The modes are not proven complete: the inertia count finds 5 eigenvalues below 14.2 Hz, the solver 3.",
+                missing.text());
         Finding inaccurate = only(detected(context(s, new Certificate(false, 14.2, 3, 3, 1e-3, 1e-13))), "incomplete-certificate");
         assertTrue(inaccurate.text().contains("worst residual 1e-3"), inaccurate.text());
         assertEquals(List.of(), of(detected(context(s, new Certificate(true, 14.2, 3, 3, 1e-12, 1e-13))), "incomplete-certificate"));
@@ -170,7 +171,8 @@ class FindingsTest {
 
     @Test
     void heldMassIsNoMassWithoutStiffness() {
-        Structures s = Structures.building(2).node("held", 1, 1, 1).mass("held", 700, 700, 700, 0, 0, 0).support("held", "ux uy uz rx ry rz");
+        Structures s = Structures.building(2).node("held", 1, 1, 1).mass("held", 700, 700, 700, 0, 0, 0).support("held",
+                "ux uy uz rx ry rz");
         assertEquals(List.of(), audit(s).stream().filter(finding -> finding.severity() != Severity.INFO).toList());
     }
 
@@ -225,7 +227,8 @@ class FindingsTest {
     /** A chain of members shorter than the limit is joined to itself. */
     @Test
     void shortMembersAreNoGap() {
-        Structures s = Structures.building(2).node("s1", 12.005, 10, 7).node("s2", 12.010, 10, 7).with("t1", "n28", "s1").with("t2", "s1", "s2");
+        Structures s = Structures.building(2).node("s1", 12.005, 10, 7).node("s2", 12.010, 10, 7).with("t1", "n28", "s1").with("t2", "s1",
+                "s2");
         assertEquals(List.of(), of(audit(s), "nodes-not-joined"));
     }
 
@@ -237,7 +240,8 @@ class FindingsTest {
         s.member("pole 2", "m1", "m2").setGroup(mast);
         Finding finding = only(audit(s), "local-modes");
         assertEquals(Severity.INFO, finding.severity());
-        assertTrue(finding.text().matches("Modes 1, 2.* are local to group roof mast\\. Each moves less than 0\\.1 % of the mass in X, Y or Z\\."),
+        assertTrue(finding.text()
+                .matches("Modes 1, 2.* are local to group roof mast\\. Each moves less than 0\\.1 % of the mass in X, Y or Z\\."),
                 finding.text());
         assertTrue(names(finding).contains("pole 1"));
         assertEquals(List.of(), of(audit(Structures.building(3)), "local-modes"));
@@ -256,7 +260,8 @@ class FindingsTest {
     private static Structures torsional(double perimeter, double core) {
         Structures s = new Structures("floor").node("c", 0, 0, 4).mass("c", 1000, 1000, 0, 0, 0, 60000).support("c", "uz rx ry");
         for (int i = 0; i < 4; i++) {
-            s.node("p" + i, (i % 2) * 12 - 6.0, (i / 2) * 12 - 6.0, 4).spring("frame " + i, "p" + i, null, perimeter, perimeter * 1.2, 0, 0, 0, 0);
+            s.node("p" + i, (i % 2) * 12 - 6.0, (i / 2) * 12 - 6.0, 4).spring("frame " + i, "p" + i, null, perimeter, perimeter * 1.2, 0,
+                    0, 0, 0);
         }
         return s.spring("core", "c", null, core, core, 0, 0, 0, 0).floor("floor", "c", "p0", "p1", "p2", "p3");
     }
@@ -319,7 +324,8 @@ class FindingsTest {
                 s.with("m" + i, "n" + (i - 1), "n" + i);
             }
         }
-        s.support("n0", "ux uy uz rx ry rz").node("double", 7, 11, 5.002).node("end", 7, 11.5, 5.5).with("stub", "double", "end").support("end", "ux");
+        s.support("n0", "ux uy uz rx ry rz").node("double", 7, 11, 5.002).node("end", 7, 11.5, 5.5).with("stub", "double", "end")
+                .support("end", "ux");
         List<Finding> findings = ModelFindings.of(s.snapshot(), Thresholds.DEFAULT);
         assertEquals(1, findings.size(), findings.toString());
         assertEquals(List.of("n4837", "double"), names(findings.get(0)));

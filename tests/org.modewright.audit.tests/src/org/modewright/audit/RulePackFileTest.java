@@ -20,7 +20,8 @@ import org.modewright.audit.RulePackException.Problem;
 class RulePackFileTest {
 
     private static final String GOOD = """
-            {"formatVersion": 1, "id": "office-95", "title": "Office rule", "version": "3", "source": "office handbook", "provenance": "read",
+            {"formatVersion": 1, "id": "office-95", "title": "Office rule", "version": "3", "source": "office handbook",
+                    "provenance": "read",
              "clauses": [{"id": "mass", "measure": "captured-mass", "required": 0.95, "statement": "At least 95 %."}]}
             """;
 
@@ -63,8 +64,8 @@ class RulePackFileTest {
         "\"version\": \"3\"|\"version\": 3|/version|must be a text",
         "\"source\": \"office handbook\", |``|/source|is missing",
         "\"provenance\": \"read\"|\"provenance\": \"read\", \"colour\": \"red\"|/colour|is not known; the properties here are",
-        "\"clauses\": [|\"clauses\": [{\"id\": \"mass\", \"measure\": \"captured-mass\", \"required\": 0.9, \"statement\": \"x\"}, |/clauses/1/id|used by an earlier",
-        "\"clauses\": [|\"clauses\": [{\"id\": \"more\", \"measure\": \"captured-mass\", \"required\": 0.9, \"statement\": \"x\"}, |/clauses|exactly one",
+        "\"clauses\": [|\"clauses\": [SAME, |/clauses/1/id|used by an earlier",
+        "\"clauses\": [|\"clauses\": [OTHER, |/clauses|exactly one",
         "\"clauses\": [|\"clauses\": [7, |/clauses/0|must be an object",
         "\"required\": 0.95|\"required\": 95|/clauses/0/required|such as 0.9 for 90 %",
         "\"required\": 0.95|\"required\": 0|/clauses/0/required|above 0",
@@ -74,7 +75,8 @@ class RulePackFileTest {
         "\"statement\": \"At least 95 %.\"|\"statement\": null|/clauses/0/statement|must be a text",
     })
     void brokenFileNamesThePlace(String from, String to, String pointer, String words) {
-        String broken = GOOD.replace(from, to == null ? "" : to);
+        String change = to == null ? "" : to.replace("SAME", clause("mass")).replace("OTHER", clause("more"));
+        String broken = GOOD.replace(from, change);
         RulePackException refused = assertThrows(RulePackException.class, () -> read(broken));
         assertEquals(1, refused.problems().size(), refused.getMessage());
         Problem problem = refused.problems().get(0);
@@ -83,8 +85,13 @@ class RulePackFileTest {
         assertTrue(problem.text().contains(words), problem.text());
     }
 
+    private static String clause(String id) {
+        return "{\"id\": \"" + id + "\", \"measure\": \"captured-mass\", \"required\": 0.9, \"statement\": \"x\"}";
+    }
+
     @ParameterizedTest
-    @CsvSource(delimiter = '|', quoteCharacter = '`', value = {"{\"id\": }|line 1", "{\"id\": \"a\", \"id\": \"b\"}|line 1", "|is one JSON object",
+    @CsvSource(delimiter = '|', quoteCharacter = '`', value = {"{\"id\": }|line 1", "{\"id\": \"a\", \"id\": \"b\"}|line 1",
+            "|is one JSON object",
         "[]|is one JSON object", "{} {}|line 1"})
     void whatIsNoPackIsRefused(String json, String words) {
         RulePackException refused = assertThrows(RulePackException.class, () -> read(json == null ? "" : json));

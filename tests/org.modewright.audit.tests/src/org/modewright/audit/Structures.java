@@ -175,7 +175,8 @@ final class Structures {
                 } else {
                     boolean corner = i != 4 && i % 2 == 0;
                     s.section("column " + name, corner ? 0.25 : 0.09, corner ? 5e-3 : 7e-4, corner ? 8e-3 : 7e-4, corner ? 9e-3 : 1e-3);
-                    s.with("c" + level + i, "n" + (level - 1) + i, name).mass(name, i == 4 ? 24000 : 9000, i == 4 ? 24000 : 9000, 9000, 0, 0, 0);
+                    s.with("c" + level + i, "n" + (level - 1) + i, name).mass(name, i == 4 ? 24000 : 9000, i == 4 ? 24000 : 9000, 9000, 0,
+                            0, 0);
                 }
             }
         }

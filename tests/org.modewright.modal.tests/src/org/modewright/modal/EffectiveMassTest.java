@@ -30,8 +30,8 @@ class EffectiveMassTest {
 
     /**
      * Uniform cantilever, effective mass over the whole mass in per cent: A. K. Chopra, Dynamics of Structures, distributed-mass systems;
-     * R. D. Blevins, Formulas for Natural Frequency and Mode Shape (1979) (from memory, recomputed). Shares are of the movable mass, so they
-     * are turned back to the whole mass here. With consistent mass the movable mass itself lacks 11.6 % of the first member.
+     * R. D. Blevins, Formulas for Natural Frequency and Mode Shape (1979) (from memory, recomputed). Shares are of the movable mass, so
+     * they are turned back to the whole mass here. With consistent mass the movable mass itself lacks 11.6 % of the first member.
      */
     @Test
     void cantilever() {
@@ -141,9 +141,9 @@ class EffectiveMassTest {
     }
 
     /**
-     * Light appendage tuned to its carrier, mass ratio &mu;: two close modes with about half of the mass each: J. L. Sackman and J. M. Kelly
-     * (1979); T. Igusa and A. Der Kiureghian (1985) (from memory, recomputed). At the smallest ratio the shares of the single modes depend on
-     * the last digits, so there the sum over the pair is compared more sharply than they are.
+     * Light appendage tuned to its carrier, mass ratio &mu;: two close modes with about half of the mass each: J. L. Sackman and J. M.
+     * Kelly (1979); T. Igusa and A. Der Kiureghian (1985) (from memory, recomputed). At the smallest ratio the shares of the single modes
+     * depend on the last digits, so there the sum over the pair is compared more sharply than they are.
      */
     @ParameterizedTest
     @CsvSource({"0.1, 0.8543089536, 1.1705367196, 0.72006303, 1e-8", "0.01, 0.9512492197, 1.0512492197, 0.57441199, 1e-8",
@@ -160,7 +160,9 @@ class EffectiveMassTest {
         assertEquals(Math.sqrt(0.5), Math.abs(carrier), 0.2);
     }
 
-    /** Ring of six equal masses on ring springs: &omega; = 2 sin(r&pi;/6): 0, 1, 1, &radic;3, &radic;3, 2; textbook (Born and von Karman). */
+    /**
+     * Ring of six equal masses on ring springs: &omega; = 2 sin(r&pi;/6): 0, 1, 1, &radic;3, &radic;3, 2; textbook (Born and von Karman).
+     */
     @Test
     void ringOfMassesHasDoubleRoots() {
         Structures structures = new Structures("ring");
@@ -177,7 +179,10 @@ class EffectiveMassTest {
         assertEquals(1, result.modes().get(0).effectiveMassShare(Direction.X), 1e-12);
     }
 
-    /** Rigid block on sway and rocking springs, m = 1, h = 2, I = 0.5, kh = 4, kr = 20: F. E. Richart, R. D. Woods and J. R. Hall; recomputed. */
+    /**
+     * Rigid block on sway and rocking springs, m = 1, h = 2, I = 0.5, kh = 4, kr = 20: F. E. Richart, R. D. Woods and J. R. Hall;
+     * recomputed.
+     */
     @Test
     void swayAndRocking() {
         Structures structures = new Structures("block").node("base", 0, 0, 0).support("base", "uy uz rx rz")
@@ -220,12 +225,15 @@ class EffectiveMassTest {
         s.floor("floor 1", "n10", "n11", "n12", "n13").floor("floor 2", "n20", "n21", "n22", "n23");
         s.mass("n21", 4000, 4000, 4000, 10, 20, 3000).massOffset(0.5, -0.3, 0.2);
         s.mass("n12", 2500, 2500, 0, 0, 0, 0).mass("n03", 700, 700, 700, 0, 0, 0);
-        s.node("mast", 3, 2, 9).node("arm", 3.5, 2, 9).with("mast", "n22", "mast").link("arm", "mast", "arm").mass("arm", 300, 300, 300, 0, 0, 0);
+        s.node("mast", 3, 2, 9).node("arm", 3.5, 2, 9).with("mast", "n22", "mast").link("arm", "mast", "arm").mass("arm", 300, 300, 300,
+                0, 0, 0);
         s.node("tip", 6, 5, 8.5).spring("hanger", "n23", "tip", 1e6, 1e6, 1e6, 2e5, 2e5, 2e5).mass("tip", 50, 50, 50, 0, 0, 0);
         return s;
     }
 
-    /** All modes together hold exactly the movable mass, in six components, whatever constraints, offsets and massless motions there are. */
+    /**
+     * All modes together hold exactly the movable mass, in six components, whatever constraints, offsets and massless motions there are.
+     */
     @Test
     void allModesTogetherHoldAllMass() {
         ModalResult result = everything().allModes();

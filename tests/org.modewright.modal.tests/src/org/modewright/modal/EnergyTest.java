@@ -105,7 +105,8 @@ class EnergyTest {
         softer.model().getSprings().get(0).setUx(2e5 * (1 - STEP));
         double slope = (stiffer.modes(1).modes().get(0).frequency() - softer.modes(1).modes().get(0).frequency()) / (2 * STEP) / frequency;
         assertEquals(0.5 * result.strainShare(0, carrier(result, "stop")), slope, 1e-6);
-        assertEquals(-0.5 * result.kineticShare(0, carrier(result, "b")), (withMass(1 + STEP) - withMass(1 - STEP)) / (2 * STEP) / frequency,
+        assertEquals(-0.5 * result.kineticShare(0, carrier(result, "b")),
+                (withMass(1 + STEP) - withMass(1 - STEP)) / (2 * STEP) / frequency,
                 1e-6);
     }
 
@@ -131,8 +132,8 @@ class EnergyTest {
 
     /**
      * d&lambda;/dk<sub>j</sub> = (&phi;<sub>j</sub> &minus; &phi;<sub>j-1</sub>)&sup2; = share &lambda;/k and d&lambda;/dm<sub>j</sub> =
-     * &minus;&lambda;&phi;<sub>j</sub>&sup2; = &minus;share &lambda;/m: R. L. Fox and M. P. Kapoor, AIAA Journal 6 (1968) 2426-2429; uniform
-     * five-storey frame, k = 100, m = 1, first and fifth mode (from memory, recomputed).
+     * &minus;&lambda;&phi;<sub>j</sub>&sup2; = &minus;share &lambda;/m: R. L. Fox and M. P. Kapoor, AIAA Journal 6 (1968) 2426-2429;
+     * uniform five-storey frame, k = 100, m = 1, first and fifth mode (from memory, recomputed).
      */
     @Test
     void eigenvalueDerivativesOfTheUniformFrame() {
@@ -147,7 +148,8 @@ class EnergyTest {
             for (int storey = 0; storey < 5; storey++) {
                 assertEquals(byStiffness[i][storey],
                         result.strainShare(modes[i], carrier(result, "storey " + (storey + 1))) * eigenvalue / 100, 1e-11);
-                assertEquals(byMass[i][storey], -result.kineticShare(modes[i], carrier(result, "floor " + (storey + 1))) * eigenvalue, 1e-9);
+                assertEquals(byMass[i][storey], -result.kineticShare(modes[i], carrier(result, "floor " + (storey + 1))) * eigenvalue,
+                        1e-9);
             }
         }
     }

@@ -136,7 +136,9 @@ class InstabilityTest {
         }
     }
 
-    /** A mass without rotary inertia that hangs on a translational spring at the mid-point can swing: massive and massless motions mixed. */
+    /**
+     * A mass without rotary inertia that hangs on a translational spring at the mid-point can swing: massive and massless motions mixed.
+     */
     @Test
     void swingingMassIsAMechanism() {
         Structures s = new Structures("swing").node("top", 0, 0, 4).support("top", "ux uy uz rx ry rz").node("bob", 0, 0, 2)
@@ -158,7 +160,10 @@ class InstabilityTest {
         assertEquals(Math.sqrt(1.0 / 1000), 2 * Math.PI * result.modes().get(0).frequency(), 1e-8);
     }
 
-    /** Euler's cantilever: critical load &pi;&sup2;EI/4L&sup2;. Just below it the first frequency is small, above it the stiffness is indefinite. */
+    /**
+     * Euler's cantilever: critical load &pi;&sup2;EI/4L&sup2;. Just below it the first frequency is small, above it the stiffness is
+     * indefinite.
+     */
     private static Structures compressedColumn(double ofCritical) {
         Structures s = steel("column").node("n0", 0, 0, 0).support("n0", "ux uy uz rx ry rz");
         double critical = Math.PI * Math.PI * 2.1e11 * 3e-5 / (4 * 36);

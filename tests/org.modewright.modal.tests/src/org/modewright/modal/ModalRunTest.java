@@ -92,7 +92,8 @@ class ModalRunTest {
     void stopsAtTheLimitAndSaysSo() {
         ModalResult result = run(lateBuilding(), new ModalRequest(0, 0, NINETY_X, 20, 1));
         assertEquals(20, result.modes().size());
-        assertTrue(result.remarks().contains("Stopped at the limit of 20 modes before the target was reached."), result.remarks().toString());
+        assertTrue(result.remarks().contains("Stopped at the limit of 20 modes before the target was reached."), result.remarks()
+                .toString());
         assertFalse(result.isExhausted());
     }
 

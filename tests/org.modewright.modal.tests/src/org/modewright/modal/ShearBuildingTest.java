@@ -128,9 +128,9 @@ class ShearBuildingTest {
     }
 
     /**
-     * Uniform five-storey frame, m = 100 kip/g, k = 31.54 kip/in, g = 386.4 in/s&sup2;: A. K. Chopra, Dynamics of Structures (2nd to 4th ed.),
-     * chapter 13, tables 13.8.1 to 13.8.5 (from memory, recomputed). Printed: periods 2.0, 0.6852, 0.4346, 0.3383, 0.2966 s; effective masses
-     * 4.398, 0.436, 0.121, 0.038, 0.008 m. With g = 386.4 the recomputed second period is 0.68504, 2e-4 off the print.
+     * Uniform five-storey frame, m = 100 kip/g, k = 31.54 kip/in, g = 386.4 in/s&sup2;: A. K. Chopra, Dynamics of Structures (2nd to 4th
+     * ed.), chapter 13, tables 13.8.1 to 13.8.5 (from memory, recomputed). Printed: periods 2.0, 0.6852, 0.4346, 0.3383, 0.2966 s;
+     * effective masses 4.398, 0.436, 0.121, 0.038, 0.008 m. With g = 386.4 the recomputed second period is 0.68504, 2e-4 off the print.
      */
     @Test
     void fiveStoreysOfTheTextbook() {
@@ -148,8 +148,8 @@ class ShearBuildingTest {
     }
 
     /**
-     * The same frame in a student's solution after Chopra with shapes rounded to three decimals: effective masses 87.94 % and 8.74 %. Rounded
-     * shapes cost 0.3 % of the second.
+     * The same frame in a student's solution after Chopra with shapes rounded to three decimals: effective masses 87.94 % and 8.74 %.
+     * Rounded shapes cost 0.3 % of the second.
      */
     @Test
     void fiveStoreysOfTheExercise() {
@@ -218,8 +218,8 @@ class ShearBuildingTest {
     }
 
     /**
-     * Eight-storey block: floor weights in tonf, storey stiffness in tonf/cm, g = 981 cm/s&sup2;: inputs read in a report of the Universidad
-     * Nacional Pedro Ruiz Gallo, "Analisis sismico dinamico 2018-I"; results recomputed.
+     * Eight-storey block: floor weights in tonf, storey stiffness in tonf/cm, g = 981 cm/s&sup2;: inputs read in a report of the
+     * Universidad Nacional Pedro Ruiz Gallo, "Analisis sismico dinamico 2018-I"; results recomputed.
      */
     @Test
     void eightStoreysOfTheReport() {
@@ -266,7 +266,10 @@ class ShearBuildingTest {
         assertEquals(16.287495601168374, result.modes().get(3).frequency(), 1e-10);
     }
 
-    /** The participation ratio of a uniform chain is (2N + 1)/3 in every mode: R. J. Bell and P. Dean, Discuss. Faraday Soc. 50 (1970) 55-61. */
+    /**
+     * The participation ratio of a uniform chain is (2N + 1)/3 in every mode: R. J. Bell and P. Dean, Discuss. Faraday Soc. 50 (1970)
+     * 55-61.
+     */
     @ParameterizedTest
     @ValueSource(ints = {2, 3, 5, 10})
     void spreadOfTheUniformChain(int storeys) {
@@ -294,8 +297,8 @@ class ShearBuildingTest {
     }
 
     /**
-     * A light appendage (m = 0.01, k = 0.35) on floor 3 of the uniform five-storey frame (m = 1, k = 100): own case, recomputed. The second mode
-     * is the appendage's own, with 99.5 % of the kinetic energy.
+     * A light appendage (m = 0.01, k = 0.35) on floor 3 of the uniform five-storey frame (m = 1, k = 100): own case, recomputed. The
+     * second mode is the appendage's own, with 99.5 % of the kinetic energy.
      */
     @Test
     void appendageHoldsTheKineticEnergyOfItsMode() {
