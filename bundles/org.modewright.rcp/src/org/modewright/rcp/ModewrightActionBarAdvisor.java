@@ -4,12 +4,8 @@ import org.eclipse.jface.action.GroupMarker;
 import org.eclipse.jface.action.ICoolBarManager;
 import org.eclipse.jface.action.IMenuManager;
 import org.eclipse.jface.action.IStatusLineManager;
-import org.eclipse.jface.action.IToolBarManager;
 import org.eclipse.jface.action.MenuManager;
 import org.eclipse.jface.action.Separator;
-import org.eclipse.jface.action.ToolBarContributionItem;
-import org.eclipse.jface.action.ToolBarManager;
-import org.eclipse.swt.SWT;
 import org.eclipse.ui.ISharedImages;
 import org.eclipse.ui.IWorkbenchActionConstants;
 import org.eclipse.ui.IWorkbenchWindow;
@@ -61,12 +57,7 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
 
     @Override
     protected void fillCoolBar(ICoolBarManager bar) {
-        IToolBarManager tools = new ToolBarManager(SWT.FLAT | SWT.RIGHT);
-        add(tools, ActionFactory.SAVE);
-        tools.add(new Separator("history"));
-        add(tools, ActionFactory.UNDO);
-        add(tools, ActionFactory.REDO);
-        bar.add(new ToolBarContributionItem(tools, "org.modewright.rcp.toolbar.main"));
+        bar.add(new GroupMarker(IWorkbenchActionConstants.GROUP_FILE));
         bar.add(new GroupMarker(IWorkbenchActionConstants.MB_ADDITIONS));
     }
 
@@ -89,9 +80,6 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
         menu.add(new Separator());
         add(menu, ActionFactory.REFRESH, ActionFactory.PROPERTIES);
         menu.add(new GroupMarker(IWorkbenchActionConstants.MB_ADDITIONS));
-        menu.add(new Separator());
-        menu.add(ContributionItemFactory.REOPEN_EDITORS.create(window));
-        menu.add(new GroupMarker(IWorkbenchActionConstants.MRU));
         menu.add(new Separator());
         add(menu, ActionFactory.QUIT);
         menu.add(new GroupMarker(IWorkbenchActionConstants.FILE_END));
@@ -148,10 +136,6 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
         for (ActionFactory factory : factories) {
             menu.add(action(factory));
         }
-    }
-
-    private void add(IToolBarManager tools, ActionFactory factory) {
-        tools.add(action(factory));
     }
 
     private IWorkbenchAction action(ActionFactory factory) {

@@ -7,6 +7,8 @@ import org.eclipse.core.runtime.IAdaptable;
 import org.eclipse.core.runtime.ILog;
 import org.eclipse.core.runtime.IStatus;
 import org.eclipse.core.runtime.NullProgressMonitor;
+import org.eclipse.jface.preference.IPreferenceNode;
+import org.eclipse.jface.preference.PreferenceManager;
 import org.eclipse.ui.application.IWorkbenchConfigurer;
 import org.eclipse.ui.application.IWorkbenchWindowConfigurer;
 import org.eclipse.ui.application.WorkbenchAdvisor;
@@ -44,6 +46,20 @@ final class ModewrightWorkbenchAdvisor extends WorkbenchAdvisor {
     @Override
     public IAdaptable getDefaultPageInput() {
         return ResourcesPlugin.getWorkspace().getRoot();
+    }
+
+    @Override
+    public void postStartup() {
+        keepKeysPage(getWorkbenchConfigurer().getWorkbench().getPreferenceManager());
+    }
+
+    /** The page of key bindings stands in a branch of the platform's preferences that the product does not show. */
+    private static void keepKeysPage(PreferenceManager preferences) {
+        IPreferenceNode general = preferences.find("org.eclipse.ui.preferencePages.Workbench");
+        IPreferenceNode keys = general == null ? null : general.remove("org.eclipse.ui.preferencePages.Keys");
+        if (keys != null) {
+            preferences.addToRoot(keys);
+        }
     }
 
     @Override

@@ -14,14 +14,14 @@ public final class AuditPerspective implements IPerspectiveFactory {
     @Override
     public void createInitialLayout(IPageLayout layout) {
         String editor = layout.getEditorArea();
-        IFolderLayout bottom = layout.createFolder("bottom", IPageLayout.BOTTOM, 0.62f, editor);
+        IFolderLayout bottom = layout.createFolder("bottom", IPageLayout.BOTTOM, 0.57f, editor);
         bottom.addView(UiIds.MODES_VIEW);
         bottom.addView(IPageLayout.ID_PROBLEM_VIEW);
         bottom.addPlaceholder(IPageLayout.ID_PROGRESS_VIEW);
         layout.createFolder("bottomRight", IPageLayout.RIGHT, 0.63f, "bottom").addView(UiIds.CAPTURE_VIEW);
         layout.createFolder("left", IPageLayout.LEFT, 0.19f, editor).addView(UiIds.EXPLORER);
-        layout.createFolder("leftBottom", IPageLayout.BOTTOM, 0.42f, "left").addView(IPageLayout.ID_OUTLINE);
-        IFolderLayout right = layout.createFolder("right", IPageLayout.RIGHT, 0.545f, editor);
+        layout.createFolder("leftBottom", IPageLayout.BOTTOM, 0.5f, "left").addView(IPageLayout.ID_OUTLINE);
+        IFolderLayout right = layout.createFolder("right", IPageLayout.RIGHT, 0.53f, editor);
         right.addView(UiIds.SHAPE_VIEW);
         layout.createFolder("rightBottom", IPageLayout.BOTTOM, 0.56f, "right").addView(UiIds.DOMINANCE_VIEW);
         addShortcuts(layout);

@@ -82,6 +82,12 @@ public final class SentenceBar extends Composite {
         relayout();
     }
 
+    /** What a click on the sentence does. */
+    public void onClick(Runnable action) {
+        sentence.setCursor(getDisplay().getSystemCursor(SWT.CURSOR_HAND));
+        sentence.addListener(SWT.MouseUp, event -> action.run());
+    }
+
     /** The sentence shown. */
     public String sentence() {
         return sentence.getText().replace("&&", "&");

@@ -37,9 +37,10 @@ public final class RunFormat {
 
     /** Writes a run atomically. */
     public static void write(StoredRun run, Path target) throws IOException {
-        Path scratch = Files.createTempFile(target.getParent(), ".run", ".part");
+        Path scratch = target.resolveSibling('.' + target.getFileName().toString() + ".part");
         try {
-            try (FileChannel channel = FileChannel.open(scratch, StandardOpenOption.WRITE)) {
+            try (FileChannel channel = FileChannel.open(scratch, StandardOpenOption.CREATE, StandardOpenOption.TRUNCATE_EXISTING,
+                    StandardOpenOption.WRITE)) {
                 OutputStream out = new BufferedOutputStream(Channels.newOutputStream(channel), 1 << 16);
                 write(run, out);
                 out.flush();

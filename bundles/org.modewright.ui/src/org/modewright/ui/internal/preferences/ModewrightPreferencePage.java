@@ -96,8 +96,11 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
         browse.setText(Messages.Preferences_browse);
         browse.addListener(SWT.Selection, event -> browse());
         label(area, Messages.Preferences_threads);
-        threads = spinner(area, 0, 256);
-        label(area, Messages.Preferences_threadsNote);
+        Composite number = new Composite(area, SWT.NONE);
+        GridLayoutFactory.fillDefaults().numColumns(2).spacing(8, 0).applyTo(number);
+        GridDataFactory.fillDefaults().span(2, 1).applyTo(number);
+        threads = spinner(number, 0, 256);
+        label(number, Messages.Preferences_threadsNote);
     }
 
     private void createAnimation(Composite area) {

@@ -9,8 +9,8 @@ import org.eclipse.ui.IWorkbenchWizard;
 /** Opens wizards from commands and links. */
 public final class Wizards {
 
-    private static final int WIDTH = 640;
-    private static final int HEIGHT = 460;
+    private static final int WIDTH = 660;
+    private static final int HEIGHT = 380;
 
     private Wizards() {
     }
