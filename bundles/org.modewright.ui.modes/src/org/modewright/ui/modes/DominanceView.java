@@ -28,6 +28,7 @@ import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.EmptyState;
 import org.modewright.ui.widgets.SentenceBar;
 import org.modewright.ui.widgets.SessionPage;
+import org.modewright.ui.widgets.TextCopy;
 
 /** What makes a mode so? A sentence, then the elements ranked by energy; and the other way round, the modes of the selected elements. */
 public final class DominanceView extends ViewPart {

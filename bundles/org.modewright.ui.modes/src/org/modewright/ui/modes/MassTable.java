@@ -12,6 +12,7 @@ import org.modewright.fem.MassLedger;
 import org.modewright.fem.MassSource;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.Numbers;
+import org.modewright.ui.widgets.TextCopy;
 
 /** The masses by source: per direction what can move and, apart from it, what sits on supports. */
 final class MassTable {

@@ -20,6 +20,7 @@ import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.DirectionColours;
+import org.modewright.ui.widgets.TextCopy;
 import org.modewright.ui.widgets.ThemeColours;
 
 /** The table of modes: virtual, sorted by a click on a header, with a bar in each cell of mass and signs that say why. */
