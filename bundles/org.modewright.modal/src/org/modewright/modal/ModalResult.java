@@ -54,6 +54,28 @@ public final class ModalResult {
         seconds = Collections.unmodifiableMap(new LinkedHashMap<>(builder.seconds));
     }
 
+    private ModalResult(ModalResult other, String stage, double spent) {
+        modelName = other.modelName;
+        memberCount = other.memberCount;
+        panelCount = other.panelCount;
+        freeDofs = other.freeDofs;
+        nodes = other.nodes;
+        carriers = other.carriers;
+        mass = other.mass;
+        planCoupling = other.planCoupling;
+        certificate = other.certificate;
+        exhausted = other.exhausted;
+        modes = other.modes;
+        shapes = other.shapes;
+        strain = other.strain;
+        kinetic = other.kinetic;
+        instabilities = other.instabilities;
+        remarks = other.remarks;
+        Map<String, Double> more = new LinkedHashMap<>(other.seconds);
+        more.put(stage, spent);
+        seconds = Collections.unmodifiableMap(more);
+    }
+
     /** A builder of a result, for the run and for whoever reads a stored one. */
     public static Builder builder() {
         return new Builder();
@@ -211,14 +233,7 @@ public final class ModalResult {
 
     /** The same result with the seconds of one more stage. */
     public ModalResult withSeconds(String stage, double spent) {
-        Builder builder = builder().model(modelName, memberCount, panelCount, freeDofs).nodes(nodes).carriers(carriers)
-                .mass(mass, planCoupling).certificate(certificate, exhausted).instabilities(instabilities);
-        for (int i = 0; i < modes.size(); i++) {
-            builder.mode(modes.get(i), shapes[i], strain.row(i), kinetic.row(i));
-        }
-        remarks.forEach(builder::remark);
-        seconds.forEach(builder::seconds);
-        return builder.seconds(stage, spent).build();
+        return new ModalResult(this, stage, spent);
     }
 
     /** Collects a result. */

@@ -16,7 +16,7 @@ class CharacterTest {
      * A frame building of so many bays in X and Y and storeys, columns bending in X with one second moment and in Y with another, floors
      * rigid and loaded.
      */
-    private static Structures building(int storeys, double iy, double iz) {
+    static Structures building(int storeys, double iy, double iz) {
         Structures s = new Structures("building").material("concrete", 3e10, 0.2, 2500).section("column", 0.16, iy, iz, 1e-3);
         for (int level = 0; level <= storeys; level++) {
             for (int i = 0; i < 9; i++) {

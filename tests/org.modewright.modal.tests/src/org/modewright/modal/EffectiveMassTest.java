@@ -31,7 +31,7 @@ class EffectiveMassTest {
     /**
      * Uniform cantilever, effective mass over the whole mass in per cent: A. K. Chopra, Dynamics of Structures, distributed-mass systems;
      * R. D. Blevins, Formulas for Natural Frequency and Mode Shape (1979) (from memory, recomputed). Shares are of the movable mass, so
-     * they are turned back to the whole mass here. With consistent mass the movable mass itself lacks 11.6 % of the first member.
+     * they are turned back to the whole mass here. With consistent mass the movable mass lacks 264/420 of the first member.
      */
     @Test
     void cantilever() {

@@ -11,6 +11,10 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.modewright.fem.Assembly;
 import org.modewright.numerics.CancelledException;
+import org.modewright.numerics.EigenPairs;
+import org.modewright.numerics.EigenProblem;
+import org.modewright.numerics.EigenRequest;
+import org.modewright.numerics.EigenSolvers;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SymmetricMatrix;
 
@@ -177,6 +181,31 @@ class ModalRunTest {
             }
             assertEquals(1, sum, 1e-12);
         }
+    }
+
+    /** Above some hundred degrees of freedom the sparse solver takes over: the same modes as the dense reference gives. */
+    @Test
+    void sparseRunAgreesWithTheDenseReference() {
+        Structures structures = CharacterTest.building(14, 2e-3, 4e-3);
+        structures.model().getRigidFloors().clear();
+        Assembly assembly = Assembly.of(structures.snapshot(), Progress.NONE);
+        assertTrue(assembly.freeDofs() > 600);
+        ModalResult result = ModalRun.run(assembly, ModalRequest.ofModes(20), Progress.NONE);
+        EigenPairs reference = EigenSolvers.dense().open(new EigenProblem(assembly.stiffness(), assembly.mass()), Progress.NONE)
+                .solve(EigenRequest.lowest(20), Progress.NONE);
+        double[] alongX = assembly.massTimesRigid(0, assembly.ledger().centre());
+        double captured = 0;
+        for (int mode = 0; mode < 20; mode++) {
+            assertEquals(reference.values()[mode], result.modes().get(mode).eigenvalue(), 1e-9 * reference.values()[mode]);
+            double participation = 0;
+            for (int i = 0; i < alongX.length; i++) {
+                participation += alongX[i] * reference.vectors()[mode][i];
+            }
+            captured += participation * participation / assembly.ledger().movable()[0];
+        }
+        assertEquals(captured, result.capture(Direction.X), 1e-9);
+        assertTrue(result.certificate().complete(), result.certificate().line());
+        assertTrue(result.certificate().worstOrthogonality() < 1e-12);
     }
 
     @Test
