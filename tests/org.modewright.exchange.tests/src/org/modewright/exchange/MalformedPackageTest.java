@@ -79,6 +79,8 @@ class MalformedPackageTest {
                 fault("rigid_floors.csv", "F1,N3", "F1,N33", 3, "node", "N33", "no node"),
                 fault("rigid_links.csv", "L1,N2,N3", "L1,N2,N2", 2, "to", "N2", "to itself"),
                 fault("rigid_links.csv", "ux uy", "ux,uy", 2, "5", "uy", "more cells than the header"),
+                fault("levels.csv", "first,3", "fi\u0007rst,3", 2, "id", "fi\u0007rst", "control character"),
+                fault("datapackage.json", "A portal", "A\\u0007portal", 0, "title", "A\u0007portal", "control character"),
                 fault("levels.csv", "first,3", "first,", 2, "elevation", "", "blank"),
                 fault("gravity_loads.csv", "dead,member,M2", "dead,member,M9", 2, "target", "M9", "no member"),
                 fault("gravity_loads.csv", "dead,member,M2", "dead,panel,P1", 2, "kind", "panel", "not yet supported"),

@@ -7,11 +7,11 @@ import java.util.function.Function;
 import java.util.stream.Collectors;
 
 import org.modewright.audit.AuditResult;
+import org.modewright.audit.AuditStatus;
 import org.modewright.audit.Finding;
 import org.modewright.audit.Verdict;
 import org.modewright.modal.Direction;
 import org.modewright.modal.Figures;
-import org.modewright.modal.Instability;
 
 /** The result of an audit as a page of plain text, the verdict first. */
 final class CheckReport {
@@ -35,13 +35,19 @@ final class CheckReport {
         text.head(input, result.modal());
         out.println();
         out.println(verdict() + "  " + result.summary());
-        unstable();
-        capture();
+        boolean unstable = result.status() == AuditStatus.UNSTABLE;
+        if (unstable) {
+            findings();
+        } else {
+            capture();
+        }
         text.certificate(result.modal().certificate());
         text.mass(result.modal().mass());
         text.modes(result.modal());
         text.remarks(result.modal().remarks());
-        findings();
+        if (!unstable) {
+            findings();
+        }
         out.println();
         out.println(Caution.TEXT);
     }
@@ -55,16 +61,7 @@ final class CheckReport {
         };
     }
 
-    private void unstable() {
-        for (Instability instability : result.modal().instabilities()) {
-            wrap("  ", instability.text() + " " + instability.remedy());
-        }
-    }
-
     private void capture() {
-        if (result.modal().modes().isEmpty()) {
-            return;
-        }
         Map<Direction, Verdict> verdicts = result.verdicts().stream().collect(Collectors.toMap(Verdict::direction, Function.identity()));
         out.println();
         String pack = result.verdicts().isEmpty() ? "" : " (rule pack " + result.verdicts().get(0).rulePack() + ")";

@@ -86,6 +86,10 @@ final class ModalText {
     private void modes(ModalResult result, int most) {
         int shown = Math.min(most, result.modes().size());
         out.println();
+        if (shown == 0) {
+            out.println("Modes: none");
+            return;
+        }
         out.println(shown < result.modes().size() ? "Modes (the first " + shown + " of " + result.modes().size() + ")"
                 : "Modes (" + shown + ")");
         TextTable table = new TextTable(">mode", ">period (s)", ">frequency (Hz)", ">X", ">Y", ">Z", ">sum X", ">sum Y", ">sum Z",

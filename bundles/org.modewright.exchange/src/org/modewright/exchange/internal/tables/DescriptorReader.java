@@ -210,6 +210,8 @@ final class DescriptorReader {
         JsonNode value = root.path(property);
         if (!value.isMissingNode() && !value.isNull() && !value.isTextual()) {
             fault(property, plain(value), "this must be text");
+        } else if (value.isTextual() && !PlainText.isStorable(value.asText())) {
+            fault(property, value.asText(), "the text holds a control character; remove it");
         }
         return value.isTextual() ? value.asText() : null;
     }

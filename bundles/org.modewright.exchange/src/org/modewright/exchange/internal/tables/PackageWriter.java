@@ -1,9 +1,11 @@
 package org.modewright.exchange.internal.tables;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 import org.modewright.model.structure.FrameSection;
 import org.modewright.model.structure.GravityLoad;
@@ -27,6 +29,7 @@ public final class PackageWriter {
     private final List<String> warnings = new ArrayList<>();
     private final PackageNames names = new PackageNames(warnings);
     private final Map<TableSchema, TableText> tables = new LinkedHashMap<>();
+    private final Set<String> springIds = new HashSet<>();
 
     private PackageWriter(StructuralModel model) {
         this.model = model;
@@ -63,6 +66,7 @@ public final class PackageWriter {
         model.getMaterials().forEach(this::material);
         model.getFrameSections().forEach(this::section);
         model.getMembers().forEach(this::member);
+        model.getSprings().forEach(spring -> springIds.add(names.of(spring)));
         model.getSprings().forEach(this::spring);
         model.getSupports().forEach(this::support);
         model.getMasses().forEach(this::mass);
@@ -135,14 +139,10 @@ public final class PackageWriter {
 
     private String freeSpringId(String wanted) {
         String id = wanted;
-        for (int i = 2; isSpring(id); i++) {
+        for (int i = 2; !springIds.add(id); i++) {
             id = wanted + " (" + i + ")";
         }
         return id;
-    }
-
-    private boolean isSpring(String id) {
-        return model.getSprings().stream().anyMatch(spring -> names.of(spring).equals(id));
     }
 
     private void mass(NodalMass mass) {

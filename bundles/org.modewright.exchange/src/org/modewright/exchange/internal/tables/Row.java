@@ -65,7 +65,11 @@ final class Row {
 
     /** An id or a reference, with the spreadsheet escape undone; empty where the cell is blank. */
     String id(String column) {
-        return SpreadsheetText.unescape(cell(column));
+        String id = SpreadsheetText.unescape(cell(column));
+        if (!PlainText.isStorable(id)) {
+            problem(column, "the cell holds a control character; remove it");
+        }
+        return id;
     }
 
     /** An id that must be there; null, with a problem, where it is not. */
