@@ -24,5 +24,31 @@ public interface Factoriser {
      *
      * @param factorisation made by this factoriser
      */
-    double[][] nullVectors(Factorisation factorisation);
+    default double[][] nullVectors(Factorisation factorisation) {
+        double[][] vectors = new double[factorisation.zeroPivots().length][];
+        for (int z = 0; z < vectors.length; z++) {
+            vectors[z] = nullVector(factorisation, z);
+        }
+        return vectors;
+    }
+
+    /**
+     * One of the null vectors, where all of them would take too much memory.
+     *
+     * @param factorisation made by this factoriser
+     * @param index which of the zero pivots
+     */
+    default double[] nullVector(Factorisation factorisation, int index) {
+        double[] weights = new double[factorisation.zeroPivots().length];
+        weights[index] = 1.0;
+        return nullVector(factorisation, weights);
+    }
+
+    /**
+     * A combination of the null vectors.
+     *
+     * @param factorisation made by this factoriser
+     * @param weights component at each zero pivot
+     */
+    double[] nullVector(Factorisation factorisation, double[] weights);
 }

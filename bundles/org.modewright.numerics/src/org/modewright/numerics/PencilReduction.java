@@ -1,6 +1,8 @@
 package org.modewright.numerics;
 
 import java.util.Arrays;
+import java.util.Random;
+import java.util.function.IntFunction;
 
 /**
  * Takes the motions with neither stiffness nor mass out of K &phi; = &lambda; M &phi;: the common null space of K and M, which is the
@@ -15,17 +17,19 @@ public final class PencilReduction {
 
     private static final int ATTEMPTS = 4;
     private static final double NEGLIGIBLE_MASS = 1e-10;
+    private static final long SEED = 97L;
 
     private final EigenProblem original;
     private final int[] dropped;
-    private final double[][] nullVectors;
+    private final IntFunction<double[]> nullVector;
+    private double[][] nullVectors;
     private final int[] kept;
     private final EigenProblem reduced;
 
-    private PencilReduction(EigenProblem original, int[] dropped, double[][] nullVectors) {
+    private PencilReduction(EigenProblem original, int[] dropped, IntFunction<double[]> nullVector) {
         this.original = original;
         this.dropped = dropped;
-        this.nullVectors = nullVectors;
+        this.nullVector = nullVector;
         this.kept = complement(original.order(), dropped);
         this.reduced = dropped.length == 0 ? original
                 : new EigenProblem(restrict(original.stiffness(), kept), restrict(original.mass(), kept));
@@ -52,22 +56,20 @@ public final class PencilReduction {
      */
     public static PencilReduction of(EigenProblem problem, Factoriser factoriser, Progress progress) {
         double balance = balance(problem);
-        int[] fewest = null;
-        double[][] vectors = null;
+        Factorisation best = null;
         for (int attempt = 0; attempt < ATTEMPTS; attempt++) {
             // An indefinite K may cancel the mass for one weight by accident, but not for several.
             double weight = balance * Math.pow(1.7, attempt);
             Factorisation factorisation = factoriser.factorise(problem.stiffness(), problem.mass(), -weight, progress);
-            int[] zeroPivots = factorisation.zeroPivots();
-            if (fewest == null || zeroPivots.length < fewest.length) {
-                fewest = zeroPivots;
-                vectors = factoriser.nullVectors(factorisation);
+            if (best == null || factorisation.inertia().zero() < best.inertia().zero()) {
+                best = factorisation;
             }
-            if (withoutMass(problem.mass(), vectors)) {
+            if (best.inertia().zero() == 0 || isWithoutMass(problem.mass(), factoriser, best)) {
                 break;
             }
         }
-        return new PencilReduction(problem, fewest, vectors);
+        Factorisation chosen = best;
+        return new PencilReduction(problem, chosen.zeroPivots(), index -> factoriser.nullVector(chosen, index));
     }
 
     /** Geometric mean of the ratios of the diagonals, so that neither matrix hides the other. */
@@ -85,18 +87,16 @@ public final class PencilReduction {
         return count == 0 ? 1.0 : Math.exp(sum / count);
     }
 
-    private static boolean withoutMass(SymmetricMatrix mass, double[][] vectors) {
+    /** A random combination of the motions has no mass only if none of them has. */
+    private static boolean isWithoutMass(SymmetricMatrix mass, Factoriser factoriser, Factorisation factorisation) {
+        double[] weights = new Random(SEED).doubles(factorisation.inertia().zero(), 0.5, 1.5).toArray();
+        double[] motion = factoriser.nullVector(factorisation, weights);
         double[] diagonal = mass.diagonal();
-        for (double[] vector : vectors) {
-            double reference = 0.0;
-            for (int i = 0; i < vector.length; i++) {
-                reference += diagonal[i] * vector[i] * vector[i];
-            }
-            if (mass.quadratic(vector) > NEGLIGIBLE_MASS * reference) {
-                return false;
-            }
+        double reference = 0.0;
+        for (int i = 0; i < motion.length; i++) {
+            reference += diagonal[i] * motion[i] * motion[i];
         }
-        return true;
+        return mass.quadratic(motion) <= NEGLIGIBLE_MASS * reference;
     }
 
     private static int[] complement(int order, int[] dropped) {
@@ -150,9 +150,21 @@ public final class PencilReduction {
         return kept.clone();
     }
 
-    /** The motions, one per dropped degree of freedom and in their order: 1 at its own, 0 at the others. */
-    public double[][] nullVectors() {
+    /** All the motions, one per dropped degree of freedom and in their order: 1 at its own, 0 at the others. Computed by the first call. */
+    public synchronized double[][] nullVectors() {
+        if (nullVectors == null) {
+            double[][] vectors = new double[dropped.length][];
+            for (int i = 0; i < vectors.length; i++) {
+                vectors[i] = nullVector(i);
+            }
+            nullVectors = vectors;
+        }
         return nullVectors;
+    }
+
+    /** One of the motions, where all of them would take too much memory. */
+    public double[] nullVector(int index) {
+        return nullVector.apply(index);
     }
 
     /** The problem without the dropped degrees of freedom; the original one if there is nothing to drop. */

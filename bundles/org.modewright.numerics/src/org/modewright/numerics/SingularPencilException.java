@@ -11,7 +11,7 @@ public final class SingularPencilException extends RuntimeException {
     /**
      * Names the motions.
      *
-     * @param nullVectors one vector per motion, of length n
+     * @param nullVectors one vector per motion, of length n; of the first ones if there are many
      * @param degreesOfFreedom for each motion the degree of freedom where its component is 1
      */
     public SingularPencilException(double[][] nullVectors, int[] degreesOfFreedom) {
@@ -21,7 +21,7 @@ public final class SingularPencilException extends RuntimeException {
         this.degreesOfFreedom = degreesOfFreedom;
     }
 
-    /** One vector per motion, of length n. */
+    /** One vector per motion, of length n; of the first hundred motions if there are more. */
     public double[][] nullVectors() {
         return nullVectors;
     }

@@ -16,18 +16,18 @@ class StiffnessNullSpaceTest {
     private static int motions(SymmetricMatrix stiffness) {
         StiffnessNullSpace space = StiffnessNullSpace.of(stiffness, Progress.NONE);
         assertEquals(0, space.inertia().negative());
-        for (int z = 0; z < space.vectors().length; z++) {
-            double[] vector = space.vectors()[z];
+        for (int z = 0; z < space.count(); z++) {
+            double[] vector = space.vector(z);
             assertEquals(1.0, vector[space.degreesOfFreedom()[z]]);
             assertNoForce(stiffness, vector);
             for (int other = 0; other < z; other++) {
                 assertEquals(0.0, vector[space.degreesOfFreedom()[other]]);
             }
         }
-        return space.vectors().length;
+        return space.count();
     }
 
-    /** |K z| must be round-off of |K||z|: by the rule 16 eps in energy, so the root of that in the worst row, and far less in the mean. */
+    /** The rule bounds the energy by some 16 eps of |z||K||z|, so the forces by the root of that at worst; for these, by far less. */
     private static void assertNoForce(SymmetricMatrix stiffness, double[] vector) {
         double[] force = stiffness.multiply(vector);
         double[] size = sizes(stiffness, vector);

@@ -20,6 +20,8 @@ final class ShiftedProblem {
 
     private static final int SCALE_ITERATIONS = 8;
     private static final int SHIFT_ATTEMPTS = 60;
+    private static final int NAMED_MOTIONS = 100;
+    private static final int REMOVED_MOTIONS = 200;
     private static final long SEED = 4711L;
 
     private final EigenProblem problem;
@@ -75,7 +77,12 @@ final class ShiftedProblem {
     private void refuseCommonNullVectors(Progress progress) {
         PencilReduction reduction = PencilReduction.of(problem, factoriser, progress);
         if (!reduction.isEmpty()) {
-            throw new SingularPencilException(reduction.nullVectors(), reduction.droppedDegreesOfFreedom());
+            int[] degreesOfFreedom = reduction.droppedDegreesOfFreedom();
+            double[][] vectors = new double[Math.min(degreesOfFreedom.length, NAMED_MOTIONS)][];
+            for (int i = 0; i < vectors.length; i++) {
+                vectors[i] = reduction.nullVector(i);
+            }
+            throw new SingularPencilException(vectors, degreesOfFreedom);
         }
     }
 
@@ -115,7 +122,9 @@ final class ShiftedProblem {
      * the largest ratio of the diagonals, which is all there is where nothing deforms.
      */
     private double scale(Factorisation held, Progress progress) {
-        double[][] motions = massOrthonormal(factoriser.nullVectors(held), progress);
+        // So many mechanisms are no structure to be tuned for; they would fill the memory.
+        double[][] motions = stiffnessZeros > REMOVED_MOTIONS ? new double[0][]
+                : massOrthonormal(factoriser.nullVectors(held), progress);
         double[] x = new Random(SEED).doubles(problem.order(), -1.0, 1.0).toArray();
         double flexibility = 0.0;
         for (int iteration = 0; iteration < SCALE_ITERATIONS; iteration++) {

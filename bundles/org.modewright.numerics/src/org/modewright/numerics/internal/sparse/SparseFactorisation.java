@@ -171,22 +171,18 @@ final class SparseFactorisation implements Factorisation {
         }
     }
 
-    /** Null vector for each zero pivot: 1 there, 0 at the other zero pivots. */
-    double[][] nullVectors() {
-        int[] position = symbolic.position();
-        double[][] vectors = new double[zeroPivots.length][];
+    /** The null vector with given components at the zero pivots. */
+    double[] nullVector(double[] weights) {
+        double[] x = new double[order()];
         for (int z = 0; z < zeroPivots.length; z++) {
-            double[] x = new double[order()];
-            int own = position[zeroPivots[z]];
-            x[own] = 1.0;
-            // The columns of L at vanished pivots are zero, so the back substitution leaves their components as they are.
-            backward(x);
-            double[] vector = new double[order()];
-            permuteBackAndScale(x, vector);
-            VectorScaling.toUnit(vector, zeroPivots[z]);
-            vectors[z] = vector;
+            int position = symbolic.position()[zeroPivots[z]];
+            x[position] = weights[z] / scale[position];
         }
-        return vectors;
+        // The columns of L at vanished pivots are zero, so the back substitution leaves their components as they are.
+        backward(x);
+        double[] vector = new double[order()];
+        permuteBackAndScale(x, vector);
+        return vector;
     }
 
     /** The product of the factors, for a vector: S<sup>-1</sup> L D L<sup>T</sup> S<sup>-1</sup> x. */

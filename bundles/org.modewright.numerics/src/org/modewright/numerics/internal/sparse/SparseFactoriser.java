@@ -122,11 +122,11 @@ public final class SparseFactoriser implements Factoriser {
     }
 
     @Override
-    public double[][] nullVectors(Factorisation factorisation) {
+    public double[] nullVector(Factorisation factorisation, double[] weights) {
         if (!(factorisation instanceof SparseFactorisation sparse) || sparse.symbolic() != symbolic) {
             throw new IllegalArgumentException("The factorisation was made by another factoriser.");
         }
-        return sparse.nullVectors();
+        return sparse.nullVector(weights);
     }
 
     /** Nonzeros of the factor, the diagonal included. */
