@@ -93,64 +93,20 @@ public final class MatrixAssembler {
     }
 
     private void addTransformed(int[] places, boolean[] active, double[] packed, SymmetricMatrix.Builder builder) {
-        int[] unknowns = unknowns(places, active);
+        ElementTransformation own = ElementTransformation.of(transformation, places, active);
+        int[] unknowns = own.unknowns();
         int count = unknowns.length;
-        double[] rows = new double[places.length * count];
-        for (int i = 0; i < places.length; i++) {
-            for (int p = transformation.rowStart(places[i]); active[i] && p < transformation.rowStart(places[i] + 1); p++) {
-                rows[i * count + Arrays.binarySearch(unknowns, transformation.unknownAt(p))] = transformation.factorAt(p);
-            }
-        }
-        double[] product = product(places.length, packed, rows, count);
+        double[] product = own.times(packed);
         for (int a = 0; a < count; a++) {
             for (int b = 0; b <= a; b++) {
                 double value = 0.0;
                 for (int i = 0; i < places.length; i++) {
-                    value += rows[i * count + a] * product[i * count + b];
+                    value += own.rows()[i * count + a] * product[i * count + b];
                 }
                 if (value != 0.0) {
                     builder.add(unknowns[a], unknowns[b], value);
                 }
             }
-        }
-    }
-
-    private int[] unknowns(int[] places, boolean[] active) {
-        int[] found = new int[places.length];
-        int count = 0;
-        for (int i = 0; i < places.length; i++) {
-            for (int p = transformation.rowStart(places[i]); active[i] && p < transformation.rowStart(places[i] + 1); p++) {
-                if (count == found.length) {
-                    found = Arrays.copyOf(found, 2 * count);
-                }
-                found[count++] = transformation.unknownAt(p);
-            }
-        }
-        return Arrays.stream(found, 0, count).sorted().distinct().toArray();
-    }
-
-    /** k T, the element's matrix packed and its rows of T full. */
-    private static double[] product(int order, double[] packed, double[] rows, int count) {
-        double[] product = new double[order * count];
-        int place = 0;
-        for (int i = 0; i < order; i++) {
-            for (int j = 0; j <= i; j++) {
-                double value = packed[place++];
-                if (value == 0.0) {
-                    continue;
-                }
-                addRow(product, i, value, rows, j, count);
-                if (i != j) {
-                    addRow(product, j, value, rows, i, count);
-                }
-            }
-        }
-        return product;
-    }
-
-    private static void addRow(double[] product, int to, double value, double[] rows, int from, int count) {
-        for (int a = 0; a < count; a++) {
-            product[to * count + a] += value * rows[from * count + a];
         }
     }
 }

@@ -12,31 +12,35 @@ import org.modewright.numerics.SymmetricMatrix;
  */
 public record MatrixPair(SymmetricMatrix stiffness, SymmetricMatrix mass) {
 
-    /** The rows and columns of some unknowns alone. */
+    /**
+     * The rows and columns of some unknowns alone.
+     *
+     * @param unknowns ascending
+     */
     MatrixPair restrictedTo(int[] unknowns) {
         return new MatrixPair(restrict(stiffness, unknowns), restrict(mass, unknowns));
     }
 
     private static SymmetricMatrix restrict(SymmetricMatrix matrix, int[] unknowns) {
-        int[] number = new int[matrix.order()];
-        Arrays.fill(number, -1);
-        for (int i = 0; i < unknowns.length; i++) {
-            number[unknowns[i]] = i;
+        int[] columnStart = matrix.columnStart();
+        int most = 0;
+        for (int unknown : unknowns) {
+            most += columnStart[unknown + 1] - columnStart[unknown];
         }
         int[] start = new int[unknowns.length + 1];
-        int[] row = new int[matrix.entries()];
-        double[] value = new double[matrix.entries()];
+        int[] row = new int[most];
+        double[] value = new double[most];
         int count = 0;
         for (int i = 0; i < unknowns.length; i++) {
-            for (int p = matrix.columnStart()[unknowns[i]]; p < matrix.columnStart()[unknowns[i] + 1]; p++) {
-                if (number[matrix.row()[p]] >= 0) {
-                    row[count] = number[matrix.row()[p]];
+            for (int p = columnStart[unknowns[i]]; p < columnStart[unknowns[i] + 1]; p++) {
+                int number = Arrays.binarySearch(unknowns, matrix.row()[p]);
+                if (number >= 0) {
+                    row[count] = number;
                     value[count++] = matrix.value()[p];
                 }
             }
             start[i + 1] = count;
         }
-        return new SymmetricMatrix(unknowns.length, start, Arrays.copyOf(row, count),
-                Arrays.copyOf(value, count));
+        return new SymmetricMatrix(unknowns.length, start, Arrays.copyOf(row, count), Arrays.copyOf(value, count));
     }
 }

@@ -1,6 +1,7 @@
 package org.modewright.fem.internal;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.TreeSet;
@@ -15,86 +16,129 @@ import org.modewright.numerics.SymmetricMatrix;
 
 /**
  * Drops the motions that have neither stiffness nor mass. Adding such a motion to another changes no energy, so that one unknown
- * that moves in it can be left out and nothing is lost.
- *
- * @param kept the unknowns that remain, ascending
- * @param matrices stiffness and mass over them
- * @param dropped the motions, by node and component
+ * that moves in it can be left out and nothing is lost. Suspect unknowns that no entry joins are looked at apart.
  */
-record MotionDropping(int[] kept, MatrixPair matrices, List<DroppedMotion> dropped) {
+final class MotionDropping {
 
-    /** Components of a null vector below this share of its largest one, the rotations as if at arm 1 m, are round-off. */
+    /** Components of a null vector below this share of its largest one, rotations as if at arm 1 m, are round-off. */
     private static final double MOVES = 1e-6;
 
-    static MotionDropping of(MatrixPair all, Transformation transformation, Progress progress) {
-        boolean[] touched = new boolean[transformation.unknowns()];
-        touch(all.stiffness(), touched);
-        touch(all.mass(), touched);
-        List<DroppedMotion> dropped = new ArrayList<>();
-        addUntouched(touched, transformation, dropped);
-        progress.checkCancelled();
-        int[] candidates = IntStream.range(0, touched.length).filter(unknown -> touched[unknown]).toArray();
-        MatrixPair matrices = all.restrictedTo(candidates);
-        if (candidates.length == 0) {
-            return new MotionDropping(candidates, matrices, dropped);
-        }
+    private final MatrixPair all;
+    private final Transformation transformation;
+    private final boolean[] drop;
+    private final List<DroppedMotion> dropped = new ArrayList<>();
+    private FullColumns stiffness;
+    private FullColumns mass;
+
+    private MotionDropping(MatrixPair all, Transformation transformation) {
+        this.all = all;
+        this.transformation = transformation;
+        this.drop = new boolean[transformation.unknowns()];
+    }
+
+    static MotionDropping of(MatrixPair all, CarrierStore store, Transformation transformation, Progress progress) {
+        MotionDropping dropping = new MotionDropping(all, transformation);
         progress.report("looking for motions without stiffness and mass", Double.NaN);
-        PencilReduction reduction = PencilReduction.of(new EigenProblem(matrices.stiffness(), matrices.mass()), progress);
-        for (int i = 0; i < reduction.nullVectors().length; i++) {
-            double[] vector = new double[transformation.unknowns()];
-            for (int j = 0; j < candidates.length; j++) {
-                vector[candidates[j]] = reduction.nullVectors()[i][j];
-            }
-            dropped.add(motion(candidates[reduction.droppedDegreesOfFreedom()[i]], vector, transformation));
+        int[] suspects = SuspectUnknowns.of(store, transformation, progress);
+        for (int[] group : dropping.groups(suspects)) {
+            progress.checkCancelled();
+            dropping.search(group, progress);
         }
-        dropped.sort(Comparator.comparingInt(DroppedMotion::node).thenComparingInt(DroppedMotion::component));
-        int[] kept = IntStream.of(reduction.keptDegreesOfFreedom()).map(i -> candidates[i]).toArray();
-        return new MotionDropping(kept, new MatrixPair(reduction.reduced().stiffness(), reduction.reduced().mass()), dropped);
+        dropping.dropped.sort(Comparator.comparingInt(DroppedMotion::node).thenComparingInt(DroppedMotion::component));
+        return dropping;
     }
 
-    /** Unknowns that no element and no mass does anything for. */
-    private static void addUntouched(boolean[] touched, Transformation transformation, List<DroppedMotion> dropped) {
-        List<TreeSet<Integer>> nodes = new ArrayList<>();
-        for (int unknown = 0; unknown < touched.length; unknown++) {
-            nodes.add(touched[unknown] ? null : new TreeSet<>());
-        }
-        for (int place = 0; place < transformation.components(); place++) {
-            for (int p = transformation.rowStart(place); p < transformation.rowStart(place + 1); p++) {
-                if (!touched[transformation.unknownAt(p)]) {
-                    nodes.get(transformation.unknownAt(p)).add(place / Components.COUNT);
-                }
-            }
-        }
-        for (int unknown = 0; unknown < touched.length; unknown++) {
-            if (!touched[unknown]) {
-                int place = transformation.componentOf(unknown);
-                dropped.add(new DroppedMotion(place / Components.COUNT, place % Components.COUNT,
-                        nodes.get(unknown).stream().mapToInt(Integer::intValue).toArray()));
-            }
-        }
+    /** The unknowns that remain, ascending. */
+    int[] kept() {
+        return IntStream.range(0, drop.length).filter(unknown -> !drop[unknown]).toArray();
     }
 
-    private static void touch(SymmetricMatrix matrix, boolean[] touched) {
+    /** Stiffness and mass over the kept unknowns. */
+    MatrixPair matrices() {
+        return dropped.isEmpty() ? all : all.restrictedTo(kept());
+    }
+
+    /** The motions, by node and component. */
+    List<DroppedMotion> dropped() {
+        return dropped;
+    }
+
+    /** Suspect unknowns by groups that entries of stiffness or mass join. */
+    private List<int[]> groups(int[] suspects) {
+        int[] number = new int[drop.length];
+        Arrays.fill(number, -1);
+        for (int i = 0; i < suspects.length; i++) {
+            number[suspects[i]] = i;
+        }
+        stiffness = new FullColumns(all.stiffness(), number, suspects.length);
+        mass = new FullColumns(all.mass(), number, suspects.length);
+        NodeSets sets = new NodeSets(suspects.length);
+        join(all.stiffness(), number, sets);
+        join(all.mass(), number, sets);
+        int[] size = new int[suspects.length];
+        for (int i = 0; i < suspects.length; i++) {
+            size[sets.find(i)]++;
+        }
+        int[][] members = new int[suspects.length][];
+        int[] filled = new int[suspects.length];
+        List<int[]> groups = new ArrayList<>();
+        for (int i = 0; i < suspects.length; i++) {
+            int set = sets.find(i);
+            if (members[set] == null) {
+                members[set] = new int[size[set]];
+                groups.add(members[set]);
+            }
+            members[set][filled[set]++] = suspects[i];
+        }
+        return groups;
+    }
+
+    private static void join(SymmetricMatrix matrix, int[] number, NodeSets sets) {
         for (int column = 0; column < matrix.order(); column++) {
-            for (int p = matrix.columnStart()[column]; p < matrix.columnStart()[column + 1]; p++) {
-                if (matrix.value()[p] != 0.0) {
-                    touched[column] = true;
-                    touched[matrix.row()[p]] = true;
+            for (int p = matrix.columnStart()[column]; number[column] >= 0 && p < matrix.columnStart()[column + 1]; p++) {
+                if (matrix.value()[p] != 0.0 && number[matrix.row()[p]] >= 0) {
+                    sets.join(number[column], number[matrix.row()[p]]);
                 }
             }
         }
     }
 
-    private static DroppedMotion motion(int unknown, double[] vector, Transformation transformation) {
-        double[] u = transformation.expand(vector);
+    private void search(int[] group, Progress progress) {
+        MatrixPair own = all.restrictedTo(group);
+        if (group.length == 1) {
+            if (own.stiffness().get(0, 0) == 0.0 && own.mass().get(0, 0) == 0.0) {
+                dropIfFree(group, group[0], new double[] {1.0});
+            }
+            return;
+        }
+        PencilReduction reduction = PencilReduction.of(new EigenProblem(own.stiffness(), own.mass()), progress);
+        int[] unknowns = reduction.droppedDegreesOfFreedom();
+        for (int i = 0; i < unknowns.length; i++) {
+            dropIfFree(group, group[unknowns[i]], reduction.nullVectors()[i]);
+        }
+    }
+
+    /** A compressed member can take away the energy of a motion but not its forces; such a motion stays. */
+    private void dropIfFree(int[] group, int unknown, double[] vector) {
+        if (stiffness.hasProduct(group, vector) || mass.hasProduct(group, vector)) {
+            return;
+        }
+        drop[unknown] = true;
+        int place = transformation.componentOf(unknown);
+        dropped.add(new DroppedMotion(place / Components.COUNT, place % Components.COUNT, nodes(group, vector)));
+    }
+
+    private int[] nodes(int[] group, double[] vector) {
         double largest = 0.0;
-        for (double value : u) {
+        for (double value : vector) {
             largest = Math.max(largest, Math.abs(value));
         }
-        double least = MOVES * largest;
-        int[] nodes = IntStream.range(0, u.length).filter(i -> Math.abs(u[i]) > least).map(i -> i / Components.COUNT).distinct()
-                .toArray();
-        int place = transformation.componentOf(unknown);
-        return new DroppedMotion(place / Components.COUNT, place % Components.COUNT, nodes);
+        TreeSet<Integer> nodes = new TreeSet<>();
+        for (int i = 0; i < group.length; i++) {
+            if (Math.abs(vector[i]) > MOVES * largest) {
+                nodes.add(transformation.componentOf(group[i]) / Components.COUNT);
+            }
+        }
+        return nodes.stream().mapToInt(Integer::intValue).toArray();
     }
 }
