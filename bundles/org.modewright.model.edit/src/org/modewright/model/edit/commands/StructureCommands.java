@@ -6,11 +6,15 @@ import java.util.List;
 import java.util.Objects;
 
 import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.ecore.EAttribute;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EStructuralFeature;
+import org.eclipse.emf.ecore.EcorePackage;
 import org.eclipse.emf.edit.domain.EditingDomain;
 import org.modewright.model.Ids;
 import org.modewright.model.Names;
+import org.modewright.model.Quantity;
+import org.modewright.model.Units;
 import org.modewright.model.structure.GravityLoad;
 import org.modewright.model.structure.Group;
 import org.modewright.model.structure.Grouped;
@@ -20,6 +24,7 @@ import org.modewright.model.structure.Member;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructurePackage;
+import org.modewright.model.structure.UnitSystem;
 
 /**
  * What a user does to a model, each act one command: one undo takes it back completely. The commands change nothing until they are
@@ -215,5 +220,31 @@ public final class StructureCommands {
      */
     public Command duplicate(Collection<? extends EObject> objects, double dx, double dy, double dz) {
         return new Duplication(domain, model, new ArrayList<>(objects), new double[] {dx, dy, dz}).command();
+    }
+
+    /**
+     * @param system another unit system
+     * @return converts every number of the model, so that the structure stays the same in the other units
+     */
+    public Command convertUnits(UnitSystem system) {
+        Units from = Units.of(model);
+        Units to = Units.of(system);
+        Edit edit = new Edit(domain, model, Texts.get("convertUnits", system.getLiteral()));
+        convert(edit, model, from, to);
+        model.eAllContents().forEachRemaining(object -> convert(edit, object, from, to));
+        edit.set(model, StructurePackage.Literals.STRUCTURAL_MODEL__UNITS, system);
+        return edit.toCommand();
+    }
+
+    private static void convert(Edit edit, EObject object, Units from, Units to) {
+        for (EAttribute attribute : object.eClass().getEAllAttributes()) {
+            if (attribute.getEType() == EcorePackage.Literals.EDOUBLE && (Double) object.eGet(attribute) != 0) {
+                Quantity quantity = Quantity.of(object, attribute);
+                double factor = from.toSi(quantity) / to.toSi(quantity);
+                if (factor != 1) {
+                    edit.set(object, attribute, (Double) object.eGet(attribute) * factor);
+                }
+            }
+        }
     }
 }

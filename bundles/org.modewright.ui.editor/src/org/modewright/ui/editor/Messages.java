@@ -1,0 +1,100 @@
+package org.modewright.ui.editor;
+
+import org.eclipse.osgi.util.NLS;
+
+/** Texts of the structure editor. */
+public final class Messages extends NLS {
+
+    public static String Page_space;
+    public static String Page_tables;
+    public static String Page_loads;
+    public static String Page_analysis;
+    public static String Error_title;
+    public static String Error_reload;
+    public static String Save_failed;
+    public static String Save_asTitle;
+    public static String Undo;
+    public static String Redo;
+    public static String Undo_plain;
+    public static String Redo_plain;
+    public static String Delete;
+    public static String Delete_title;
+    public static String Delete_question;
+    public static String Delete_more;
+    public static String Rename;
+    public static String SelectAll;
+    public static String Copy;
+    public static String Changed_title;
+    public static String Changed_question;
+    public static String Changed_reload;
+    public static String Changed_keep;
+    public static String Form_nothing;
+    public static String Form_many;
+    public static String Form_mixed;
+    public static String Form_kinds;
+    public static String Form_different;
+    public static String Form_group_name;
+    public static String Checks_none;
+    public static String Checks_first;
+    public static String Tables_filter;
+    public static String Tables_add;
+    public static String Tables_duplicate;
+    public static String Tables_delete;
+    public static String Tables_copy;
+    public static String Tables_paste;
+    public static String Tables_pasted;
+    public static String Tables_pasteFault;
+    public static String Tables_empty;
+    public static String Tables_noMatch;
+    public static String Loads_patterns;
+    public static String Loads_loads;
+    public static String Loads_noPattern;
+    public static String Loads_addPattern;
+    public static String Loads_addNodeLoad;
+    public static String Loads_addMemberLoad;
+    public static String Loads_selfTitle;
+    public static String Loads_massTitle;
+    public static String Loads_source;
+    public static String Loads_mass;
+    public static String Loads_kind;
+    public static String Loads_kindNode;
+    public static String Loads_kindMember;
+    public static String Loads_target;
+    public static String Loads_value;
+    public static String Loads_total;
+    public static String Loads_notComputable;
+    public static String Loads_working;
+    public static String Loads_delete;
+    public static String Analysis_structure;
+    public static String Analysis_solve;
+    public static String Analysis_judge;
+    public static String Analysis_unknownPack;
+    public static String Units_title;
+    public static String Units_question;
+    public static String Units_convert;
+    public static String Units_keep;
+    public static String Act_coordinates;
+    public static String Act_coordinatesPrompt;
+    public static String Act_offset;
+    public static String Act_offsetPrompt;
+    public static String Act_group;
+    public static String Act_groupPrompt;
+    public static String Act_noGroup;
+    public static String Act_needsTwoNodes;
+    public static String Act_needsNodes;
+    public static String Act_needsMemberAndNode;
+    public static String Act_needsElements;
+    public static String Act_needsSection;
+    public static String Act_refused;
+    public static String Act_triple;
+    public static String Act_supportedAlready;
+    public static String Act_needsSomething;
+    public static String Tree_rename;
+
+    static {
+        NLS.initializeMessages("org.modewright.ui.editor.messages", Messages.class);
+    }
+
+    private Messages() {
+    }
+}

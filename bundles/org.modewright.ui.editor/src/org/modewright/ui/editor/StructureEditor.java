@@ -1,0 +1,503 @@
+package org.modewright.ui.editor;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collection;
+import java.util.EventObject;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.eclipse.core.resources.IFile;
+import org.eclipse.core.resources.IMarker;
+import org.eclipse.core.resources.IResource;
+import org.eclipse.core.runtime.CoreException;
+import org.eclipse.core.runtime.ILog;
+import org.eclipse.core.runtime.IProgressMonitor;
+import org.eclipse.core.runtime.Status;
+import org.eclipse.emf.common.command.BasicCommandStack;
+import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.edit.domain.AdapterFactoryEditingDomain;
+import org.eclipse.emf.edit.domain.EditingDomain;
+import org.eclipse.emf.edit.domain.IEditingDomainProvider;
+import org.eclipse.jface.dialogs.ErrorDialog;
+import org.eclipse.jface.dialogs.MessageDialog;
+import org.eclipse.osgi.util.NLS;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Display;
+import org.eclipse.swt.widgets.Shell;
+import org.eclipse.ui.IEditorInput;
+import org.eclipse.ui.IEditorSite;
+import org.eclipse.ui.IFileEditorInput;
+import org.eclipse.ui.PartInitException;
+import org.eclipse.ui.dialogs.SaveAsDialog;
+import org.eclipse.ui.ide.IGotoMarker;
+import org.eclipse.ui.part.FileEditorInput;
+import org.eclipse.ui.part.MultiPageEditorPart;
+import org.eclipse.ui.views.contentoutline.IContentOutlinePage;
+import org.modewright.audit.Finding;
+import org.modewright.model.ModelFile;
+import org.modewright.model.ModelFileException;
+import org.modewright.model.Names;
+import org.modewright.model.edit.StructureEditAdapterFactory;
+import org.modewright.model.edit.commands.Deletion;
+import org.modewright.model.edit.commands.StructureCommands;
+import org.modewright.model.structure.Identified;
+import org.modewright.model.structure.StructuralModel;
+import org.modewright.ui.AuditSession;
+import org.modewright.ui.StructureEditorPart;
+import org.modewright.ui.editor.fields.FieldContext;
+import org.modewright.ui.editor.pages.AnalysisPage;
+import org.modewright.ui.editor.pages.ErrorPage;
+import org.modewright.ui.editor.pages.LoadsPage;
+import org.modewright.ui.editor.pages.SpaceTab;
+import org.modewright.ui.editor.pages.TablesPage;
+import org.modewright.workspace.FindingMarkers;
+
+/** Edits a structural model: in space, in tables, its loads and its settings. Every act is one command and one undo. */
+public final class StructureEditor extends MultiPageEditorPart
+        implements StructureEditorPart, IEditingDomainProvider, IGotoMarker, EditorContext {
+
+    private static final int NAMED = 8;
+
+    private final List<EditorPage> pages = new ArrayList<>();
+    private final List<Runnable> modelListeners = new ArrayList<>();
+    private final FileWatch watch = new FileWatch(this::fileChanged, this::fileMoved);
+    private StructureEditAdapterFactory adapterFactory;
+    private AdapterFactoryEditingDomain domain;
+    private StructuralModel model;
+    private ModelIndex index;
+    private AuditSession session;
+    private Checks checks;
+    private CheckLine checkLine;
+    private StructureOutline outline;
+    private EditorActions actions;
+    private boolean changePending;
+    private boolean changedOutside;
+    private boolean asking;
+    private final AuditSession.Listener sessionListener = this::sessionChanged;
+
+    @Override
+    public void init(IEditorSite site, IEditorInput input) throws PartInitException {
+        if (!(input instanceof IFileEditorInput)) {
+            throw new PartInitException(Messages.Error_title);
+        }
+        super.init(site, input);
+        setPartName(input.getName());
+        session = site.getService(AuditSession.class);
+        checks = new Checks(site.getShell().getDisplay(), this::checked);
+        site.setSelectionProvider(new ObjectSelections());
+        load();
+        session.addListener(sessionListener);
+        watch.start(getModelFile());
+    }
+
+    /** Reads the file; afterwards there is a model, or the reason why there is none. */
+    private void load() {
+        adapterFactory = new StructureEditAdapterFactory();
+        BasicCommandStack stack = new BasicCommandStack();
+        domain = new AdapterFactoryEditingDomain(adapterFactory, stack);
+        model = null;
+        index = null;
+        failure = null;
+        try {
+            model = ModelFile.load(path());
+            domain.getResourceSet().getResources().add(model.eResource());
+            index = new ModelIndex(model);
+            stack.addCommandStackListener(this::commandStackChanged);
+            checks.request(model);
+        } catch (ModelFileException fault) {
+            failure = fault;
+        }
+    }
+
+    private ModelFileException failure;
+
+    private Path path() {
+        return getModelFile().getLocation().toFile().toPath();
+    }
+
+    @Override
+    protected Composite createPageContainer(Composite parent) {
+        Composite container = super.createPageContainer(parent);
+        checkLine = new CheckLine(container, this, checks);
+        return checkLine.below();
+    }
+
+    @Override
+    protected void createPages() {
+        if (model == null) {
+            addPage(new ErrorPage(getContainer(), failure, this::reload));
+        } else {
+            addPage(new SpaceTab(getContainer(), this));
+            addPage(new TablesPage(getContainer(), this));
+            addPage(new LoadsPage(getContainer(), this));
+            addPage(new AnalysisPage(getContainer(), this));
+        }
+        actions = new EditorActions(this);
+        checkLine.show(model != null);
+    }
+
+    private void addPage(EditorPage page) {
+        pages.add(page);
+        setPageText(addPage(page.control()), page.title());
+    }
+
+    @Override
+    protected void pageChange(int newPageIndex) {
+        super.pageChange(newPageIndex);
+        EditorPage page = pages.get(newPageIndex);
+        page.select(session.selection().elementIds());
+        if (actions != null) {
+            actions.update();
+        }
+    }
+
+    @Override
+    public void setFocus() {
+        if (!pages.isEmpty()) {
+            activePage().setFocus();
+        }
+        askAboutChange();
+    }
+
+    /** The page on top. */
+    public EditorPage activePage() {
+        return pages.get(Math.max(0, getActivePage()));
+    }
+
+    /** Brings a page to the top. */
+    public void showPage(Class<? extends EditorPage> kind) {
+        for (int i = 0; i < pages.size(); i++) {
+            if (kind.isInstance(pages.get(i))) {
+                setActivePage(i);
+            }
+        }
+    }
+
+    /** The live checks. */
+    public Checks checks() {
+        return checks;
+    }
+
+    private void commandStackChanged(EventObject event) {
+        index = new ModelIndex(model);
+        if (!changePending) {
+            changePending = true;
+            display().asyncExec(this::publishChange);
+        }
+    }
+
+    private Display display() {
+        return getSite().getShell().getDisplay();
+    }
+
+    private void publishChange() {
+        changePending = false;
+        if (getContainer() == null || getContainer().isDisposed() || model == null) {
+            return;
+        }
+        firePropertyChange(PROP_DIRTY);
+        pages.forEach(EditorPage::modelChanged);
+        if (outline != null) {
+            outline.modelChanged();
+        }
+        actions.update();
+        checks.request(model);
+        List.copyOf(modelListeners).forEach(Runnable::run);
+    }
+
+    private void checked() {
+        checkLine.refresh();
+        pages.forEach(EditorPage::modelChanged);
+        if (outline != null) {
+            outline.modelChanged();
+        }
+    }
+
+    private void sessionChanged(AuditSession.Change change) {
+        if (change == AuditSession.Change.SELECTION && model != null && getContainer() != null && !getContainer().isDisposed()) {
+            Set<String> ids = session.selection().elementIds();
+            if (session.selectionSource() != activePage()) {
+                activePage().select(ids);
+            }
+            if (outline != null && session.selectionSource() != outline) {
+                outline.select(ids);
+            }
+            ((ObjectSelections) getSite().getSelectionProvider()).publish(selected());
+            actions.update();
+        }
+    }
+
+    @Override
+    public boolean isDirty() {
+        return domain != null && ((BasicCommandStack) domain.getCommandStack()).isSaveNeeded();
+    }
+
+    @Override
+    public void doSave(IProgressMonitor monitor) {
+        save(getModelFile(), monitor);
+    }
+
+    private boolean save(IFile file, IProgressMonitor monitor) {
+        try {
+            watch.saving();
+            ModelFile.save(model, file.getLocation().toFile().toPath());
+            file.refreshLocal(IResource.DEPTH_ZERO, monitor);
+            ((BasicCommandStack) domain.getCommandStack()).saveIsDone();
+            changedOutside = false;
+            firePropertyChange(PROP_DIRTY);
+            return true;
+        } catch (ModelFileException | CoreException fault) {
+            ILog.get().error(fault.getMessage(), fault);
+            ErrorDialog.openError(shell(), Messages.Save_failed, null, Status.error(fault.getMessage(), fault));
+            if (monitor != null) {
+                monitor.setCanceled(true);
+            }
+            return false;
+        }
+    }
+
+    @Override
+    public boolean isSaveAsAllowed() {
+        return model != null;
+    }
+
+    @Override
+    public void doSaveAs() {
+        SaveAsDialog dialog = new SaveAsDialog(shell());
+        dialog.setOriginalFile(getModelFile());
+        dialog.open();
+        if (dialog.getResult() == null) {
+            return;
+        }
+        org.eclipse.core.runtime.IPath chosen = dialog.getResult();
+        if (!ModelFile.EXTENSION.equals(chosen.getFileExtension())) {
+            chosen = chosen.addFileExtension(ModelFile.EXTENSION);
+        }
+        IFile file = getModelFile().getWorkspace().getRoot().getFile(chosen);
+        if (save(file, null)) {
+            moveTo(file);
+        }
+    }
+
+    private void moveTo(IFile file) {
+        setInputWithNotify(new FileEditorInput(file));
+        setPartName(file.getName());
+        watch.start(file);
+        List.copyOf(modelListeners).forEach(Runnable::run);
+    }
+
+    private void fileMoved(IFile file) {
+        if (file == null) {
+            if (!isDirty()) {
+                getSite().getPage().closeEditor(this, false);
+            }
+        } else {
+            moveTo(file);
+        }
+    }
+
+    private void fileChanged() {
+        if (getContainer() == null || getContainer().isDisposed()) {
+            return;
+        }
+        if (isDirty()) {
+            changedOutside = true;
+            if (getSite().getPage().getActivePart() == this) {
+                askAboutChange();
+            }
+        } else {
+            reload();
+        }
+    }
+
+    private void askAboutChange() {
+        if (!changedOutside || asking) {
+            return;
+        }
+        asking = true;
+        try {
+            int answer = MessageDialog.open(MessageDialog.QUESTION, shell(), Messages.Changed_title,
+                    NLS.bind(Messages.Changed_question, getModelFile().getName()), 0, Messages.Changed_reload, Messages.Changed_keep);
+            changedOutside = false;
+            if (answer == 0) {
+                reload();
+            }
+        } finally {
+            asking = false;
+        }
+    }
+
+    private void reload() {
+        int active = getActivePage();
+        while (getPageCount() > 0) {
+            removePage(0);
+        }
+        pages.clear();
+        adapterFactory.dispose();
+        load();
+        createPages();
+        setActivePage(Math.min(Math.max(0, active), getPageCount() - 1));
+        firePropertyChange(PROP_DIRTY);
+        if (outline != null) {
+            outline.modelChanged();
+        }
+        List.copyOf(modelListeners).forEach(Runnable::run);
+    }
+
+    @Override
+    public void dispose() {
+        watch.stop();
+        if (session != null) {
+            session.removeListener(sessionListener);
+        }
+        if (checks != null) {
+            checks.dispose();
+        }
+        if (adapterFactory != null) {
+            adapterFactory.dispose();
+        }
+        super.dispose();
+    }
+
+    @Override
+    public <T> T getAdapter(Class<T> type) {
+        if (type == IContentOutlinePage.class && model != null) {
+            if (outline == null || outline.isDisposed()) {
+                outline = new StructureOutline(this, adapterFactory);
+            }
+            return type.cast(outline);
+        }
+        if (type == IGotoMarker.class || type == StructureEditorPart.class || type == IEditingDomainProvider.class) {
+            return type.cast(this);
+        }
+        return super.getAdapter(type);
+    }
+
+    @Override
+    public void gotoMarker(IMarker marker) {
+        String ids = marker.getAttribute(FindingMarkers.ELEMENT_IDS, "");
+        Set<String> elements = Arrays.stream(ids.split("\n")).filter(id -> !id.isEmpty()).collect(Collectors.toSet());
+        if (elements.isEmpty() || model == null) {
+            return;
+        }
+        session.select(session.selection().withElements(elements), this);
+        elements.stream().filter(id -> index.get(id) != null).findFirst().ifPresent(this::showPageFor);
+    }
+
+    private void showPageFor(String id) {
+        if (!activePage().reveals(id)) {
+            showPage(TablesPage.class);
+        }
+    }
+
+    @Override
+    public boolean reveal(String elementId) {
+        if (model == null || index.get(elementId) == null) {
+            return false;
+        }
+        session.select(session.selection().withElements(Set.of(elementId)), this);
+        showPageFor(elementId);
+        return true;
+    }
+
+    @Override
+    public IFile getModelFile() {
+        return ((IFileEditorInput) getEditorInput()).getFile();
+    }
+
+    @Override
+    public StructuralModel getLiveModel() {
+        return model;
+    }
+
+    @Override
+    public EditingDomain getEditingDomain() {
+        return model == null ? null : domain;
+    }
+
+    @Override
+    public void addModelListener(Runnable listener) {
+        modelListeners.add(listener);
+    }
+
+    @Override
+    public void removeModelListener(Runnable listener) {
+        modelListeners.remove(listener);
+    }
+
+    @Override
+    public StructuralModel model() {
+        return model;
+    }
+
+    @Override
+    public AuditSession session() {
+        return session;
+    }
+
+    @Override
+    public FieldContext fields() {
+        return new FieldContext(domain, model);
+    }
+
+    @Override
+    public StructureCommands commands() {
+        return new StructureCommands(domain, model);
+    }
+
+    @Override
+    public List<Identified> selected() {
+        return index == null ? List.of() : index.all(session.selection().elementIds());
+    }
+
+    @Override
+    public Identified object(String id) {
+        return index == null ? null : index.get(id);
+    }
+
+    @Override
+    public void select(Set<String> ids, Object source) {
+        session.select(session.selection().withElements(ids), source);
+    }
+
+    @Override
+    public void execute(Command command) {
+        if (command != null && command.canExecute()) {
+            domain.getCommandStack().execute(command);
+        }
+    }
+
+    @Override
+    public void delete(Collection<? extends EObject> objects) {
+        if (objects.isEmpty()) {
+            return;
+        }
+        Deletion deletion = commands().deletion(objects);
+        if (deletion.dependants().isEmpty() || MessageDialog.openQuestion(shell(), Messages.Delete_title, question(objects, deletion))) {
+            execute(deletion.command());
+        }
+    }
+
+    private static String question(Collection<? extends EObject> objects, Deletion deletion) {
+        String what = objects.size() == 1 ? Names.describe(objects.iterator().next()) : objects.size() + " objects";
+        List<String> names = deletion.dependants().stream().limit(NAMED).map(Names::describe).collect(Collectors.toCollection(ArrayList::new));
+        if (deletion.dependants().size() > NAMED) {
+            names.add("…");
+        }
+        return NLS.bind(Messages.Delete_question, what)
+                + NLS.bind(Messages.Delete_more, deletion.dependants().size(), String.join(", ", names));
+    }
+
+    @Override
+    public List<Finding> findings(String id) {
+        return checks.of(id);
+    }
+
+    @Override
+    public Shell shell() {
+        return getSite().getShell();
+    }
+}

@@ -1,0 +1,49 @@
+package org.modewright.ui.editor.fields;
+
+import java.util.Collection;
+import java.util.List;
+import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.ecore.EObject;
+
+/**
+ * One thing about an object that the user reads and edits as text, in a form or in a cell of a table: it knows its label with the unit,
+ * how it reads, and which command sets it.
+ */
+public interface Field {
+
+    /** How a field is best edited. */
+    enum Style { TEXT, CHOICE, FLAG }
+
+    /** What the field is, with the unit, such as "Area m²". */
+    String label();
+
+    /** What it means, for the tooltip. */
+    String help();
+
+    Style style();
+
+    /** What can be chosen, for {@link Style#CHOICE}; empty for others. */
+    List<String> choices();
+
+    /** The value as text; for a flag "true" or "false". */
+    String text(EObject object);
+
+    /** What a table sorts by where numbers are not to sort as words; else the text. */
+    default Comparable<?> sortKey(EObject object) {
+        return text(object);
+    }
+
+    /** Whether the value is a number, set at the right of its column. */
+    default boolean isNumber() {
+        return false;
+    }
+
+    /**
+     * The command that sets the value of all objects.
+     *
+     * @param objects objects that have this field
+     * @param text the value as text
+     * @throws IllegalArgumentException if the text is no value; its message is a sentence for the user
+     */
+    Command set(Collection<? extends EObject> objects, String text);
+}

@@ -1,0 +1,228 @@
+package org.modewright.ui.editor.pages;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Set;
+import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EStructuralFeature;
+import org.eclipse.jface.dialogs.MessageDialog;
+import org.eclipse.osgi.util.NLS;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.ScrolledComposite;
+import org.eclipse.swt.layout.GridData;
+import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.widgets.Combo;
+import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Group;
+import org.eclipse.swt.widgets.Label;
+import org.modewright.audit.RulePack;
+import org.modewright.audit.RulePackException;
+import org.modewright.audit.RulePacks;
+import org.modewright.model.structure.StructurePackage.Literals;
+import org.modewright.model.structure.UnitSystem;
+import org.modewright.ui.UiIds;
+import org.modewright.ui.editor.EditorContext;
+import org.modewright.ui.editor.EditorPage;
+import org.modewright.ui.editor.Messages;
+import org.modewright.ui.editor.fields.FeatureTexts;
+import org.modewright.ui.editor.fields.Field;
+import org.modewright.ui.editor.fields.Fields;
+import org.modewright.ui.widgets.ThemeColours;
+import org.modewright.workspace.WorkspacePreferences;
+
+/** Units and what holds for the whole structure, what is solved, and how it is judged; each with a short explanation. */
+public final class AnalysisPage implements EditorPage {
+
+    private record Row(FieldControl control, EObject object) {
+    }
+
+    private final EditorContext context;
+    private final ScrolledComposite scroller;
+    private final List<Row> rows = new ArrayList<>();
+    private Composite body;
+    private Combo units;
+    private Combo rulePack;
+    private Label rulePackNote;
+    private List<RulePack> packs = List.of();
+    private UnitSystem shownUnits;
+
+    public AnalysisPage(Composite parent, EditorContext context) {
+        this.context = context;
+        scroller = new ScrolledComposite(parent, SWT.V_SCROLL);
+        scroller.setExpandHorizontal(true);
+        scroller.setExpandVertical(true);
+        scroller.addListener(SWT.Resize, event -> fit());
+        rebuild();
+    }
+
+    private void rebuild() {
+        if (body != null) {
+            body.dispose();
+        }
+        rows.clear();
+        shownUnits = context.model().getUnits();
+        body = new Composite(scroller, SWT.NONE);
+        GridLayout layout = new GridLayout();
+        layout.marginWidth = 12;
+        layout.marginHeight = 12;
+        layout.verticalSpacing = 12;
+        body.setLayout(layout);
+        Composite structure = group(Messages.Analysis_structure);
+        addUnits(structure);
+        add(structure, context.model(), Literals.STRUCTURAL_MODEL__NAME, Literals.STRUCTURAL_MODEL__TITLE, Literals.STRUCTURAL_MODEL__NOTES,
+                Literals.STRUCTURAL_MODEL__GRAVITY, Literals.STRUCTURAL_MODEL__MASS_FORMULATION, Literals.STRUCTURAL_MODEL__SHEAR_DEFORMATION);
+        if (context.model().getAnalysis() != null) {
+            add(group(Messages.Analysis_solve), context.model().getAnalysis(), Literals.ANALYSIS_SETTINGS__MODES, Literals.ANALYSIS_SETTINGS__BELOW);
+        }
+        if (context.model().getAudit() != null) {
+            Composite judge = group(Messages.Analysis_judge);
+            addRulePack(judge);
+            add(judge, context.model().getAudit(), Literals.AUDIT_SETTINGS__X, Literals.AUDIT_SETTINGS__Y, Literals.AUDIT_SETTINGS__Z,
+                    Literals.AUDIT_SETTINGS__LOCAL_NODES, Literals.AUDIT_SETTINGS__COINCIDENCE);
+        }
+        scroller.setContent(body);
+        refresh();
+    }
+
+    private Composite group(String title) {
+        Group group = new Group(body, SWT.NONE);
+        group.setText(title);
+        GridData data = new GridData(SWT.LEFT, SWT.TOP, true, false);
+        data.widthHint = 640;
+        group.setLayoutData(data);
+        GridLayout layout = new GridLayout(2, false);
+        layout.marginWidth = 8;
+        layout.horizontalSpacing = 12;
+        group.setLayout(layout);
+        return group;
+    }
+
+    private void add(Composite parent, EObject object, EStructuralFeature... features) {
+        for (EStructuralFeature feature : features) {
+            Field field = Fields.one(context.fields(), object, feature);
+            rows.add(new Row(FieldControl.create(parent, field, context), object));
+            explain(parent, FeatureTexts.help(feature));
+        }
+    }
+
+    private static Label explain(Composite parent, String text) {
+        Label label = new Label(parent, SWT.WRAP);
+        label.setText(text.replace("&", "&&"));
+        label.setForeground(ThemeColours.secondaryText(parent));
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1);
+        data.widthHint = 480;
+        label.setLayoutData(data);
+        return label;
+    }
+
+    private void addUnits(Composite parent) {
+        new Label(parent, SWT.NONE).setText(FeatureTexts.label(Literals.STRUCTURAL_MODEL__UNITS));
+        units = new Combo(parent, SWT.READ_ONLY);
+        units.setData(UiIds.WIDGET_ID, "analysis.units");
+        units.setItems(java.util.Arrays.stream(UnitSystem.values()).map(UnitSystem::getLiteral).toArray(String[]::new));
+        units.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        units.addListener(SWT.Selection, event -> unitsChosen());
+        explain(parent, FeatureTexts.help(Literals.STRUCTURAL_MODEL__UNITS));
+    }
+
+    private void unitsChosen() {
+        UnitSystem chosen = UnitSystem.get(units.getText());
+        UnitSystem now = context.model().getUnits();
+        if (chosen == null || chosen == now) {
+            return;
+        }
+        int answer = MessageDialog.open(MessageDialog.QUESTION, context.shell(), Messages.Units_title,
+                NLS.bind(Messages.Units_question, now.getLiteral(), chosen.getLiteral()), SWT.NONE, Messages.Units_convert, Messages.Units_keep,
+                org.eclipse.jface.dialogs.IDialogConstants.CANCEL_LABEL);
+        Command command = answer == 0 ? context.commands().convertUnits(chosen)
+                : answer == 1 ? context.commands().set(context.model(), Literals.STRUCTURAL_MODEL__UNITS, chosen) : null;
+        context.execute(command);
+        refresh();
+    }
+
+    private void addRulePack(Composite parent) {
+        new Label(parent, SWT.NONE).setText(FeatureTexts.label(Literals.AUDIT_SETTINGS__RULE_PACK));
+        rulePack = new Combo(parent, SWT.READ_ONLY);
+        rulePack.setData(UiIds.WIDGET_ID, "analysis.rulePack");
+        rulePack.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        rulePack.addListener(SWT.Selection, event -> context.execute(context.commands().set(context.model().getAudit(),
+                Literals.AUDIT_SETTINGS__RULE_PACK, packs.get(rulePack.getSelectionIndex()).id())));
+        rulePackNote = explain(parent, "");
+        packs = rulePacks();
+        rulePack.setItems(packs.stream().map(pack -> pack.title() + " (" + pack.id() + ")").toArray(String[]::new));
+    }
+
+    /** The built-in rule packs and the office's own; a folder of packs that cannot be read is reported by the run that needs it. */
+    private static List<RulePack> rulePacks() {
+        RulePacks builtIn = RulePacks.builtIn();
+        try {
+            return WorkspacePreferences.rulePackFolder().map(folder -> builtIn.with(folder)).orElse(builtIn).all();
+        } catch (RulePackException unreadable) {
+            return builtIn.all();
+        }
+    }
+
+    private void refresh() {
+        rows.forEach(row -> row.control.show(List.of(row.object)));
+        units.setText(context.model().getUnits().getLiteral());
+        if (rulePack != null && context.model().getAudit() != null) {
+            showRulePack();
+        }
+        fit();
+    }
+
+    private void showRulePack() {
+        String id = context.model().getAudit().getRulePack();
+        rulePack.deselectAll();
+        rulePackNote.setText(NLS.bind(Messages.Analysis_unknownPack, id));
+        for (int i = 0; i < packs.size(); i++) {
+            if (packs.get(i).id().equals(id)) {
+                rulePack.select(i);
+                rulePackNote.setText((packs.get(i).source() + ". " + packs.get(i).provenance()).replace("&", "&&"));
+            }
+        }
+    }
+
+    private void fit() {
+        if (body != null && !body.isDisposed()) {
+            body.layout(true, true);
+            scroller.setMinSize(body.computeSize(Math.max(1, scroller.getClientArea().width), SWT.DEFAULT));
+        }
+    }
+
+    @Override
+    public String title() {
+        return Messages.Page_analysis;
+    }
+
+    @Override
+    public Control control() {
+        return scroller;
+    }
+
+    @Override
+    public void modelChanged() {
+        if (shownUnits != context.model().getUnits()) {
+            rebuild();
+        } else {
+            refresh();
+        }
+    }
+
+    @Override
+    public void select(Set<String> ids) {
+        // What holds for the whole structure does not depend on what is selected.
+    }
+
+    @Override
+    public boolean reveals(String id) {
+        return false;
+    }
+
+    @Override
+    public void setFocus() {
+        units.setFocus();
+    }
+}
