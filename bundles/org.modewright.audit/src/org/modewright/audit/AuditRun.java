@@ -69,7 +69,7 @@ public final class AuditRun {
         List<Finding> findings = findings(new AuditContext(snapshot, assembly, modal, verdicts, request), progress);
         ModalResult timed = modal.withSeconds("assemble", assembling).withSeconds("audit", since(start));
         AuditStatus status = status(timed, verdicts);
-        return new AuditResult(timed, verdicts, findings, status, summary(timed, verdicts, status));
+        return new AuditResult(timed, verdicts, findings, status, summary(timed, verdicts, status, request));
     }
 
     private static ModalRequest modalRequest(AuditRequest request, RulePack pack) {
@@ -99,7 +99,9 @@ public final class AuditRun {
         return passed ? AuditStatus.PASSED : AuditStatus.NOT_PASSED;
     }
 
-    private static String summary(ModalResult modal, List<Verdict> verdicts, AuditStatus status) {
+    private static String summary(ModalResult modal, List<Verdict> verdicts, AuditStatus status, AuditRequest request) {
+        String nothingJudged = request.directions().isEmpty() ? "Nothing is judged: no direction is asked for."
+                : "Nothing can be judged: no mass can move in the directions asked for.";
         Certificate certificate = modal.certificate();
         return switch (status) {
             case UNSTABLE -> "The structure is unstable. " + modal.instabilities().get(0).text();
@@ -107,7 +109,7 @@ public final class AuditRun {
                     + " below " + Figures.significant(certificate.belowHz(), 3) + " Hz were found, so nothing is proven.";
             case PASSED -> "The modes are enough: " + shares(verdicts) + " with "
                     + Figures.count(modal.modes().size(), "mode", "modes") + ".";
-            case NOT_PASSED -> verdicts.isEmpty() ? "Nothing can be judged: no mass can move in the directions asked for."
+            case NOT_PASSED -> verdicts.isEmpty() ? nothingJudged
                     : "The modes are not enough: " + shares(verdicts.stream().filter(verdict -> !verdict.pass()).toList()) + " with "
                             + Figures.count(modal.modes().size(), "mode", "modes") + ".";
         };

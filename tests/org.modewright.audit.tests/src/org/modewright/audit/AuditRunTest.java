@@ -119,6 +119,13 @@ class AuditRunTest {
     }
 
     @Test
+    void noDirectionIsNoPass() {
+        AuditResult result = audit(building(5), AuditRequest.standard().withDirections(EnumSet.noneOf(Direction.class)));
+        assertEquals(AuditStatus.NOT_PASSED, result.status());
+        assertEquals("Nothing is judged: no direction is asked for.", result.summary());
+    }
+
+    @Test
     void unstableStructureIsNotJudged() {
         Structures s = building(3);
         s.node("stray", 5, 0, 0).support("stray", "uy uz rx ry rz").mass("stray", 10, 0, 0, 0, 0, 0);
