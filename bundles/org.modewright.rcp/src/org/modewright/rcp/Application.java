@@ -23,7 +23,9 @@ public final class Application implements IApplication {
             if (!takeWorkspace(context)) {
                 return EXIT_OK;
             }
-            int code = PlatformUI.createAndRunWorkbench(display, new ModewrightWorkbenchAdvisor());
+            Splash splash = Splash.show(display);
+            context.applicationRunning();
+            int code = PlatformUI.createAndRunWorkbench(display, new ModewrightWorkbenchAdvisor(splash::close));
             return code == PlatformUI.RETURN_RESTART ? EXIT_RESTART : EXIT_OK;
         } finally {
             Platform.getInstanceLocation().release();

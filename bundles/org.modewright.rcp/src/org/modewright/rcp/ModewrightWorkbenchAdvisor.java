@@ -20,6 +20,13 @@ final class ModewrightWorkbenchAdvisor extends WorkbenchAdvisor {
 
     private static final String PERSPECTIVE = "org.modewright.ui.perspective";
 
+    private final Runnable whenStarted;
+
+    /** @param whenStarted called once the first window is open */
+    ModewrightWorkbenchAdvisor(Runnable whenStarted) {
+        this.whenStarted = whenStarted;
+    }
+
     @Override
     public void initialize(IWorkbenchConfigurer configurer) {
         super.initialize(configurer);
@@ -50,6 +57,7 @@ final class ModewrightWorkbenchAdvisor extends WorkbenchAdvisor {
 
     @Override
     public void postStartup() {
+        whenStarted.run();
         keepKeysPage(getWorkbenchConfigurer().getWorkbench().getPreferenceManager());
     }
 

@@ -33,9 +33,7 @@ public final class ModelProjects {
         SubMonitor progress = SubMonitor.convert(monitor, 3);
         IProject project = workspace.getRoot().getProject(name);
         if (!project.exists()) {
-            IProjectDescription description = workspace.newProjectDescription(name);
-            description.setNatureIds(new String[] {ModewrightNature.ID});
-            project.create(description, progress.split(1));
+            project.create(progress.split(1));
         }
         project.open(progress.split(1));
         if (!project.hasNature(ModewrightNature.ID)) {
