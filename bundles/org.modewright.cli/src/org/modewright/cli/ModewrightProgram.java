@@ -38,6 +38,8 @@ public final class ModewrightProgram {
             return commandLine(faults).execute(arguments);
         } catch (OutOfMemoryError e) {
             return faults.outOfMemory();
+        } catch (LinkageError | StackOverflowError e) {
+            return faults.unexpected(e);
         } finally {
             context.out().flush();
             context.err().flush();

@@ -11,11 +11,12 @@ import org.modewright.modal.Mode;
 
 import io.jhdf.HdfFile;
 import io.jhdf.WritableHdfFile;
-import io.jhdf.exceptions.HdfException;
 
 /**
  * Mode shapes as an HDF5 file with the datasets {@code frequency} (Hz, one a mode), {@code shape} (mode &times; node &times; ux uy uz rx
  * ry rz, &phi;<sup>T</sup>M&phi; = 1 in SI) and {@code node} (names in the order of the shapes).
+ * <p>
+ * The bundle of the HDF5 library does not export the package of its exceptions, which are all unchecked: they are caught as such.
  */
 public final class ShapesFile {
 
@@ -51,7 +52,7 @@ public final class ShapesFile {
                 hdf.putDataset(FREQUENCY, result.modes().stream().mapToDouble(Mode::frequency).toArray());
                 hdf.putDataset(SHAPE, shapes(result));
                 hdf.putDataset(NODE, result.nodes().stream().map(NodePoint::name).toArray(String[]::new));
-            } catch (HdfException e) {
+            } catch (RuntimeException e) {
                 throw new IOException(file + ": the shapes cannot be written: " + e.getMessage(), e);
             }
         });
@@ -77,7 +78,7 @@ public final class ShapesFile {
         try (HdfFile hdf = new HdfFile(file)) {
             return new Shapes((double[]) hdf.getDatasetByPath(FREQUENCY).getData(), (double[][][]) hdf.getDatasetByPath(SHAPE).getData(),
                     List.of((String[]) hdf.getDatasetByPath(NODE).getData()));
-        } catch (HdfException | ClassCastException e) {
+        } catch (RuntimeException e) {
             throw new IOException(file + ": this is no file of mode shapes: " + e.getMessage(), e);
         }
     }

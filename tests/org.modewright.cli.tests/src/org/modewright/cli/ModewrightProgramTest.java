@@ -112,6 +112,21 @@ class ModewrightProgramTest {
         assertTrue(console.err().contains("MiB is too small"), console.toString());
     }
 
+    /** A fault of the program is never mistaken for an audit that does not pass. */
+    @Test
+    void aFaultOfTheProgramEndsWithThree() {
+        for (Throwable fault : List.of(new IllegalStateException("odd"), new NoClassDefFoundError("odd"))) {
+            Console console = Console.withOffered(new OfferedCommand("odd", "Fails.", () -> (arguments, context) -> {
+                if (fault instanceof Error error) {
+                    throw error;
+                }
+                throw (Exception) fault;
+            }), "odd");
+            assertEquals(3, console.status());
+            assertTrue(console.err().contains("fault of the program") && console.err().contains("odd"), console.toString());
+        }
+    }
+
     @Test
     void aCancelEndsWithThreeAndWritesNothing() {
         Console console = Console.cancelled(() -> true, "check", "sample:demo");

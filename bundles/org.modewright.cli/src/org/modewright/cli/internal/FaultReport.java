@@ -56,7 +56,7 @@ public final class FaultReport implements IParameterExceptionHandler, IExecution
     }
 
     @Override
-    public int handleExecutionException(Exception fault, CommandLine command, ParseResult result) throws Exception {
+    public int handleExecutionException(Exception fault, CommandLine command, ParseResult result) {
         if (fault instanceof CancelledException) {
             err.println("Cancelled; nothing was written.");
             return ExitStatus.NOT_COMPLETED;
@@ -80,7 +80,14 @@ public final class FaultReport implements IParameterExceptionHandler, IExecution
             err.println(sentence(words(fault)));
             return ExitStatus.BAD_INPUT;
         }
-        throw fault;
+        return unexpected(fault);
+    }
+
+    /** Says that the program itself is at fault, with what its makers need to know. */
+    public int unexpected(Throwable fault) {
+        err.println("The run could not be completed because of a fault of the program; please report it with these lines:");
+        fault.printStackTrace(err);
+        return ExitStatus.NOT_COMPLETED;
     }
 
     /** Says that the memory was too small. */
