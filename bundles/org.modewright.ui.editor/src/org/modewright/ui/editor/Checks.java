@@ -98,7 +98,7 @@ public final class Checks {
             return Messages.Checks_none;
         }
         Finding first = findings.get(0);
-        return NLS.bind(Messages.Checks_first, new Object[] {counts(), first.text(), first.remedy()});
+        return NLS.bind(Messages.Checks_first, counts(), first.text());
     }
 
     private String counts() {

@@ -136,8 +136,8 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
     }
 
     private void label(TreeItem item, int category) {
-        item.setText(categories.get(category).getText(null));
-        item.setImage(image(categories.get(category).getImage(null)));
+        item.setText(categories.get(category).getText(categories.get(category)));
+        item.setImage(image(categories.get(category).getImage(categories.get(category))));
         item.setItemCount(categories.get(category).objects().size());
     }
 

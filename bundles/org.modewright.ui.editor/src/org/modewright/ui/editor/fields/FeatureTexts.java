@@ -1,5 +1,6 @@
 package org.modewright.ui.editor.fields;
 
+import java.util.MissingResourceException;
 import org.eclipse.emf.ecore.EStructuralFeature;
 import org.modewright.model.structure.provider.StructureEditPlugin;
 
@@ -14,9 +15,13 @@ public final class FeatureTexts {
         return StructureEditPlugin.INSTANCE.getString(key(feature, "feature"));
     }
 
-    /** What a feature means. */
+    /** What a feature means; its label where no more is to be said. */
     public static String help(EStructuralFeature feature) {
-        return StructureEditPlugin.INSTANCE.getString(key(feature, "description"));
+        try {
+            return StructureEditPlugin.INSTANCE.getString(key(feature, "description"));
+        } catch (MissingResourceException labelSaysAll) {
+            return label(feature);
+        }
     }
 
     private static String key(EStructuralFeature feature, String end) {

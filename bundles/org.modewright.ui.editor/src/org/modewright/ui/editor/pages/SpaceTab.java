@@ -30,7 +30,7 @@ public final class SpaceTab implements EditorPage {
         parts = new SashForm(parent, SWT.HORIZONTAL);
         space = new SpacePage(parts, context.session(), context::model);
         form = new PropertyForm(parts, context);
-        parts.setWeights(66, 34);
+        parts.setWeights(70, 30);
     }
 
     /** The drawing. */
