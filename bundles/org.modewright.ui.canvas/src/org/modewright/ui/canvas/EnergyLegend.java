@@ -14,7 +14,8 @@ final class EnergyLegend {
 
     private static final int MARGIN = 8;
     private static final int STRIP_WIDTH = 12;
-    private static final int STRIP_HEIGHT = 112;
+    private static final int TALLEST = 112;
+    private static final int LEAST = 24;
 
     private final StructureCanvas canvas;
     private final ColourRamp ramp;
@@ -43,21 +44,26 @@ final class EnergyLegend {
         gc.drawText(title, area.width - MARGIN - size.x, MARGIN, true);
         int top = MARGIN + size.y + MARGIN;
         int left = area.width - MARGIN - STRIP_WIDTH;
-        paintStrip(gc, left, top);
-        for (int part = 0; part <= 2; part++) {
-            String text = Numbers.percent(largest * part / 2);
+        int height = Math.min(TALLEST, area.height - top - MARGIN);
+        if (height < LEAST) {
+            return;
+        }
+        paintStrip(gc, left, top, height);
+        int parts = height < 3 * size.y ? 1 : 2;
+        for (int part = 0; part <= parts; part++) {
+            String text = Numbers.percent(largest * part / parts);
             Point extent = gc.textExtent(text);
-            int y = top + STRIP_HEIGHT - part * STRIP_HEIGHT / 2;
-            gc.drawText(text, left - MARGIN / 2 - extent.x, Math.max(top, Math.min(y - extent.y / 2, top + STRIP_HEIGHT - extent.y)), true);
+            int y = top + height - part * height / parts;
+            gc.drawText(text, left - MARGIN / 2 - extent.x, Math.max(top, Math.min(y - extent.y / 2, top + height - extent.y)), true);
         }
     }
 
-    private void paintStrip(GC gc, int left, int top) {
-        for (int row = 0; row < STRIP_HEIGHT; row++) {
-            int argb = ramp.argb(1 - row / (double) (STRIP_HEIGHT - 1));
+    private void paintStrip(GC gc, int left, int top, int height) {
+        for (int row = 0; row < height; row++) {
+            int argb = ramp.argb(1 - row / (double) (height - 1));
             gc.setBackground(new Color(argb >> 16 & 0xFF, argb >> 8 & 0xFF, argb & 0xFF));
             gc.fillRectangle(left, top + row, STRIP_WIDTH, 1);
         }
-        gc.drawRectangle(left, top, STRIP_WIDTH, STRIP_HEIGHT);
+        gc.drawRectangle(left, top, STRIP_WIDTH, height);
     }
 }

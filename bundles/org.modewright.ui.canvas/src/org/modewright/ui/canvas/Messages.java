@@ -16,6 +16,7 @@ final class Messages extends NLS {
     public static String View_sections;
     public static String View_nodes;
     public static String Shape_views;
+    public static String Shape_noModel;
     public static String Shape_play;
     public static String Shape_pause;
     public static String Shape_stepBack;
@@ -41,6 +42,13 @@ final class Messages extends NLS {
     public static String Shape_sentenceUnstable;
     public static String Shape_holds;
     public static String Shape_spin;
+    public static String Facts_section;
+    public static String Facts_material;
+    public static String Facts_length;
+    public static String Facts_group;
+    public static String Facts_startFree;
+    public static String Facts_endFree;
+    public static String Facts_energy;
     public static String Legend_strain;
     public static String Legend_kinetic;
 

@@ -1,5 +1,8 @@
 package org.modewright.ui.canvas;
 
+import java.nio.ByteBuffer;
+import java.nio.ByteOrder;
+import java.nio.IntBuffer;
 import org.eclipse.swt.graphics.Device;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Image;
@@ -12,10 +15,12 @@ import org.modewright.render.Raster;
 /** Copies a raster to the screen; keeps its buffer from frame to frame. */
 final class RasterImage {
 
-    private static final PaletteData DIRECT = new PaletteData(0xFF0000, 0xFF00, 0xFF);
+    /** Blue, green, red, unused: the bytes of a raster's colour in little-endian order, so that a frame is copied in one piece. */
+    private static final PaletteData LITTLE_ENDIAN = new PaletteData(0xFF00, 0xFF0000, 0xFF000000);
 
     private final Device device;
     private ImageData data;
+    private IntBuffer pixels;
 
     RasterImage(Device device) {
         this.device = device;
@@ -37,17 +42,10 @@ final class RasterImage {
     /** The raster as image data, valid until the next call. */
     ImageData copy(Raster raster) {
         if (data == null || data.width != raster.width() || data.height != raster.height()) {
-            data = new ImageData(raster.width(), raster.height(), 32, DIRECT);
+            data = new ImageData(raster.width(), raster.height(), 32, LITTLE_ENDIAN);
+            pixels = ByteBuffer.wrap(data.data).order(ByteOrder.LITTLE_ENDIAN).asIntBuffer();
         }
-        int[] colours = raster.colour();
-        byte[] bytes = data.data;
-        int count = raster.width() * raster.height();
-        for (int i = 0, at = 0; i < count; i++, at += 4) {
-            int colour = colours[i];
-            bytes[at + 1] = (byte) (colour >> 16);
-            bytes[at + 2] = (byte) (colour >> 8);
-            bytes[at + 3] = (byte) colour;
-        }
+        pixels.put(0, raster.colour(), 0, raster.width() * raster.height());
         return data;
     }
 }

@@ -6,16 +6,17 @@ import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Scale;
+import org.modewright.ui.AnimationPreferences;
 import org.modewright.ui.UiIds;
 
 /** Amplitude, speed and phase of the moving shape. */
 final class ShapeControls {
 
     private static final int STEPS = 100;
-    private static final double LEAST_AMPLITUDE = 0.005;
-    private static final double MOST_AMPLITUDE = 0.25;
+    private static final double LEAST_AMPLITUDE = 0.01;
+    private static final double MOST_AMPLITUDE = 0.5;
     private static final double LEAST_SPEED = 0.1;
-    private static final double MOST_SPEED = 3;
+    private static final double MOST_SPEED = 5;
 
     private final Scale amplitude;
     private final Scale speed;
@@ -29,8 +30,8 @@ final class ShapeControls {
         layout.marginHeight = 0;
         layout.marginWidth = 8;
         bar.setLayout(layout);
-        amplitude = scale(bar, Messages.Shape_amplitude, "shape.amplitude", position(0.06, LEAST_AMPLITUDE, MOST_AMPLITUDE));
-        speed = scale(bar, Messages.Shape_speed, "shape.speed", position(0.6, LEAST_SPEED, MOST_SPEED));
+        amplitude = scale(bar, Messages.Shape_amplitude, "shape.amplitude", position(AnimationPreferences.amplitude(), LEAST_AMPLITUDE, MOST_AMPLITUDE));
+        speed = scale(bar, Messages.Shape_speed, "shape.speed", position(AnimationPreferences.speed(), LEAST_SPEED, MOST_SPEED));
         phase = scale(bar, Messages.Shape_phase, "shape.phase", 0);
         amplitude.addListener(SWT.Selection, event -> whenMoved.run());
         speed.addListener(SWT.Selection, event -> whenMoved.run());

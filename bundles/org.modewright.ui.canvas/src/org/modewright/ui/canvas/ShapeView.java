@@ -29,16 +29,17 @@ import org.eclipse.ui.actions.ActionFactory;
 import org.eclipse.ui.part.ViewPart;
 import org.modewright.modal.Dominance.Energy;
 import org.modewright.modal.ModalResult;
-import org.modewright.model.edit.Labels;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.render.ColourRamp;
 import org.modewright.render.Deformation;
 import org.modewright.render.ModeAnimator;
 import org.modewright.render.PngEncoder;
 import org.modewright.render.Raster;
+import org.modewright.ui.AnimationPreferences;
 import org.modewright.ui.AuditSelection;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
+import org.modewright.ui.canvas.drawing.StructureDrawing;
 import org.modewright.ui.widgets.EmptyState;
 import org.modewright.ui.widgets.Images;
 import org.modewright.ui.widgets.SentenceBar;
@@ -70,7 +71,7 @@ public final class ShapeView extends ViewPart {
     private int shownMode = -1;
     private Deformation deformation;
     private ModeAnimator animator;
-    private boolean playing = true;
+    private boolean playing = AnimationPreferences.plays();
     private boolean ticking;
     private long lastTick;
 
@@ -114,7 +115,7 @@ public final class ShapeView extends ViewPart {
         moving.setLayout(plain());
         canvas = new StructureCanvas(moving, new Bridge());
         canvas.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
-        canvas.describeWith(Labels::of);
+        canvas.describeWith(object -> shownResult == null ? ObjectFacts.of(object) : ObjectFacts.of(object, shownResult, shownMode));
         canvas.options().labels(false);
         canvas.addListener(SWT.KeyDown, this::key);
         legend = new EnergyLegend(canvas, ramp);
@@ -215,7 +216,10 @@ public final class ShapeView extends ViewPart {
     }
 
     private void changed(Change change) {
-        if (change == Change.SELECTION || change == Change.RESULT || change == Change.MODEL) {
+        if (change == Change.MODEL) {
+            drawnModel = null;
+        }
+        if (change != Change.RUNNING) {
             showAll();
         } else {
             sentence.setStale(session.isStale(), session::run);
@@ -224,8 +228,12 @@ public final class ShapeView extends ViewPart {
 
     private void showAll() {
         sentence.setStale(session.isStale(), session::run);
-        if (session.result() == null || session.model() == null) {
+        if (session.result() == null) {
             stopShape();
+            return;
+        }
+        if (session.model() == null) {
+            showNothing(Messages.Shape_noModel, null, null);
             return;
         }
         ModalResult result = session.result().modal();
@@ -248,7 +256,7 @@ public final class ShapeView extends ViewPart {
 
     private void drawModel() {
         StructuralModel model = session.model();
-        if (model != drawnModel || session.isStale()) {
+        if (model != drawnModel) {
             drawnModel = model;
             canvas.show(StructureDrawing.of(model));
             deformation = null;
@@ -256,11 +264,15 @@ public final class ShapeView extends ViewPart {
     }
 
     private void showNoMode(ModalResult result) {
+        boolean any = !result.modes().isEmpty();
+        showNothing(any ? Messages.Shape_noMode : Messages.Shape_noModes, any ? Messages.Shape_selectFirst : null,
+                any ? () -> selectMode(0) : null);
+    }
+
+    private void showNothing(String why, String link, Runnable action) {
         stopShape();
         sentence.show(SentenceBar.Sign.NONE, "");
-        boolean any = !result.modes().isEmpty();
-        noMode.show(any ? Messages.Shape_noMode : Messages.Shape_noModes, any ? Messages.Shape_selectFirst : null,
-                any ? () -> selectMode(0) : null);
+        noMode.show(why, link, action);
         top(noMode);
     }
 

@@ -9,10 +9,10 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
-import org.modewright.model.edit.Labels;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
+import org.modewright.ui.canvas.drawing.StructureDrawing;
 import org.modewright.ui.widgets.EmptyState;
 
 /**
@@ -51,7 +51,7 @@ public final class SpacePage extends Composite {
         tools.createControl(body).setLayoutData(new GridData(SWT.RIGHT, SWT.TOP, true, false));
         canvas = new StructureCanvas(body, new Bridge());
         canvas.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
-        canvas.describeWith(Labels::of);
+        canvas.describeWith(ObjectFacts::of);
         ViewActions.views(canvas).forEach(tools::add);
         ViewActions.options(canvas).forEach(tools::add);
         tools.update(true);

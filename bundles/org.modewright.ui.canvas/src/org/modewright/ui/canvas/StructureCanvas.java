@@ -28,6 +28,7 @@ import org.modewright.render.StandardView;
 import org.modewright.render.StillImage;
 import org.modewright.render.Theme;
 import org.modewright.ui.UiIds;
+import org.modewright.ui.canvas.drawing.StructureDrawing;
 import org.modewright.ui.widgets.ThemeColours;
 
 /**

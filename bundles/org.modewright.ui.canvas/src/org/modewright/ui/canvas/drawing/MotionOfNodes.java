@@ -1,5 +1,6 @@
-package org.modewright.ui.canvas;
+package org.modewright.ui.canvas.drawing;
 
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -7,14 +8,18 @@ import org.modewright.fem.NodePoint;
 import org.modewright.modal.ModalResult;
 
 /** The motion of the nodes in one mode, found by the nodes' ids, so that a model that has changed since the run is still drawn. */
-final class MotionOfNodes {
+public final class MotionOfNodes {
 
     private static final int COMPONENTS = 6;
 
     private final Map<String, Integer> index = new HashMap<>();
     private final double[] shape;
 
-    MotionOfNodes(ModalResult result, int mode) {
+    /**
+     * @param result the run
+     * @param mode index of the mode, from 0
+     */
+    public MotionOfNodes(ModalResult result, int mode) {
         List<NodePoint> nodes = result.nodes();
         for (int i = 0; i < nodes.size(); i++) {
             index.put(nodes.get(i).id(), i);
@@ -30,10 +35,10 @@ final class MotionOfNodes {
      * @param target where the six components are put
      * @param at index of the first
      */
-    void at(String node, double[] arm, double[] target, int at) {
+    public void at(String node, double[] arm, double[] target, int at) {
         Integer number = index.get(node);
         if (number == null) {
-            java.util.Arrays.fill(target, at, at + COMPONENTS, 0);
+            Arrays.fill(target, at, at + COMPONENTS, 0);
             return;
         }
         int from = COMPONENTS * number;

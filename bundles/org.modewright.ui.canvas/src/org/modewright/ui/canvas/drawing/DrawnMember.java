@@ -1,4 +1,4 @@
-package org.modewright.ui.canvas;
+package org.modewright.ui.canvas.drawing;
 
 import java.util.EnumSet;
 import java.util.Set;
@@ -11,9 +11,12 @@ import org.modewright.model.structure.Vector;
 /**
  * A frame member as it is drawn: the flexible part between its rigid zones, with what is needed to bend it with its nodes.
  */
-final class DrawnMember {
+public final class DrawnMember {
 
     private static final int DIMENSIONS = 3;
+
+    /** Bars that carry axial force alone are drawn slender beside the members that bend. */
+    private static final double BAR = 0.5;
 
     private final String startNode;
     private final String endNode;
@@ -24,6 +27,8 @@ final class DrawnMember {
     private final double[] axes;
     private final double length;
     private final boolean straight;
+    private final double width;
+    private final double depth;
     private final Set<Component> startFree = EnumSet.noneOf(Component.class);
     private final Set<Component> endFree = EnumSet.noneOf(Component.class);
 
@@ -31,6 +36,8 @@ final class DrawnMember {
         startNode = member.getStart().getId();
         endNode = member.getEnd().getId();
         straight = member.isAxialOnly();
+        width = straight ? BAR * SectionSize.width(member.getSection()) : SectionSize.width(member.getSection());
+        depth = straight ? BAR * SectionSize.depth(member.getSection()) : SectionSize.depth(member.getSection());
         startFree.addAll(member.getStartFree());
         endFree.addAll(member.getEndFree());
         double[] p = offset(member.getStart(), member.getStartOffset());
@@ -51,7 +58,7 @@ final class DrawnMember {
     }
 
     /** The member as drawn; null where it lacks a node or has no length, which the checks of the model report. */
-    static DrawnMember of(Member member) {
+    public static DrawnMember of(Member member) {
         if (member.getStart() == null || member.getEnd() == null) {
             return null;
         }
@@ -72,11 +79,13 @@ final class DrawnMember {
         return axis == 0 ? node.getX() : axis == 1 ? node.getY() : node.getZ();
     }
 
-    double[] start() {
+    /** Start of the flexible part. */
+    public double[] start() {
         return start;
     }
 
-    double[] end() {
+    /** End of the flexible part. */
+    public double[] end() {
         return end;
     }
 
@@ -84,16 +93,19 @@ final class DrawnMember {
         return new double[] {axes[3], axes[4], axes[5]};
     }
 
-    boolean isStraight() {
+    /** Whether it stays straight, as a bar does. */
+    public boolean isStraight() {
         return straight;
     }
 
-    String startNode() {
-        return startNode;
+    /** Outer size along local y. */
+    double width() {
+        return width;
     }
 
-    String endNode() {
-        return endNode;
+    /** Outer size along local z. */
+    double depth() {
+        return depth;
     }
 
     /** Whether the start of the flexible part lies apart from its node. */
@@ -122,7 +134,7 @@ final class DrawnMember {
      * rotation is the one that leaves it free of moment in the Euler&ndash;Bernoulli member: 3/2 of the chord's slope less half of the
      * other end's; with both ends released the chord's.
      */
-    double[] ends(MotionOfNodes motion) {
+    public double[] ends(MotionOfNodes motion) {
         double[] ends = new double[12];
         motion.at(startNode, startArm, ends, 0);
         motion.at(endNode, endArm, ends, 6);
