@@ -93,6 +93,37 @@ class BeamFrequencyTest {
         }
     }
 
+    @ParameterizedTest
+    @CsvSource({"rz, rz, 3.14159265, 6.28318531, 9.42477796", "'', rz, 3.92660231, 7.06858275, 10.21017612",
+        "rz, uy rz, 3.92660231, 7.06858275, 10.21017612"})
+    void hingesInTheMemberConvergeLikeHingesAtTheSupport(String start, String end, double first, double second, double third) {
+        // the same closed forms as above; a clamped end with shear and moment released is a free end, and a pinned-free beam has one
+        // rigid-body mode
+        double[] exact = {first, second, third};
+        double[] coarse = hinged(10, start, end);
+        double[] fine = hinged(20, start, end);
+        int rigid = end.contains("uy") ? 1 : 0;
+        for (int mode = 0; mode < 3; mode++) {
+            double error = fine[rigid + mode] / exact[mode] - 1.0;
+            double expected = Math.pow(exact[mode] / 20.0, 4) / 2880.0;
+            // a last member with shear and moment released stays straight, which adds an error of the order h^5
+            double bound = rigid == 0 ? 1.2 : 12.0;
+            assertTrue(error < bound * expected + 2e-9 && error > 0.5 * expected, "mode " + mode + ": error " + error + " of " + expected);
+            if (expected > 1e-7) {
+                double order = order(coarse[rigid + mode] / exact[mode] - 1.0, error);
+                assertTrue(order > 3.85 && order < (rigid == 0 ? 4.15 : 5.15), "order " + order + " of mode " + mode);
+            }
+        }
+    }
+
+    private static double[] hinged(int members, String start, String end) {
+        Beam beam = beam(members, "uy rz", "uy rz");
+        var all = beam.structure().model().getMembers();
+        TestStructure.release(all.get(0), start, "");
+        TestStructure.release(all.get(members - 1), "", end);
+        return beam.betas();
+    }
+
     // Blevins (1979), Table 8-8; Laura, Pombo and Susemihl, J. Sound Vib. 37 (1974) 161-168; from memory, roots recomputed
     @ParameterizedTest
     @CsvSource({

@@ -10,17 +10,17 @@ import org.modewright.model.structure.MemberMass;
 import org.modewright.model.structure.Node;
 
 /** A member with a random mixture of all options, the same for the same seed. */
-final class RandomMember {
+public final class RandomMember {
 
     private final Random random;
     private final TestStructure structure;
 
-    RandomMember(long seed, TestStructure structure) {
+    public RandomMember(long seed, TestStructure structure) {
         this.random = new Random(seed);
         this.structure = structure;
     }
 
-    Random random() {
+    public Random random() {
         return random;
     }
 
@@ -32,7 +32,7 @@ final class RandomMember {
         return low + (high - low) * random.nextDouble();
     }
 
-    Member between(Node start, Node end) {
+    public Member between(Node start, Node end) {
         Material material = structure.material(between(1e10, 2e11), between(0.0, 0.4), between(1000, 8000));
         FrameSection section = structure.section(between(0.01, 0.1), between(1e-5, 1e-3), between(1e-5, 1e-3), between(1e-6, 1e-3),
                 chance() ? between(0.005, 0.05) : 0.0, chance() ? between(0.005, 0.05) : 0.0);
@@ -68,7 +68,7 @@ final class RandomMember {
     }
 
     /** Releases that leave no mechanism inside the member. */
-    void addSoundReleases(Member member) {
+    public void addSoundReleases(Member member) {
         if (chance()) {
             member.getStartFree().add(Component.RY);
         }
@@ -94,7 +94,7 @@ final class RandomMember {
     }
 
     /** Any releases at all. */
-    void addAnyReleases(Member member) {
+    public void addAnyReleases(Member member) {
         for (Component component : Component.values()) {
             if (random.nextBoolean()) {
                 member.getStartFree().add(component);

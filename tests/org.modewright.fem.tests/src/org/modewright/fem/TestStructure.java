@@ -32,26 +32,26 @@ import org.modewright.numerics.EigenSolvers;
 import org.modewright.numerics.Progress;
 
 /** Builds small structures for tests, in N, m and kg unless told otherwise, and solves them by the dense method. */
-final class TestStructure {
+public final class TestStructure {
 
-    static final String ALL = "ux uy uz rx ry rz";
+    public static final String ALL = "ux uy uz rx ry rz";
     /** Everything but motion in the x-y plane. */
-    static final String OUT_OF_XY = "uz rx ry";
+    public static final String OUT_OF_XY = "uz rx ry";
 
     private static final StructureFactory FACTORY = StructureFactory.eINSTANCE;
 
     private final StructuralModel model = ModelFile.create("test");
     private int ids;
 
-    TestStructure() {
+    public TestStructure() {
         this("N-m-kg");
     }
 
-    TestStructure(String units) {
+    public TestStructure(String units) {
         model.setUnits(UnitSystem.get(units));
     }
 
-    StructuralModel model() {
+    public StructuralModel model() {
         return model;
     }
 
@@ -62,7 +62,7 @@ final class TestStructure {
         return object;
     }
 
-    Node node(double x, double y, double z) {
+    public Node node(double x, double y, double z) {
         Node node = named(FACTORY.createNode());
         node.setX(x);
         node.setY(y);
@@ -71,7 +71,7 @@ final class TestStructure {
         return node;
     }
 
-    Material material(double young, double poisson, double density) {
+    public Material material(double young, double poisson, double density) {
         Material material = named(FACTORY.createMaterial());
         material.setYoung(young);
         material.setPoisson(poisson);
@@ -80,7 +80,7 @@ final class TestStructure {
         return material;
     }
 
-    FrameSection section(double area, double iy, double iz, double torsion, double shearY, double shearZ) {
+    public FrameSection section(double area, double iy, double iz, double torsion, double shearY, double shearZ) {
         FrameSection section = named(FACTORY.createFrameSection());
         section.setArea(area);
         section.setIy(iy);
@@ -92,7 +92,7 @@ final class TestStructure {
         return section;
     }
 
-    Member member(Node start, Node end, FrameSection section, Material material) {
+    public Member member(Node start, Node end, FrameSection section, Material material) {
         Member member = named(FACTORY.createMember());
         member.setStart(start);
         member.setEnd(end);
@@ -103,11 +103,11 @@ final class TestStructure {
     }
 
     /** A straight line of equal members; the nodes from the first to the last. */
-    Node[] line(double[] from, double[] to, int members, FrameSection section, Material material) {
+    public Node[] line(double[] from, double[] to, int members, FrameSection section, Material material) {
         return line(node(from[0], from[1], from[2]), node(to[0], to[1], to[2]), members, section, material);
     }
 
-    Node[] line(Node first, Node last, int members, FrameSection section, Material material) {
+    public Node[] line(Node first, Node last, int members, FrameSection section, Material material) {
         Node[] nodes = new Node[members + 1];
         nodes[0] = first;
         nodes[members] = last;
@@ -123,7 +123,7 @@ final class TestStructure {
     }
 
     /** Holds components of a node, on top of those held before. */
-    Support hold(Node node, String components) {
+    public Support hold(Node node, String components) {
         Support support = model.getSupports().stream().filter(s -> s.getNode() == node).findFirst().orElse(null);
         if (support == null) {
             support = named(FACTORY.createSupport());
@@ -139,13 +139,13 @@ final class TestStructure {
         return support;
     }
 
-    void holdAll(String components) {
+    public void holdAll(String components) {
         for (Node node : model.getNodes()) {
             hold(node, components);
         }
     }
 
-    static void release(Member member, String start, String end) {
+    public static void release(Member member, String start, String end) {
         for (Component component : Component.values()) {
             if (start.contains(component.getLiteral())) {
                 member.getStartFree().add(component);
@@ -156,11 +156,11 @@ final class TestStructure {
         }
     }
 
-    NodalMass mass(Node node, double translational) {
+    public NodalMass mass(Node node, double translational) {
         return mass(node, translational, translational, translational, 0.0, 0.0, 0.0);
     }
 
-    NodalMass mass(Node node, double x, double y, double z, double rx, double ry, double rz) {
+    public NodalMass mass(Node node, double x, double y, double z, double rx, double ry, double rz) {
         NodalMass mass = named(FACTORY.createNodalMass());
         mass.setNode(node);
         mass.setUx(x);
@@ -173,7 +173,7 @@ final class TestStructure {
         return mass;
     }
 
-    static Vector vector(double x, double y, double z) {
+    public static Vector vector(double x, double y, double z) {
         Vector vector = FACTORY.createVector();
         vector.setX(x);
         vector.setY(y);
@@ -182,7 +182,7 @@ final class TestStructure {
     }
 
     /** A spring; to ground where `to` is null. */
-    Spring spring(Node node, Node to, double... stiffness) {
+    public Spring spring(Node node, Node to, double... stiffness) {
         double[] k = Arrays.copyOf(stiffness, 6);
         Spring spring = named(FACTORY.createSpring());
         spring.setNode(node);
@@ -197,7 +197,7 @@ final class TestStructure {
         return spring;
     }
 
-    static void couple(Spring spring, Component first, Component second, double stiffness) {
+    public static void couple(Spring spring, Component first, Component second, double stiffness) {
         SpringCoupling coupling = FACTORY.createSpringCoupling();
         coupling.setFirst(first);
         coupling.setSecond(second);
@@ -205,14 +205,14 @@ final class TestStructure {
         spring.getCouplings().add(coupling);
     }
 
-    RigidFloor floor(Node... nodes) {
+    public RigidFloor floor(Node... nodes) {
         RigidFloor floor = named(FACTORY.createRigidFloor());
         floor.getNodes().addAll(Arrays.asList(nodes));
         model.getRigidFloors().add(floor);
         return floor;
     }
 
-    RigidLink link(Node from, Node to, Component... components) {
+    public RigidLink link(Node from, Node to, Component... components) {
         RigidLink link = named(FACTORY.createRigidLink());
         link.setFrom(from);
         link.setTo(to);
@@ -221,13 +221,13 @@ final class TestStructure {
         return link;
     }
 
-    MultiPointTie tie() {
+    public MultiPointTie tie() {
         MultiPointTie tie = named(FACTORY.createMultiPointTie());
         model.getTies().add(tie);
         return tie;
     }
 
-    static void term(MultiPointTie tie, Node node, Component component, double factor) {
+    public static void term(MultiPointTie tie, Node node, Component component, double factor) {
         TieTerm term = FACTORY.createTieTerm();
         term.setNode(node);
         term.setComponent(component);
@@ -235,7 +235,7 @@ final class TestStructure {
         tie.getTerms().add(term);
     }
 
-    Level level(String name, double elevation) {
+    public Level level(String name, double elevation) {
         Level level = named(FACTORY.createLevel());
         level.setName(name);
         level.setElevation(elevation);
@@ -243,7 +243,7 @@ final class TestStructure {
         return level;
     }
 
-    LoadPattern pattern(String name, double factor) {
+    public LoadPattern pattern(String name, double factor) {
         LoadPattern pattern = named(FACTORY.createLoadPattern());
         pattern.setName(name);
         pattern.setMassFactor(factor);
@@ -251,49 +251,49 @@ final class TestStructure {
         return pattern;
     }
 
-    static void load(LoadPattern pattern, Node node, double force) {
+    public static void load(LoadPattern pattern, Node node, double force) {
         NodeLoad load = FACTORY.createNodeLoad();
         load.setNode(node);
         load.setValue(force);
         pattern.getLoads().add(load);
     }
 
-    static void load(LoadPattern pattern, Member member, double forcePerLength) {
+    public static void load(LoadPattern pattern, Member member, double forcePerLength) {
         MemberLoad load = FACTORY.createMemberLoad();
         load.setMember(member);
         load.setValue(forcePerLength);
         pattern.getLoads().add(load);
     }
 
-    Snapshot snapshot() {
+    public Snapshot snapshot() {
         return Snapshot.of(model);
     }
 
-    Assembly assemble() {
+    public Assembly assemble() {
         return Assembly.of(snapshot(), Progress.NONE);
     }
 
-    EigenPairs pairs() {
+    public EigenPairs pairs() {
         return pairs(assemble());
     }
 
-    static EigenPairs pairs(Assembly assembly) {
+    public static EigenPairs pairs(Assembly assembly) {
         return EigenSolvers.dense().open(new EigenProblem(assembly.stiffness(), assembly.mass()), Progress.NONE)
                 .solve(new EigenRequest(Integer.MAX_VALUE, Double.POSITIVE_INFINITY), Progress.NONE);
     }
 
     /** Circular frequencies in rad/s, ascending; negative where the eigenvalue is. */
-    double[] circular() {
+    public double[] circular() {
         return Arrays.stream(pairs().values()).map(value -> Math.copySign(Math.sqrt(Math.abs(value)), value)).toArray();
     }
 
     /** Frequencies in Hz, ascending. */
-    double[] hertz() {
+    public double[] hertz() {
         return Arrays.stream(circular()).map(omega -> omega / (2.0 * Math.PI)).toArray();
     }
 
     /** Effective mass of each mode in a direction as a share of the movable mass (of the rotary inertia for a rotation). */
-    static double[] effectiveShares(Assembly assembly, EigenPairs pairs, int direction) {
+    public static double[] effectiveShares(Assembly assembly, EigenPairs pairs, int direction) {
         MassLedger ledger = assembly.ledger();
         double[] load = assembly.massTimesRigid(direction, ledger.centre());
         double whole = direction < 3 ? ledger.movable()[direction] : ledger.rotary()[direction - 3];

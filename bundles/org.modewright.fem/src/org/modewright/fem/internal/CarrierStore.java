@@ -86,6 +86,22 @@ public final class CarrierStore {
         return elements;
     }
 
+    /** For each node the carriers that are at it. */
+    int[][] carriersAtNodes() {
+        int[] count = new int[components / 6];
+        carriers.forEach(carrier -> Arrays.stream(carrier.nodes()).forEach(node -> count[node]++));
+        int[][] atNode = new int[count.length][];
+        for (int node = 0; node < count.length; node++) {
+            atNode[node] = new int[count[node]];
+        }
+        for (int carrier = carriers.size() - 1; carrier >= 0; carrier--) {
+            for (int node : carriers.get(carrier).nodes()) {
+                atNode[node][--count[node]] = carrier;
+            }
+        }
+        return atNode;
+    }
+
     int[] places(int carrier) {
         return places.get(carrier);
     }

@@ -23,23 +23,31 @@ final class MotionDropping {
     /** Components of a null vector below this share of its largest one, rotations as if at arm 1 m, are round-off. */
     private static final double MOVES = 1e-6;
 
+    /** Up to this size a group is eliminated as a whole, element by element, which is the sharper test. */
+    private static final int SMALL = 150;
+
     private final MatrixPair all;
     private final Transformation transformation;
+    private final CarrierRows rows;
+    private final int[][] carriersOfUnknowns;
     private final boolean[] drop;
     private final List<DroppedMotion> dropped = new ArrayList<>();
     private FullColumns stiffness;
     private FullColumns mass;
 
-    private MotionDropping(MatrixPair all, Transformation transformation) {
+    private MotionDropping(MatrixPair all, CarrierStore store, Transformation transformation) {
         this.all = all;
         this.transformation = transformation;
+        this.rows = new CarrierRows(store, transformation);
         this.drop = new boolean[transformation.unknowns()];
+        this.carriersOfUnknowns = new int[transformation.unknowns()][];
     }
 
     static MotionDropping of(MatrixPair all, CarrierStore store, Transformation transformation, Progress progress) {
-        MotionDropping dropping = new MotionDropping(all, transformation);
+        MotionDropping dropping = new MotionDropping(all, store, transformation);
         progress.report("looking for motions without stiffness and mass", Double.NaN);
         int[] suspects = SuspectUnknowns.of(store, transformation, progress);
+        dropping.findCarriers(suspects, store);
         for (int[] group : dropping.groups(suspects)) {
             progress.checkCancelled();
             dropping.search(group, progress);
@@ -103,18 +111,42 @@ final class MotionDropping {
         }
     }
 
-    private void search(int[] group, Progress progress) {
-        MatrixPair own = all.restrictedTo(group);
-        if (group.length == 1) {
-            if (own.stiffness().get(0, 0) == 0.0 && own.mass().get(0, 0) == 0.0) {
-                dropIfFree(group, group[0], new double[] {1.0});
+    private void findCarriers(int[] suspects, CarrierStore store) {
+        for (int unknown : suspects) {
+            carriersOfUnknowns[unknown] = new int[0];
+        }
+        for (int carrier = 0; carrier < store.carriers().size() && suspects.length > 0; carrier++) {
+            for (int unknown : rows.unknowns(carrier)) {
+                int[] known = carriersOfUnknowns[unknown];
+                if (known != null) {
+                    carriersOfUnknowns[unknown] = Arrays.copyOf(known, known.length + 1);
+                    carriersOfUnknowns[unknown][known.length] = carrier;
+                }
             }
+        }
+    }
+
+    private void search(int[] group, Progress progress) {
+        if (group.length <= SMALL) {
+            searchByElements(group);
             return;
         }
+        MatrixPair own = all.restrictedTo(group);
         PencilReduction reduction = PencilReduction.of(new EigenProblem(own.stiffness(), own.mass()), progress);
         int[] unknowns = reduction.droppedDegreesOfFreedom();
         for (int i = 0; i < unknowns.length; i++) {
             dropIfFree(group, group[unknowns[i]], reduction.nullVectors()[i]);
+        }
+    }
+
+    private void searchByElements(int[] group) {
+        int[] carriers = Arrays.stream(group).flatMap(unknown -> Arrays.stream(carriersOfUnknowns[unknown])).sorted().distinct()
+                .toArray();
+        SmallNullSpace space = rows.nullSpace(carriers, group);
+        for (int j = 0; j < group.length; j++) {
+            if (space.isFree(j)) {
+                drop(group, group[j], space.solution(j));
+            }
         }
     }
 
@@ -123,6 +155,10 @@ final class MotionDropping {
         if (stiffness.hasProduct(group, vector) || mass.hasProduct(group, vector)) {
             return;
         }
+        drop(group, unknown, vector);
+    }
+
+    private void drop(int[] group, int unknown, double[] vector) {
         drop[unknown] = true;
         int place = transformation.componentOf(unknown);
         dropped.add(new DroppedMotion(place / Components.COUNT, place % Components.COUNT, nodes(group, vector)));

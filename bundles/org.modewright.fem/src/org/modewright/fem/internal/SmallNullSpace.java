@@ -9,8 +9,8 @@ import java.util.Arrays;
  */
 final class SmallNullSpace {
 
-    /** Pivots below this share of the largest entry, and multipliers below it, count as zero. */
-    private static final double NEGLIGIBLE = 1e-10;
+    /** Pivots and multipliers below this count as zero. */
+    private static final double NEGLIGIBLE = 1e-12;
 
     private final double[] matrix;
     private final int rows;
@@ -21,7 +21,7 @@ final class SmallNullSpace {
     /**
      * Eliminates.
      *
-     * @param matrix A by rows, its entries comparable; overwritten
+     * @param matrix A by rows, scaled so that entries far below 1 are round-off; overwritten
      * @param rows number of rows
      * @param columns number of unknowns
      */
@@ -35,12 +35,9 @@ final class SmallNullSpace {
     }
 
     private void eliminate() {
-        double first = 0.0;
         while (rank < Math.min(rows, columns)) {
             int largest = largest();
-            double pivot = Math.abs(matrix[largest]);
-            first = Math.max(first, pivot);
-            if (pivot <= NEGLIGIBLE * first) {
+            if (Math.abs(matrix[largest]) <= NEGLIGIBLE) {
                 return;
             }
             swap(largest / columns);
@@ -84,6 +81,21 @@ final class SmallNullSpace {
             }
             matrix[i * columns + column] = 0.0;
         }
+    }
+
+    /** Whether an unknown is free to choose; the free ones determine all others. */
+    boolean isFree(int unknown) {
+        return pivotRow[unknown] < 0;
+    }
+
+    /** The solution with 1 at one free unknown and 0 at the other free ones. */
+    double[] solution(int free) {
+        double[] solution = new double[columns];
+        for (int j = 0; j < columns; j++) {
+            solution[j] = pivotRow[j] < 0 ? 0.0 : -matrix[pivotRow[j] * columns + free];
+        }
+        solution[free] = 1.0;
+        return solution;
     }
 
     /** Whether some solution moves an unknown. */
