@@ -202,13 +202,13 @@ class CommandsTest {
     /** model file -> folder -> zip -> model file: nothing is lost. */
     @Test
     void convertGoesRound() throws IOException {
-        String folder = temporary.resolve("demo").toString();
+        String folder = temporary.resolve("demo.package") + "/";
         String zip = temporary.resolve("demo.zip").toString();
         Path file = temporary.resolve("demo.modewright");
         for (List<String> step : List.of(List.of("sample:demo", folder), List.of(folder, zip), List.of(zip, file.toString()))) {
             Console console = Console.run("convert", step.get(0), step.get(1));
             assertEquals(0, console.status(), console.toString());
-            assertEquals("Wrote " + step.get(1), console.out().strip());
+            assertEquals("Wrote " + Path.of(step.get(1)), console.out().strip());
             assertEquals("", console.err());
         }
         assertArrayEquals(ModelFile.bytes(sample("demo")), Files.readAllBytes(file));

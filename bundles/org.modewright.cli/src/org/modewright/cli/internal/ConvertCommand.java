@@ -27,7 +27,7 @@ import picocli.CommandLine.Spec;
 @Command(name = "convert", sortOptions = false, header = {"Converts between model file, table package and matrices.", ""},
         customSynopsis = "modewright convert IN OUT [OPTIONS]",
         footer = {"", "IN is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
-            "OUT decides what is written:", "  NAME.modewright       a model file", "  NAME.zip, or a folder  a table package",
+            "OUT decides what is written:", "  NAME.modewright       a model file", "  NAME.zip, FOLDER/      a table package",
             "  NAME.mtx              NAME.K.mtx, NAME.M.mtx and NAME.dofs.csv: stiffness, mass and the free degrees of freedom, SI",
             "Exit status: 0 done; 2 bad input or options; 3 the run could not be completed."})
 public final class ConvertCommand implements Callable<Integer> {
@@ -41,7 +41,7 @@ public final class ConvertCommand implements Callable<Integer> {
     private String in;
 
     @Parameters(paramLabel = "OUT", index = "1", description = "What is written; files of this name are replaced.")
-    private Path out;
+    private String target;
 
     @Option(names = "--quiet", description = "No progress on standard error.")
     private boolean quiet;
@@ -49,12 +49,15 @@ public final class ConvertCommand implements Callable<Integer> {
     @Option(names = {"-h", "--help"}, usageHelp = true, description = "Shows this help.")
     private boolean help;
 
+    private Path out;
+
     public ConvertCommand(CommandContext context) {
         this.context = context;
     }
 
     @Override
     public Integer call() throws Exception {
+        out = Path.of(target);
         checkOut();
         Input input = Input.read(in);
         input.warn(context);
@@ -75,7 +78,8 @@ public final class ConvertCommand implements Callable<Integer> {
     }
 
     private boolean isNewFolder() {
-        return out.getFileName() != null && out.getFileName().toString().indexOf('.') < 0 && !Files.exists(out);
+        boolean named = target.endsWith("/") || out.getFileName() != null && out.getFileName().toString().indexOf('.') < 0;
+        return named && !Files.exists(out);
     }
 
     private List<Path> write(Input input) throws IOException {
