@@ -9,6 +9,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.util.Arrays;
 import java.util.Random;
+import java.util.stream.IntStream;
 import java.util.stream.Stream;
 
 import org.junit.jupiter.api.Named;
@@ -85,7 +86,7 @@ class EigenSolverContractTest {
         }
     }
 
-    /** Fixed-free chain: &lambda;<sub>r</sub> = 4 k/m sin<sup>2</sup>((2r - 1) &pi; / (2 (2N + 1))); textbook, e.g. Humar, Dynamics of Structures. */
+    /** Fixed-free chain: 4 k/m sin<sup>2</sup>((2r - 1) &pi; / (2 (2N + 1))); textbook, e.g. Humar, Dynamics of Structures. */
     private static double[] fixedFree(int masses, double ratio) {
         double[] values = new double[masses];
         for (int r = 1; r <= masses; r++) {
@@ -438,7 +439,7 @@ class EigenSolverContractTest {
     }
 
     private static EigenPairs without(EigenPairs pairs, int missing) {
-        int[] kept = java.util.stream.IntStream.range(0, pairs.count()).filter(i -> i != missing).toArray();
+        int[] kept = IntStream.range(0, pairs.count()).filter(i -> i != missing).toArray();
         return new EigenPairs(Arrays.stream(kept).mapToDouble(i -> pairs.values()[i]).toArray(),
                 Arrays.stream(kept).mapToObj(i -> pairs.vectors()[i]).toArray(double[][]::new),
                 Arrays.stream(kept).mapToDouble(i -> pairs.residuals()[i]).toArray(),
@@ -456,8 +457,16 @@ class EigenSolverContractTest {
 
     @ParameterizedTest
     @MethodSource("solvers")
-    void massless(EigenSolver solver) {
+    void nothingMovesWithoutMass(EigenSolver solver) {
         EigenPairs pairs = solveAll(solver, new EigenProblem(Pencils.diagonal(2.0, 1.0), Pencils.diagonal(0.0, 0.0)));
+        assertEquals(0, pairs.count());
+        assertTrue(pairs.exhausted());
+    }
+
+    @ParameterizedTest
+    @MethodSource("solvers")
+    void emptyProblemHasNoModes(EigenSolver solver) {
+        EigenPairs pairs = solveAll(solver, new EigenProblem(Pencils.diagonal(), Pencils.diagonal()));
         assertEquals(0, pairs.count());
         assertTrue(pairs.exhausted());
     }

@@ -119,6 +119,16 @@ class FactorisationTest {
         assertEquals(new Inertia(n / 2, 0, n / 2), factorisation.inertia());
     }
 
+    /** The chain of ten masses has the eigenvalue 1, its fourth: 2 sin(7 pi / 42) = 1. Its matrices are integers, so the shift is exact. */
+    @Test
+    void shiftOnAnEigenvalueIsSeen() {
+        EigenProblem chain = Pencils.chain(10, 1.0, 1.0, true, false);
+        Factorisation factorisation = Factorisers.sparse(chain, Progress.NONE)
+                .factorise(chain.stiffness(), chain.mass(), 1.0, Progress.NONE);
+        assertEquals(new Inertia(3, 1, 6), factorisation.inertia());
+        assertEquals(1, factorisation.zeroPivots().length);
+    }
+
     @Test
     void refusesAForeignPattern() {
         SymmetricMatrix a = Pencils.diagonal(1.0, 2.0);

@@ -6,6 +6,7 @@ import java.util.concurrent.FutureTask;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 
+import org.modewright.numerics.CancelledException;
 import org.modewright.numerics.Progress;
 
 /** Runs a computation that cannot be interrupted on a thread of its own; after a cancel its result is dropped. */
@@ -29,7 +30,7 @@ final class CancellableCall {
                 progress.checkCancelled();
             } catch (InterruptedException interrupted) {
                 Thread.currentThread().interrupt();
-                throw new org.modewright.numerics.CancelledException();
+                throw new CancelledException();
             } catch (ExecutionException failed) {
                 if (failed.getCause() instanceof RuntimeException cause) {
                     throw cause;

@@ -10,9 +10,10 @@ import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.Progress;
 
 /**
- * All eigenpairs through the spectral transformation of T. Ericsson and A. Ruhe, Math. Comp. 35 (1980) 1251-1268: with M = B B<sup>T</sup>
- * the matrix B<sup>T</sup>(K - &sigma;M)<sup>-1</sup>B of the order of the rank of M has the eigenvalues &theta; = 1/(&lambda; - &sigma;) and
- * its eigenvectors y give &phi; = (K - &sigma;M)<sup>-1</sup>B y / &theta;, free of massless components.
+ * All eigenpairs through the spectral transformation of T. Ericsson and A. Ruhe, Math. Comp. 35 (1980) 1251-1268: with
+ * M = B B<sup>T</sup> the matrix B<sup>T</sup>(K - &sigma;M)<sup>-1</sup>B of the order of the rank of M has the eigenvalues
+ * &theta; = 1/(&lambda; - &sigma;) and its eigenvectors y give &phi; = (K - &sigma;M)<sup>-1</sup>B y / &theta;, free of massless
+ * components.
  *
  * @param theta descending
  * @param vectors nearly M-orthonormal

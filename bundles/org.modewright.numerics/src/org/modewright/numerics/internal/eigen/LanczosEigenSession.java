@@ -107,7 +107,8 @@ final class LanczosEigenSession extends CertifiedSession {
             restart(basis.ritzPairs(progress), wanted, capacity);
         }
         while (true) {
-            grow(Math.min(capacity, Math.max(enough, basis.size() + EXPANSIONS_PER_CHECK * BLOCK)), progress);
+            int step = Math.max(EXPANSIONS_PER_CHECK * BLOCK, basis.size() / EXPANSIONS_PER_CHECK);
+            grow(Math.min(capacity, Math.max(enough, basis.size() + step)), progress);
             RitzPairs ritz = basis.ritzPairs(progress);
             int converged = ritz.converged(TOLERANCE, shifted().shift());
             progress.report("Converged modes: " + Math.min(converged, asked) + " of " + asked, Math.min(1.0, (double) converged / wanted));

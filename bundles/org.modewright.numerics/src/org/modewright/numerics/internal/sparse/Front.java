@@ -6,6 +6,9 @@ package org.modewright.numerics.internal.sparse;
  */
 final class Front {
 
+    /** Largest front whose square fits into one array. */
+    private static final int LARGEST = 46340;
+
     final int size;
     final int fullySummed;
     /** Position in the order of elimination of each row; permuted along with the rows. */
@@ -19,7 +22,11 @@ final class Front {
         this.size = index.length;
         this.fullySummed = fullySummed;
         this.index = index;
-        this.a = new double[Math.multiplyExact(size, size)];
+        if (size > LARGEST) {
+            throw new IllegalArgumentException("The equations are coupled too densely: " + size
+                    + " of them depend on each other at once, and at most " + LARGEST + " can be dealt with.");
+        }
+        this.a = new double[size * size];
         this.d = new double[fullySummed + 1];
         this.e = new double[fullySummed + 1];
     }

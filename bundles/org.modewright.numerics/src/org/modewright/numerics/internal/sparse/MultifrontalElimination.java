@@ -4,9 +4,9 @@ import org.modewright.numerics.Progress;
 import org.modewright.numerics.SymmetricMatrix;
 
 /**
- * Multifrontal LDL<sup>T</sup> factorisation (I. S. Duff, J. K. Reid, ACM Trans. Math. Softw. 9 (1983) 302-325; J. W. H. Liu, The multifrontal
- * method for sparse matrix solution: theory and practice, SIAM Review 34 (1992) 82-109) of S (K - &sigma;M) S, where the diagonal S of powers
- * of two brings the diagonal near 1.
+ * Multifrontal LDL<sup>T</sup> factorisation (I. S. Duff, J. K. Reid, ACM Trans. Math. Softw. 9 (1983) 302-325; J. W. H. Liu, The
+ * multifrontal method for sparse matrix solution: theory and practice, SIAM Review 34 (1992) 82-109) of S (K - &sigma;M) S, where the
+ * diagonal S of powers of two brings the diagonal near 1.
  */
 final class MultifrontalElimination {
 

@@ -1,5 +1,7 @@
 package org.modewright.numerics.internal.sparse;
 
+import java.util.Arrays;
+
 /**
  * C &larr; C - L W<sup>T</sup> on the lower triangle of a dense column-major array, W = L D. Operands are packed into strips of four rows
  * and multiplied in four by four register blocks.
@@ -86,7 +88,7 @@ final class RankUpdate {
     }
 
     private void subtractPart(double[] a, int target, int size, int depth, int row, int column, int height, int width) {
-        java.util.Arrays.fill(tile, 0.0);
+        Arrays.fill(tile, 0.0);
         subtractProduct(depth, left, row * depth, right, column * depth, tile, 0, BLOCK);
         for (int j = 0; j < width; j++) {
             for (int i = row == column ? j : 0; i < height; i++) {

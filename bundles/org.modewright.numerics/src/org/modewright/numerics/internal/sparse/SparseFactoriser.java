@@ -83,7 +83,7 @@ public final class SparseFactoriser implements Factoriser {
                 && Arrays.equals(a.row(), 0, a.entries(), b.row(), 0, b.entries());
     }
 
-    /** By position: the power of two nearest to the inverse root of |k<sub>ii</sub>| + |shift| |m<sub>ii</sub>|, or of the row's largest entry. */
+    /** By position: a power of two near the inverse root of |k<sub>ii</sub>| + |shift| |m<sub>ii</sub>|, or of the row's largest entry. */
     private double[] scale(SymmetricMatrix k, SymmetricMatrix m, double shift) {
         double[] size = absolute(k.diagonal());
         if (shift != 0.0) {
