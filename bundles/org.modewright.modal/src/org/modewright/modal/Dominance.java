@@ -118,7 +118,8 @@ public final class Dominance {
         return descending(rows);
     }
 
-    private static String label(Carrier carrier, RollUp by) {
+    /** What a carrier is summed under in a roll-up; empty where it has none. */
+    public static String label(Carrier carrier, RollUp by) {
         String label = switch (by) {
             case ELEMENT -> carrier.name();
             case GROUP -> carrier.group();

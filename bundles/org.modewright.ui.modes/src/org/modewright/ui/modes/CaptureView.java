@@ -4,10 +4,12 @@ import org.eclipse.jface.action.Action;
 import org.eclipse.jface.action.IAction;
 import org.eclipse.jface.action.IMenuManager;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.custom.SashForm;
+import org.eclipse.swt.custom.CTabFolder;
+import org.eclipse.swt.custom.CTabItem;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.ui.IMemento;
 import org.eclipse.ui.IViewSite;
 import org.eclipse.ui.PartInitException;
@@ -20,6 +22,7 @@ import org.modewright.model.structure.StructuralModel;
 import org.modewright.ui.AuditSelection;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
+import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.SentenceBar;
 import org.modewright.ui.widgets.SessionPage;
 
@@ -31,6 +34,7 @@ public final class CaptureView extends ViewPart {
     private AuditSession session;
     private SessionPage page;
     private SentenceBar sentence;
+    private CTabFolder tabs;
     private StaircasePlot plot;
     private MassTable masses;
     private boolean byPeriod;
@@ -52,12 +56,15 @@ public final class CaptureView extends ViewPart {
         content.setLayout(layout);
         sentence = new SentenceBar(content);
         sentence.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        SashForm parts = new SashForm(content, SWT.VERTICAL);
-        parts.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
-        plot = new StaircasePlot(parts, this::modePicked);
+        tabs = new CTabFolder(content, SWT.BOTTOM | SWT.FLAT);
+        tabs.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
+        tabs.setData(UiIds.WIDGET_ID, "capture.tabs");
+        plot = new StaircasePlot(tabs, this::modePicked);
         plot.setByPeriod(byPeriod);
-        masses = new MassTable(parts);
-        parts.setWeights(66, 34);
+        tab(Messages.Capture_tabStaircase, plot);
+        masses = new MassTable(tabs);
+        tab(Messages.Capture_tabMasses, masses.control());
+        tabs.setSelection(0);
         contributeActions();
         AuditSession.Listener listener = this::changed;
         session.addListener(listener);
@@ -65,10 +72,16 @@ public final class CaptureView extends ViewPart {
         showResult();
     }
 
+    private void tab(String label, Control control) {
+        CTabItem item = new CTabItem(tabs, SWT.NONE);
+        item.setText(label);
+        item.setControl(control);
+    }
+
     @Override
     public void setFocus() {
         if (page.hasContent()) {
-            plot.setFocus();
+            tabs.getSelection().getControl().setFocus();
         } else {
             page.setFocus();
         }
@@ -129,10 +142,10 @@ public final class CaptureView extends ViewPart {
     private void showMasses(AuditResult audit) {
         StructuralModel model = session.model();
         if (model == null) {
-            masses.show(audit.modal().mass(), 1, "kg");
+            masses.show(audit.modal(), 1, "kg");
         } else {
             Units units = Units.of(model);
-            masses.show(audit.modal().mass(), units.mass(), units.symbol(Quantity.MASS));
+            masses.show(audit.modal(), units.mass(), units.symbol(Quantity.MASS));
         }
     }
 

@@ -5,6 +5,9 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.modewright.fem.Carrier;
 import org.modewright.fem.Kind;
 import org.modewright.modal.Dominance;
 import org.modewright.modal.Dominance.Energy;
@@ -22,13 +25,22 @@ import org.modewright.modal.ModalResult;
  * @param kinetic share of the kinetic energy
  * @param running sum of the ranked share up to and including this row
  */
-record DominanceRow(String label, Kind kind, String elementId, double strain, double kinetic, double running) {
+public record DominanceRow(String label, Kind kind, String elementId, double strain, double kinetic, double running) {
 
     private record Key(String label, int carrier) {
     }
 
+    /** Ids of the elements that a row stands for: its own, or those of all carriers with its label. */
+    public Set<String> elementIds(ModalResult result, RollUp by) {
+        if (elementId != null) {
+            return Set.of(elementId);
+        }
+        return result.carriers().stream().filter(carrier -> label.equals(Dominance.label(carrier, by))).map(Carrier::id)
+                .collect(Collectors.toSet());
+    }
+
     /** The rows of a mode, the largest share of the ranking energy first. */
-    static List<DominanceRow> of(ModalResult result, int mode, RollUp by, Energy rankedBy) {
+    public static List<DominanceRow> of(ModalResult result, int mode, RollUp by, Energy rankedBy) {
         Dominance dominance = new Dominance(result);
         Map<Key, Share[]> pairs = new LinkedHashMap<>();
         collect(pairs, dominance.ranked(mode, Energy.STRAIN, by), 0);

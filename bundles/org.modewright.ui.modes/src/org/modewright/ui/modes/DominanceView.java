@@ -1,18 +1,21 @@
 package org.modewright.ui.modes;
 
 import java.util.Arrays;
+import java.util.HashSet;
+import java.util.List;
 import java.util.Set;
 import org.eclipse.jface.action.Action;
+import org.eclipse.jface.action.Separator;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.CTabFolder;
 import org.eclipse.swt.custom.CTabItem;
 import org.eclipse.swt.custom.StackLayout;
+import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
-import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
-import org.eclipse.swt.widgets.Label;
+import org.eclipse.ui.IActionBars;
 import org.eclipse.ui.IMemento;
 import org.eclipse.ui.IViewSite;
 import org.eclipse.ui.PartInitException;
@@ -26,6 +29,7 @@ import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.EmptyState;
+import org.modewright.ui.widgets.Images;
 import org.modewright.ui.widgets.SentenceBar;
 import org.modewright.ui.widgets.SessionPage;
 import org.modewright.ui.widgets.TextCopy;
@@ -43,7 +47,6 @@ public final class DominanceView extends ViewPart {
     private Composite rankingBody;
     private Composite ranked;
     private EmptyState noMode;
-    private Combo rollUp;
     private RankingTable ranking;
     private ElementModes elementModes;
     private RollUp by = RollUp.ELEMENT;
@@ -81,16 +84,28 @@ public final class DominanceView extends ViewPart {
         elementModes = new ElementModes(tabs, this::modePicked);
         tab(Messages.Dominance_tabModes, elementModes.control());
         tabs.setSelection(0);
-        getViewSite().getActionBars().setGlobalActionHandler(ActionFactory.COPY.getId(), new Action() {
-            @Override
-            public void run() {
-                copy();
-            }
-        });
+        contributeActions();
         AuditSession.Listener listener = this::changed;
         session.addListener(listener);
         page.addListener(SWT.Dispose, event -> session.removeListener(listener));
         showAll();
+    }
+
+    private void contributeActions() {
+        IActionBars bars = getViewSite().getActionBars();
+        RollUpChoice choice = new RollUpChoice(by, this::rollUpChosen);
+        bars.getToolBarManager().add(choice.toolItem());
+        choice.fill(bars.getMenuManager());
+        page.addListener(SWT.Dispose, event -> choice.dispose());
+        Action copy = new Action(Messages.Dominance_copy, Images.descriptor(Images.COPY)) {
+            @Override
+            public void run() {
+                copy();
+            }
+        };
+        bars.getMenuManager().add(new Separator());
+        bars.getMenuManager().add(copy);
+        bars.setGlobalActionHandler(ActionFactory.COPY.getId(), copy);
     }
 
     private void createRanking() {
@@ -98,22 +113,8 @@ public final class DominanceView extends ViewPart {
         rankingBody.setLayout(stack);
         noMode = new EmptyState(rankingBody);
         ranked = new Composite(rankingBody, SWT.NONE);
-        GridLayout layout = new GridLayout(2, false);
-        layout.marginHeight = 4;
-        layout.marginWidth = 0;
-        ranked.setLayout(layout);
-        Label label = new Label(ranked, SWT.NONE);
-        label.setText(Messages.Dominance_by);
-        GridData indented = new GridData();
-        indented.horizontalIndent = 8;
-        label.setLayoutData(indented);
-        rollUp = new Combo(ranked, SWT.READ_ONLY);
-        rollUp.setData(UiIds.WIDGET_ID, "dominance.rollUp");
-        rollUp.setItems(Arrays.stream(RollUp.values()).map(DominanceView::label).toArray(String[]::new));
-        rollUp.select(by.ordinal());
-        rollUp.addListener(SWT.Selection, event -> rollUpChosen());
-        ranking = new RankingTable(ranked, this::elementsPicked, id -> session.revealProperties(id), this::rankBy);
-        ranking.control().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 2, 1));
+        ranked.setLayout(new FillLayout());
+        ranking = new RankingTable(ranked, this::rowsPicked, session::revealProperties, this::rankBy);
         tab(Messages.Dominance_tabRanking, rankingBody);
     }
 
@@ -130,16 +131,6 @@ public final class DominanceView extends ViewPart {
         } else {
             page.setFocus();
         }
-    }
-
-    private static String label(RollUp by) {
-        return switch (by) {
-            case ELEMENT -> Messages.Dominance_ELEMENT;
-            case GROUP -> Messages.Dominance_GROUP;
-            case LEVEL -> Messages.Dominance_LEVEL;
-            case SECTION -> Messages.Dominance_SECTION;
-            case MATERIAL -> Messages.Dominance_MATERIAL;
-        };
     }
 
     private void changed(Change change) {
@@ -190,7 +181,7 @@ public final class DominanceView extends ViewPart {
 
     private void refreshRanking() {
         if (shownResult != null && shownMode >= 0) {
-            ranking.show(DominanceRow.of(shownResult, shownMode, by, rankedBy), label(by), rankedBy);
+            ranking.show(DominanceRow.of(shownResult, shownMode, by, rankedBy), RollUpChoice.header(by), rankedBy);
         }
     }
 
@@ -201,9 +192,10 @@ public final class DominanceView extends ViewPart {
         }
     }
 
-    private void rollUpChosen() {
-        by = RollUp.values()[rollUp.getSelectionIndex()];
+    private void rollUpChosen(RollUp chosen) {
+        by = chosen;
         refreshRanking();
+        ranking.select(session.selection().elementIds());
     }
 
     private void rankBy(Energy energy) {
@@ -211,7 +203,9 @@ public final class DominanceView extends ViewPart {
         refreshRanking();
     }
 
-    private void elementsPicked(Set<String> ids) {
+    private void rowsPicked(List<DominanceRow> rows) {
+        Set<String> ids = new HashSet<>();
+        rows.forEach(row -> ids.addAll(row.elementIds(shownResult, by)));
         session.select(session.selection().withElements(ids), this);
     }
 
@@ -221,6 +215,6 @@ public final class DominanceView extends ViewPart {
     }
 
     private void copy() {
-        TextCopy.put(tabs.getDisplay(), ranking.text());
+        TextCopy.put(tabs.getDisplay(), tabs.getSelectionIndex() == 0 ? ranking.text() : elementModes.text());
     }
 }

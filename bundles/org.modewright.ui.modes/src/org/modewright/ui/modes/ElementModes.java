@@ -1,5 +1,6 @@
 package org.modewright.ui.modes;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Set;
 import java.util.function.IntConsumer;
@@ -50,9 +51,9 @@ final class ElementModes {
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 3, 1));
         table.setData(UiIds.WIDGET_ID, "dominance.modes");
         column(SWT.RIGHT, Messages.Column_number, 56);
-        column(SWT.RIGHT, Messages.Column_period, 80);
-        column(SWT.RIGHT, Messages.Dominance_strain, 120);
-        column(SWT.RIGHT, Messages.Dominance_kinetic, 128);
+        column(SWT.RIGHT, Messages.Column_period, 64);
+        column(SWT.RIGHT, Messages.Dominance_strainShort, 88);
+        column(SWT.RIGHT, Messages.Dominance_kineticShort, 88);
         column(SWT.LEFT, Messages.Column_character, 200);
         table.addListener(SWT.Selection, event -> pick(whenPicked));
     }
@@ -75,6 +76,7 @@ final class ElementModes {
 
     private void refresh() {
         table.removeAll();
+        shares = List.of();
         if (result == null) {
             return;
         }
@@ -87,6 +89,17 @@ final class ElementModes {
                 Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()), mode.character().text()});
         }
         body.layout();
+    }
+
+    /** All rows as text, tab-separated, in full precision. */
+    String text() {
+        StringBuilder text = new StringBuilder(String.join("\t", Arrays.stream(table.getColumns()).map(TableColumn::getText).toList()));
+        for (ModeShare row : shares) {
+            Mode mode = result.modes().get(row.mode());
+            text.append('\n').append(String.join("\t", Integer.toString(mode.number()), Numbers.exact(mode.period()),
+                    Numbers.exact(row.strain() * 100), Numbers.exact(row.kinetic() * 100), mode.character().text()));
+        }
+        return text.toString();
     }
 
     private void pick(IntConsumer whenPicked) {

@@ -7,9 +7,11 @@ import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
 import org.modewright.modal.Direction;
 import org.modewright.ui.UiIds;
+import org.modewright.ui.widgets.Numbers;
 import org.modewright.ui.widgets.ThemeColours;
 
 /** Chooses which modes the table shows: all, local ones, or those with a share of effective mass in a direction. */
@@ -20,14 +22,16 @@ final class FilterBar {
 
     private final Combo kind;
     private final Label inLabel;
+    private final Label legend;
     private final Combo direction;
+    private final Label count;
     private final Consumer<ModeFilter> whenChanged;
 
     FilterBar(Composite parent, Consumer<ModeFilter> whenChanged) {
         this.whenChanged = whenChanged;
         Composite bar = new Composite(parent, SWT.NONE);
         bar.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        GridLayout layout = new GridLayout(5, false);
+        GridLayout layout = new GridLayout(6, false);
         layout.marginWidth = 8;
         layout.marginHeight = 0;
         layout.horizontalSpacing = 8;
@@ -46,8 +50,11 @@ final class FilterBar {
         direction.setData(UiIds.WIDGET_ID, "modes.filter.direction");
         direction.setItems(Messages.Filter_anyDirection, "X", "Y", "Z");
         direction.select(0);
-        Label legend = new Label(bar, SWT.NONE);
+        count = new Label(bar, SWT.NONE);
+        count.setData(UiIds.WIDGET_ID, "modes.filter.count");
+        legend = new Label(bar, SWT.NONE);
         legend.setText(Messages.Modes_legend);
+        legend.setToolTipText(Messages.Modes_legendTip);
         legend.setForeground(ThemeColours.secondaryText(bar));
         legend.setLayoutData(new GridData(SWT.RIGHT, SWT.CENTER, true, false));
         kind.addListener(SWT.Selection, event -> changed());
@@ -62,8 +69,24 @@ final class FilterBar {
 
     private void enableDirection() {
         boolean byShare = kind.getSelectionIndex() >= FIXED_ENTRIES;
-        direction.setVisible(byShare);
-        inLabel.setVisible(byShare);
+        include(direction, byShare);
+        include(inLabel, byShare);
+        include(legend, kind.getSelectionIndex() == 0);
+        include(count, kind.getSelectionIndex() != 0);
+        kind.getParent().layout();
+    }
+
+    private static void include(Control control, boolean included) {
+        control.setVisible(included);
+        GridData data = control.getLayoutData() instanceof GridData given ? given : new GridData();
+        data.exclude = !included;
+        control.setLayoutData(data);
+    }
+
+    /** Says how many modes pass the filter. */
+    void showCount(int shown, int all) {
+        count.setText(shown == 0 ? Messages.Filter_none : NLS.bind(Messages.Filter_count, Numbers.count(shown), Numbers.count(all)));
+        kind.getParent().layout();
     }
 
     private ModeFilter filter() {

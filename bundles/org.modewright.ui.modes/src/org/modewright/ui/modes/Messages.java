@@ -53,16 +53,8 @@ final class Messages extends NLS {
     public static String Capture_required;
     public static String Capture_mode;
     public static String Capture_tip;
-    public static String Capture_captured;
-    public static String Capture_missing;
     public static String Capture_source;
-    public static String Capture_movable;
-    public static String Capture_onSupports;
-    public static String Capture_total;
-    public static String Capture_share;
-    public static String Capture_notJudged;
     public static String Capture_noModes;
-    public static String Dominance_by;
     public static String Dominance_ELEMENT;
     public static String Dominance_GROUP;
     public static String Dominance_LEVEL;
@@ -90,6 +82,31 @@ final class Messages extends NLS {
     public static String Dominance_atLeast;
     public static String Dominance_tabRanking;
     public static String Dominance_tabModes;
+    public static String Dominance_strainShort;
+    public static String Dominance_kineticShort;
+    public static String Dominance_rollUp;
+    public static String Dominance_rollUpTip;
+    public static String Capture_tabStaircase;
+    public static String Capture_tabMasses;
+    public static String Capture_enough;
+    public static String Capture_short;
+    public static String Capture_moreModes;
+    public static String Capture_moreUnknown;
+    public static String Capture_modeMore;
+    public static String Capture_modesMore;
+    public static String Mass_movable;
+    public static String Mass_captured;
+    public static String Mass_mode;
+    public static String Mass_modes;
+    public static String Mass_missing;
+    public static String Mass_onSupports;
+    public static String Filter_count;
+    public static String Modes_legendTip;
+    public static String Column_numberTip;
+    public static String Column_periodTip;
+    public static String Column_frequencyTip;
+    public static String Column_characterTip;
+    public static String Dominance_copy;
 
     static {
         NLS.initializeMessages("org.modewright.ui.modes.messages", Messages.class);

@@ -9,11 +9,11 @@ import org.modewright.ui.widgets.Numbers;
 /** A column of the table of modes: what it is called, what it shows, what is copied and how it sorts. */
 enum ModeColumn {
 
-    NUMBER(null, true, 64), PERIOD(null, true, 76), FREQUENCY(null, true, 104),
-    MASS_X(Direction.X, true, 72), MASS_Y(Direction.Y, true, 72), MASS_Z(Direction.Z, true, 72),
-    RUNNING_X(Direction.X, true, 80), RUNNING_Y(Direction.Y, true, 80), RUNNING_Z(Direction.Z, false, 80),
+    NUMBER(null, true, 64), PERIOD(null, true, 64), FREQUENCY(null, true, 64),
+    MASS_X(Direction.X, true, 60), MASS_Y(Direction.Y, true, 60), MASS_Z(Direction.Z, true, 60),
+    RUNNING_X(Direction.X, true, 64), RUNNING_Y(Direction.Y, true, 64), RUNNING_Z(Direction.Z, false, 64),
     MASS_RX(Direction.RX, false, 88), MASS_RY(Direction.RY, false, 88), MASS_RZ(Direction.RZ, false, 88),
-    CHARACTER(null, true, 240), SPREAD(null, true, 76), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100);
+    CHARACTER(null, true, 120), SPREAD(null, true, 64), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100);
 
     private final Direction direction;
     private final boolean shownAtFirst;
@@ -73,10 +73,13 @@ enum ModeColumn {
             return NLS.bind(pattern, axis());
         }
         return switch (this) {
+            case NUMBER -> Messages.Column_numberTip;
+            case PERIOD -> Messages.Column_periodTip;
+            case FREQUENCY -> Messages.Column_frequencyTip;
             case SPREAD -> Messages.Column_spreadTip;
             case RESIDUAL -> Messages.Column_residualTip;
             case ERROR_BOUND -> Messages.Column_errorBoundTip;
-            default -> null;
+            default -> Messages.Column_characterTip;
         };
     }
 

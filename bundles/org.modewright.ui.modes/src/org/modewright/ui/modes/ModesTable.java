@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import java.util.function.IntConsumer;
 import java.util.stream.IntStream;
@@ -28,6 +29,8 @@ final class ModesTable {
 
     private static final int BAR_HEIGHT = 3;
     private static final int CELL_MARGIN = 4;
+    private static final int HEADER_ROOM = 28;
+    private static final int WIDEST = 400;
 
     private final Table table;
     private final Set<ModeColumn> shown = EnumSet.noneOf(ModeColumn.class);
@@ -74,6 +77,9 @@ final class ModesTable {
 
     void setRows(ModeRows newRows) {
         rows = newRows;
+        for (TableColumn column : table.getColumns()) {
+            column.setWidth(widthOf((ModeColumn) column.getData()));
+        }
         refresh();
     }
 
@@ -152,14 +158,19 @@ final class ModesTable {
         widget.addListener(SWT.Selection, event -> sortBy(column));
     }
 
-    /** Wide enough for the header in the platform's font, with room for the sign of the sorted column. */
+    /** Wide enough for the header in the platform's font, with room for the sign of the sorted column, and for the longest words. */
     private int widthOf(ModeColumn column) {
         GC gc = new GC(table);
         try {
-            return Math.max(column.width(), gc.textExtent(column.header()).x + 36);
+            int width = Math.max(column.width(), gc.textExtent(column.header()).x + HEADER_ROOM);
+            return column.isNumeric() || rows == null ? width : Math.min(WIDEST, Math.max(width, longest(gc, column) + 4 * CELL_MARGIN));
         } finally {
             gc.dispose();
         }
+    }
+
+    private int longest(GC gc, ModeColumn column) {
+        return IntStream.range(0, rows.count()).map(mode -> gc.textExtent(column.text(rows, mode)).x).max().orElse(0);
     }
 
     private void sortBy(ModeColumn column) {
@@ -248,7 +259,7 @@ final class ModesTable {
             int row = table.indexOf(item);
             tip = row < order.length ? tip(item, event, order[row]) : null;
         }
-        if (!java.util.Objects.equals(tip, table.getToolTipText())) {
+        if (!Objects.equals(tip, table.getToolTipText())) {
             table.setToolTipText(tip);
         }
     }
@@ -258,7 +269,8 @@ final class ModesTable {
             if (item.getBounds(i).contains(event.x, event.y)) {
                 ModeColumn column = (ModeColumn) table.getColumn(i).getData();
                 String reasons = rows.reasons(mode);
-                return column == ModeColumn.NUMBER || column == ModeColumn.CHARACTER ? (reasons.isEmpty() ? null : reasons)
+                return column == ModeColumn.NUMBER ? (reasons.isEmpty() ? null : reasons)
+                        : column == ModeColumn.CHARACTER && !reasons.isEmpty() ? column.text(rows, mode) + "\n" + reasons
                         : column.exact(rows, mode);
             }
         }

@@ -35,6 +35,7 @@ public final class ModesView extends ViewPart {
     private IMemento memento;
     private SessionPage page;
     private SentenceBar sentence;
+    private FilterBar filterBar;
     private ModesTable table;
     private ModeRows rows;
 
@@ -56,7 +57,7 @@ public final class ModesView extends ViewPart {
         content.setLayout(layout);
         sentence = new SentenceBar(content);
         sentence.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        new FilterBar(content, filter -> table.setFilter(filter));
+        filterBar = new FilterBar(content, this::filterChosen);
         table = new ModesTable(content, this::modeSelected);
         table.control().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         restoreColumns();
@@ -165,6 +166,7 @@ public final class ModesView extends ViewPart {
         if (rows == null || rows.result() != result.modal()) {
             rows = new ModeRows(result.modal());
             table.setRows(rows);
+            filterBar.showCount(table.shownCount(), rows.count());
         }
         boolean complete = result.modal().certificate().complete();
         sentence.show(complete ? SentenceBar.Sign.INFORMATION : SentenceBar.Sign.WARNING, ModesSentence.of(result.modal()));
@@ -188,6 +190,11 @@ public final class ModesView extends ViewPart {
         boolean comeWithMode = selection.hasMode() && selection.mode() < rows.count()
                 && selection.equals(AuditSelection.ofMode(rows.result(), selection.mode()));
         return comeWithMode ? Set.of() : selection.elementIds();
+    }
+
+    private void filterChosen(ModeFilter filter) {
+        table.setFilter(filter);
+        filterBar.showCount(table.shownCount(), rows == null ? 0 : rows.count());
     }
 
     private void modeSelected(int mode) {

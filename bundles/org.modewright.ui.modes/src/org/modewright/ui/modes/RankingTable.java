@@ -1,6 +1,7 @@
 package org.modewright.ui.modes;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
 import java.util.Set;
@@ -31,20 +32,23 @@ final class RankingTable {
     private static final int KINETIC = 2;
     private static final int RUNNING = 3;
     private static final int MARGIN = 4;
+    private static final int LEAST_SIDE = 88;
+    private static final int LEAST_NAME = 96;
+    private static final int RUNNING_WIDTH = 64;
 
     private final Table table;
     private final Consumer<Energy> whenRanked;
     private List<DominanceRow> rows = List.of();
     private double largest = 1;
 
-    RankingTable(Composite parent, Consumer<Set<String>> whenSelected, Consumer<String> whenOpened, Consumer<Energy> whenRanked) {
+    RankingTable(Composite parent, Consumer<List<DominanceRow>> whenSelected, Consumer<String> whenOpened, Consumer<Energy> whenRanked) {
         this.whenRanked = whenRanked;
         table = new Table(parent, SWT.VIRTUAL | SWT.MULTI | SWT.FULL_SELECTION | SWT.BORDER);
         table.setHeaderVisible(true);
         table.setData(UiIds.WIDGET_ID, "dominance.table");
-        column(SWT.RIGHT, Messages.Dominance_strain, Messages.Dominance_strainTip, Energy.STRAIN);
-        column(SWT.CENTER, Messages.Dominance_ELEMENT, null, null);
-        column(SWT.LEFT, Messages.Dominance_kinetic, Messages.Dominance_kineticTip, Energy.KINETIC);
+        column(SWT.RIGHT, Messages.Dominance_strainShort, Messages.Dominance_strainTip, Energy.STRAIN);
+        column(SWT.CENTER, "", null, null);
+        column(SWT.LEFT, Messages.Dominance_kineticShort, Messages.Dominance_kineticTip, Energy.KINETIC);
         column(SWT.RIGHT, Messages.Dominance_running, Messages.Dominance_runningTip, null);
         table.addListener(SWT.SetData, this::fill);
         table.addListener(SWT.EraseItem, this::erase);
@@ -102,9 +106,9 @@ final class RankingTable {
         if (room <= 0) {
             return;
         }
-        int side = Math.max(110, room * 30 / 100);
-        int running = 64;
-        int name = Math.max(90, room - 2 * side - running);
+        int running = RUNNING_WIDTH;
+        int side = Math.max(LEAST_SIDE, (room - running) * 30 / 100);
+        int name = Math.max(LEAST_NAME, room - 2 * side - running);
         setWidth(STRAIN, side);
         setWidth(NAME, name);
         setWidth(KINETIC, side);
@@ -168,15 +172,10 @@ final class RankingTable {
         return ThemeColours.mix(table.getForeground(), table.getBackground(), strain ? 0.55 : 0.3);
     }
 
-    private void notifySelection(Consumer<Set<String>> whenSelected) {
-        Set<String> ids = new java.util.LinkedHashSet<>();
-        for (int index : table.getSelectionIndices()) {
-            if (rows.get(index).elementId() != null) {
-                ids.add(rows.get(index).elementId());
-            }
-        }
-        if (!ids.isEmpty()) {
-            whenSelected.accept(ids);
+    private void notifySelection(Consumer<List<DominanceRow>> whenSelected) {
+        List<DominanceRow> chosen = Arrays.stream(table.getSelectionIndices()).mapToObj(rows::get).toList();
+        if (!chosen.isEmpty()) {
+            whenSelected.accept(chosen);
         }
     }
 

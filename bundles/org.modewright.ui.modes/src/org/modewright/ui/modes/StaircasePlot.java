@@ -1,6 +1,7 @@
 package org.modewright.ui.modes;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
@@ -30,7 +31,11 @@ final class StaircasePlot extends Canvas {
 
     private static final int GAP = 4;
     private static final int COLUMN_WIDTH = 20;
-    private static final int COLUMN_GAP = 12;
+    private static final int COLUMN_GAP = 20;
+    private static final int LETTERS = 16;
+    private static final int LINES_PER_STEP = 2;
+    private static final int OPAQUE = 255;
+    private static final int VEILED = 200;
     private static final int HATCH = 5;
     private static final int MARK = 8;
 
@@ -80,7 +85,7 @@ final class StaircasePlot extends Canvas {
         Rectangle client = getClientArea();
         int line = gc.getFontMetrics().getHeight();
         int left = gc.textExtent("100").x + 3 * GAP;
-        int right = 3 * (COLUMN_WIDTH + COLUMN_GAP) + 3 * GAP;
+        int right = LETTERS + 3 * (COLUMN_WIDTH + COLUMN_GAP) + GAP;
         int top = line + 2 * GAP;
         return new Rectangle(left, top, Math.max(10, client.width - left - right), Math.max(10, client.height - top - 2 * line - 3 * GAP));
     }
@@ -100,6 +105,7 @@ final class StaircasePlot extends Canvas {
             paintStairs(gc, area, direction);
         }
         paintReached(gc, area);
+        paintLetters(gc, area);
         paintColumns(gc, area);
     }
 
@@ -121,7 +127,8 @@ final class StaircasePlot extends Canvas {
     private void paintFrame(GC gc, Rectangle area) {
         int line = gc.getFontMetrics().getHeight();
         gc.setLineWidth(1);
-        for (int percent = 0; percent <= 100; percent += 20) {
+        int step = area.height >= 5 * LINES_PER_STEP * line ? 20 : area.height >= 4 * line ? 50 : 100;
+        for (int percent = 0; percent <= 100; percent += step) {
             int y = y(area, percent / 100.0);
             gc.setForeground(ThemeColours.mix(getForeground(), getBackground(), percent == 0 ? 0.4 : 0.1));
             gc.drawLine(area.x, y, area.x + area.width, y);
@@ -209,9 +216,7 @@ final class StaircasePlot extends Canvas {
             gc.setLineStyle(SWT.LINE_DASH);
             gc.drawLine(area.x, y, area.x + area.width, y);
             gc.setLineStyle(SWT.LINE_SOLID);
-            String text = NLS.bind(Messages.Capture_required, Numbers.percent(required));
-            int x = area.x + area.width - gc.textExtent(text).x - GAP;
-            gc.drawText(text, x, y - gc.getFontMetrics().getHeight(), true);
+            paintText(gc, NLS.bind(Messages.Capture_required, Numbers.percent(required)), area.x + GAP, y - gc.getFontMetrics().getHeight());
         });
     }
 
@@ -256,14 +261,42 @@ final class StaircasePlot extends Canvas {
         Point size = gc.textExtent(text);
         int left = Math.max(area.x + GAP, Math.min(x + MARK, area.x + area.width - size.x - GAP));
         int line = verdict.direction().ordinal();
-        gc.setForeground(getForeground());
-        gc.drawText(text, left, Math.min(y(area, verdict.required()) + GAP + line * size.y, area.y + area.height - size.y), true);
         gc.setForeground(DirectionColours.of(verdict.direction()));
         gc.drawLine(x, y + MARK / 2, x, Math.max(y + MARK / 2, y(area, verdict.required()) + GAP + line * size.y + size.y / 2));
+        gc.setForeground(getForeground());
+        paintText(gc, text, left, Math.min(y(area, verdict.required()) + GAP + line * size.y, area.y + area.height - size.y));
+    }
+
+    /** Text on a veil, so that lines behind do not cross it. */
+    private void paintText(GC gc, String text, int x, int y) {
+        Point size = gc.textExtent(text);
+        gc.setBackground(getBackground());
+        gc.setAlpha(VEILED);
+        gc.fillRectangle(x - 1, y, size.x + 2, size.y);
+        gc.setAlpha(OPAQUE);
+        gc.drawText(text, x, y, true);
+    }
+
+    /** The name of each direction where its line ends, the names kept apart. */
+    private void paintLetters(GC gc, Rectangle area) {
+        int line = gc.getFontMetrics().getHeight();
+        List<Direction> upwards = new ArrayList<>(directions());
+        upwards.sort(Comparator.comparingDouble(modal()::capture));
+        int limit = area.y + area.height;
+        int[] tops = new int[upwards.size()];
+        for (int i = 0; i < tops.length; i++) {
+            tops[i] = Math.min(limit, y(area, modal().capture(upwards.get(i))) + line / 2) - line;
+            limit = tops[i];
+        }
+        int shift = Math.max(0, area.y - line - (tops.length == 0 ? area.y : tops[tops.length - 1]));
+        for (int i = 0; i < tops.length; i++) {
+            gc.setForeground(DirectionColours.of(upwards.get(i)));
+            gc.drawText(upwards.get(i).name(), area.x + area.width + GAP, tops[i] + shift, true);
+        }
     }
 
     private void paintColumns(GC gc, Rectangle area) {
-        int x = area.x + area.width + 3 * GAP;
+        int x = area.x + area.width + LETTERS + COLUMN_GAP / 2;
         for (Direction direction : List.of(Direction.X, Direction.Y, Direction.Z)) {
             paintColumn(gc, new Rectangle(x, area.y, COLUMN_WIDTH, area.height), direction);
             x += COLUMN_WIDTH + COLUMN_GAP;
@@ -286,7 +319,7 @@ final class StaircasePlot extends Canvas {
         String name = direction.name();
         int below = column.y + column.height + GAP;
         gc.drawText(name, column.x + (column.width - gc.textExtent(name).x) / 2, below, true);
-        String value = massive ? Long.toString(Math.round(captured * 100)) : "–";
+        String value = massive ? Numbers.percentNumber(captured) : "–";
         gc.setForeground(ThemeColours.secondaryText(this));
         gc.drawText(value, column.x + (column.width - gc.textExtent(value).x) / 2, below + gc.getFontMetrics().getHeight(), true);
     }
