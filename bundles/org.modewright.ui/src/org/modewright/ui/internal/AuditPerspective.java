@@ -6,8 +6,8 @@ import org.eclipse.ui.IPerspectiveFactory;
 import org.modewright.ui.UiIds;
 
 /**
- * The perspective of a modal audit: projects and outline to the left, the structure in the middle, the shape and what dominates it to
- * the right, the modes and the mass they capture along the bottom.
+ * The perspective of a modal audit: projects and outline to the left, the structure in the middle, the shape of a mode to the right; along
+ * the bottom the modes, the mass they capture and what dominates the selected one.
  */
 public final class AuditPerspective implements IPerspectiveFactory {
 
@@ -18,12 +18,12 @@ public final class AuditPerspective implements IPerspectiveFactory {
         bottom.addView(UiIds.MODES_VIEW);
         bottom.addView(IPageLayout.ID_PROBLEM_VIEW);
         bottom.addPlaceholder(IPageLayout.ID_PROGRESS_VIEW);
-        layout.createFolder("bottomRight", IPageLayout.RIGHT, 0.63f, "bottom").addView(UiIds.CAPTURE_VIEW);
+        layout.createFolder("bottomMiddle", IPageLayout.RIGHT, 0.46f, "bottom").addView(UiIds.CAPTURE_VIEW);
+        layout.createFolder("bottomRight", IPageLayout.RIGHT, 0.5f, "bottomMiddle").addView(UiIds.DOMINANCE_VIEW);
         layout.createFolder("left", IPageLayout.LEFT, 0.19f, editor).addView(UiIds.EXPLORER);
         layout.createFolder("leftBottom", IPageLayout.BOTTOM, 0.5f, "left").addView(IPageLayout.ID_OUTLINE);
         IFolderLayout right = layout.createFolder("right", IPageLayout.RIGHT, 0.53f, editor);
         right.addView(UiIds.SHAPE_VIEW);
-        layout.createFolder("rightBottom", IPageLayout.BOTTOM, 0.56f, "right").addView(UiIds.DOMINANCE_VIEW);
         addShortcuts(layout);
     }
 

@@ -7,6 +7,7 @@ import org.eclipse.swt.graphics.Image;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
 import org.modewright.ui.UiIds;
@@ -104,13 +105,14 @@ public final class SentenceBar extends Composite {
         }
     }
 
-    private void include(org.eclipse.swt.widgets.Control control, boolean included) {
+    private void include(Control control, boolean included) {
         control.setVisible(included);
         ((GridData) control.getLayoutData()).exclude = !included;
     }
 
+    /** The labels themselves are named, so that their sizes are measured anew. */
     private void relayout() {
-        requestLayout();
+        getShell().layout(new Control[] {icon, sentence, stale}, SWT.DEFER);
     }
 
     private static GridData wrapping() {
