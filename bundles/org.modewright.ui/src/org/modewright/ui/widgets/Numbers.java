@@ -17,7 +17,7 @@ public final class Numbers {
     private Numbers() {
     }
 
-    /** Four significant digits, thousands grouped: 1,840; 0.4123; 3.1e-11. */
+    /** Four significant digits, thousands grouped: 1,840; 0.4123; 3.100e-11. */
     public static String significant(double value) {
         return significant(value, 4);
     }
