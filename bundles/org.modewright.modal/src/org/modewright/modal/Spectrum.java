@@ -8,6 +8,8 @@ import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.EigenRequest;
 import org.modewright.numerics.EigenSession;
 import org.modewright.numerics.EigenSolvers;
+import org.modewright.numerics.Factorisation;
+import org.modewright.numerics.Factorisers;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SpectrumCertificate;
 import org.modewright.numerics.SymmetricMatrix;
@@ -20,21 +22,25 @@ final class Spectrum implements AutoCloseable {
     private static final int RIGID_MOTIONS = 6;
 
     private final int order;
+    private final EigenProblem problem;
     private final EigenSession session;
+    private double below = Double.POSITIVE_INFINITY;
     private final List<String> remarks = new ArrayList<>();
     private EigenPairs pairs = NONE;
 
-    private Spectrum(int order, EigenSession session) {
+    private Spectrum(int order, EigenProblem problem, EigenSession session) {
         this.order = order;
+        this.problem = problem;
         this.session = session;
     }
 
     static Spectrum open(SymmetricMatrix stiffness, SymmetricMatrix mass, Progress progress) {
         int order = stiffness.order();
         if (order == 0) {
-            return new Spectrum(0, null);
+            return new Spectrum(0, null, null);
         }
-        return new Spectrum(order, EigenSolvers.forOrder(order).open(new EigenProblem(stiffness, mass), progress));
+        EigenProblem problem = new EigenProblem(stiffness, mass);
+        return new Spectrum(order, problem, EigenSolvers.forOrder(order).open(problem, progress));
     }
 
     /** &lambda; = (2&pi;f)&sup2;. */
@@ -55,6 +61,7 @@ final class Spectrum implements AutoCloseable {
             return;
         }
         EigenRequest request = policy.first(order);
+        below = request.below();
         pairs = session.solve(request, progress);
         int asked = request.count();
         while (policy.isOpen() && !pairs.exhausted() && pairs.count() < order && !policy.isAtLimit(pairs) && !enough.test(pairs)) {
@@ -97,14 +104,25 @@ final class Spectrum implements AutoCloseable {
         return remarks;
     }
 
-    /** The inertia count above the last pair. Without pairs there is nothing to count below. */
+    /** The inertia count above the last pair; without pairs, below the limit that was asked for. */
     Certificate certify(Progress progress) {
-        if (session == null || pairs.count() == 0) {
+        if (session == null) {
             return Certificate.EMPTY;
+        }
+        if (pairs.count() == 0) {
+            return Double.isFinite(below) ? noneBelowTheLimit(progress) : Certificate.EMPTY;
         }
         SpectrumCertificate proof = session.certify(pairs, progress);
         return new Certificate(proof.complete(), frequency(proof.shift()), proof.counted(), proof.found(), proof.worstResidual(),
                 proof.worstOrthogonality());
+    }
+
+    /** That there is no mode below the limit asked for is counted too. */
+    private Certificate noneBelowTheLimit(Progress progress) {
+        try (Factorisation factors = Factorisers.sparse(problem, progress).factorise(problem.stiffness(), problem.mass(), below, progress)) {
+            int counted = factors.inertia().negative();
+            return new Certificate(counted == 0, frequency(below), counted, 0, 0, 0);
+        }
     }
 
     @Override

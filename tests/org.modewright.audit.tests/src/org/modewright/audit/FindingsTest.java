@@ -66,7 +66,8 @@ class FindingsTest {
         Finding finding = only(audit(s), "loose-part");
         assertEquals(Severity.ERROR, finding.severity());
         assertEquals(List.of("post", "p", "q"), names(finding));
-        assertEquals("A part of 2 nodes (p and q) is not connected to any support, so it can float away: its lowest modes lie at 0 Hz.",
+        assertEquals("A part of 2 nodes (p and q) is not connected to any support, so it can float away in X, Y and Z and turn about each: its"
+                + " lowest modes lie at 0 Hz.",
                 finding.text());
         assertEquals(List.of(), of(audit(s), "mechanism"));
         assertEquals(List.of(), of(audit(s.support("p", "ux uy uz rx ry rz")), "loose-part"));
@@ -92,7 +93,7 @@ class FindingsTest {
         Structures s = new Structures("free").material("steel", 2.1e11, 0.3, 7850).section("bar", 0.01, 2e-5, 2e-5, 3e-5);
         s.node("a", 0, 0, 0).node("b", 4, 0, 0).with("ab", "a", "b");
         Finding finding = only(audit(s), "loose-part");
-        assertTrue(finding.text().startsWith("The whole structure is not connected to any support"), finding.text());
+        assertTrue(finding.text().startsWith("The whole structure of 2 nodes (a and b) is not connected to any support"), finding.text());
         assertEquals("Support the structure.", finding.remedy());
     }
 

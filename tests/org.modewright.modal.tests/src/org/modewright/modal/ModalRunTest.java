@@ -38,6 +38,16 @@ class ModalRunTest {
     }
 
     @Test
+    void noModeBelowTheLimitIsCountedToo() {
+        double first = building(6).modes(1).modes().get(0).frequency();
+        ModalResult result = run(building(6), new ModalRequest(0, first / 2, null, 500, 1));
+        assertEquals(0, result.modes().size());
+        assertTrue(result.certificate().complete());
+        assertEquals(first / 2, result.certificate().belowHz(), 1e-12 * first);
+        assertEquals(0, result.certificate().counted());
+    }
+
+    @Test
     void numberOfModesIsExact() {
         for (int count : new int[] {1, 2, 7, 30}) {
             assertEquals(count, building(30).modes(count).modes().size());

@@ -49,10 +49,10 @@ public final class LooseParts {
         List<ObjectRef> objects = new ArrayList<>(elements(part));
         objects.addAll(Refs.nodes(nodes, points));
         boolean whole = nodes.length == points.size();
-        String subject = whole ? "The whole structure" : "A part of " + nodes.length + " nodes (" + Words.list(Refs.names(nodes, points))
-                + ")";
-        return new Finding(ID, Severity.ERROR, objects, subject + " is not connected to any support, so it can float away: its lowest"
-                + " modes lie at 0 Hz.", whole ? "Support the structure."
+        String subject = (whole ? "The whole structure of " : "A part of ") + nodes.length + " nodes ("
+                + Words.list(Refs.names(nodes, points)) + ")";
+        return new Finding(ID, Severity.ERROR, objects, subject + " is not connected to any support, so it can float away in X, Y and Z"
+                + " and turn about each: its lowest modes lie at 0 Hz.", whole ? "Support the structure."
                         : "Join the part to the structure, support it, or delete it.");
     }
 
