@@ -135,6 +135,9 @@ public final class StructureCanvas extends Canvas {
 
     /** Shows a shape of the present structure; null: at rest. */
     void shape(Deformation newDeformation, double newFactor) {
+        if (newDeformation != deformation) {
+            hover(null);
+        }
         deformation = newDeformation;
         factor = newFactor;
         redraw();
@@ -352,6 +355,9 @@ public final class StructureCanvas extends Canvas {
             return;
         }
         hovered = id;
+        if (drawing == null) {
+            return;
+        }
         drawing.mark(Mark.HOVERED, id == null ? Set.of() : Set.of(id));
         setToolTipText(id == null ? null : describer.apply(drawing.object(pick)));
         redraw();

@@ -21,7 +21,7 @@ import org.modewright.ui.widgets.Numbers;
  * What makes a mode so, in one sentence: "Mode 3, 0.412 s: 81.2 % of the strain energy in 6 members of group east braces; 92.0 % of the
  * moving mass in 40 nodes on levels 4 and 5".
  */
-final class DominanceSentence {
+public final class DominanceSentence {
 
     private static final double MOST_OF_IT = 0.8;
     private static final int FEW = 3;
@@ -29,7 +29,7 @@ final class DominanceSentence {
     private DominanceSentence() {
     }
 
-    static String of(ModalResult result, int index) {
+    public static String of(ModalResult result, int index) {
         Mode mode = result.modes().get(index);
         Dominance dominance = new Dominance(result);
         List<Share> strain = dominance.leading(index, Energy.STRAIN, MOST_OF_IT, Integer.MAX_VALUE);
@@ -45,7 +45,7 @@ final class DominanceSentence {
     }
 
     /** The modes in which the selected elements take part, in one sentence. */
-    static String modesOf(ModalResult result, Set<String> elementIds, double share, List<ModeShare> modes) {
+    public static String modesOf(ModalResult result, Set<String> elementIds, double share, List<ModeShare> modes) {
         if (elementIds.isEmpty()) {
             return Messages.Dominance_modesOfNothing;
         }

@@ -38,6 +38,7 @@ import org.modewright.ui.widgets.TextCopy;
 public final class DominanceView extends ViewPart {
 
     private static final String ROLL_UP_KEY = "rollUp";
+    private static final int RANKING_TAB = 0;
 
     private AuditSession session;
     private SessionPage page;
@@ -81,9 +82,10 @@ public final class DominanceView extends ViewPart {
         tabs.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         tabs.setData(UiIds.WIDGET_ID, "dominance.tabs");
         createRanking();
-        elementModes = new ElementModes(tabs, this::modePicked);
+        elementModes = new ElementModes(tabs, this::modePicked, this::showSentence);
         tab(Messages.Dominance_tabModes, elementModes.control());
-        tabs.setSelection(0);
+        tabs.setSelection(RANKING_TAB);
+        tabs.addListener(SWT.Selection, event -> showSentence());
         contributeActions();
         AuditSession.Listener listener = this::changed;
         session.addListener(listener);
@@ -155,6 +157,7 @@ public final class DominanceView extends ViewPart {
             showRanking(result, mode);
         }
         elementModes.show(result, session.selection().elementIds());
+        showSentence();
         if (session.selectionSource() != this) {
             ranking.select(session.selection().elementIds());
         }
@@ -162,7 +165,6 @@ public final class DominanceView extends ViewPart {
 
     private void showNoMode(ModalResult result) {
         shownMode = -1;
-        sentence.show(SentenceBar.Sign.NONE, "");
         boolean any = !result.modes().isEmpty();
         noMode.show(any ? Messages.Dominance_noMode : Messages.Modes_sentenceNone, any ? Messages.Dominance_selectFirst : null,
                 any ? () -> modePicked(0) : null);
@@ -173,10 +175,16 @@ public final class DominanceView extends ViewPart {
         if (result != shownResult || mode != shownMode) {
             shownResult = result;
             shownMode = mode;
-            sentence.show(SentenceBar.Sign.INFORMATION, DominanceSentence.of(result, mode));
             refreshRanking();
         }
         top(ranked);
+    }
+
+    /** The sentence answers the question of the tab in front. */
+    private void showSentence() {
+        String words = tabs.getSelectionIndex() != RANKING_TAB ? elementModes.sentence()
+                : shownMode < 0 || shownResult == null ? "" : DominanceSentence.of(shownResult, shownMode);
+        sentence.show(words.isEmpty() ? SentenceBar.Sign.NONE : SentenceBar.Sign.INFORMATION, words);
     }
 
     private void refreshRanking() {
@@ -215,6 +223,6 @@ public final class DominanceView extends ViewPart {
     }
 
     private void copy() {
-        TextCopy.put(tabs.getDisplay(), tabs.getSelectionIndex() == 0 ? ranking.text() : elementModes.text());
+        TextCopy.put(tabs.getDisplay(), tabs.getSelectionIndex() == RANKING_TAB ? ranking.text() : elementModes.text());
     }
 }

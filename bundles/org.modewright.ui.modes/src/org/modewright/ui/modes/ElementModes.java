@@ -25,27 +25,35 @@ import org.modewright.ui.widgets.Numbers;
 final class ElementModes {
 
     private final Composite body;
-    private final Label sentence;
+    private final Runnable whenCounted;
+    private String sentence = "";
     private final Spinner least;
     private final Table table;
     private ModalResult result;
     private Set<String> elementIds = Set.of();
     private List<ModeShare> shares = List.of();
 
-    ElementModes(Composite parent, IntConsumer whenPicked) {
+    /**
+     * @param parent where the table stands
+     * @param whenPicked told of the index of a mode that was picked
+     * @param whenCounted told that the sentence has changed by the user's choice of a share
+     */
+    ElementModes(Composite parent, IntConsumer whenPicked, Runnable whenCounted) {
+        this.whenCounted = whenCounted;
         body = new Composite(parent, SWT.NONE);
-        body.setLayout(new GridLayout(3, false));
-        sentence = new Label(body, SWT.WRAP);
-        GridData wide = new GridData(SWT.FILL, SWT.TOP, true, false, 3, 1);
-        wide.widthHint = 60;
-        sentence.setLayoutData(wide);
-        sentence.setData(UiIds.WIDGET_ID, "dominance.modesSentence");
+        GridLayout layout = new GridLayout(3, false);
+        layout.marginWidth = 8;
+        layout.marginHeight = 4;
+        body.setLayout(layout);
         new Label(body, SWT.NONE).setText(Messages.Dominance_atLeast);
         least = new Spinner(body, SWT.BORDER);
         least.setValues(50, 1, 1000, 1, 10, 50);
         least.setData(UiIds.WIDGET_ID, "dominance.least");
-        least.addListener(SWT.Selection, event -> refresh());
-        new Label(body, SWT.NONE).setText("%");
+        least.addListener(SWT.Selection, event -> {
+            refresh();
+            whenCounted.run();
+        });
+        new Label(body, SWT.NONE).setText(Messages.Dominance_ofEnergy);
         table = new Table(body, SWT.FULL_SELECTION | SWT.BORDER);
         table.setHeaderVisible(true);
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 3, 1));
@@ -68,6 +76,11 @@ final class ElementModes {
         return body;
     }
 
+    /** In how many modes the selection takes part. */
+    String sentence() {
+        return sentence;
+    }
+
     void show(ModalResult newResult, Set<String> ids) {
         result = newResult;
         elementIds = ids;
@@ -77,18 +90,18 @@ final class ElementModes {
     private void refresh() {
         table.removeAll();
         shares = List.of();
+        sentence = "";
         if (result == null) {
             return;
         }
         double share = least.getSelection() / 1000.0;
         shares = new Dominance(result).modesOf(elementIds, share);
-        sentence.setText(DominanceSentence.modesOf(result, elementIds, share, shares).replace("&", "&&"));
+        sentence = DominanceSentence.modesOf(result, elementIds, share, shares);
         for (ModeShare row : shares) {
             Mode mode = result.modes().get(row.mode());
             new TableItem(table, SWT.NONE).setText(new String[] {Integer.toString(mode.number()), Numbers.significant(mode.period()),
                 Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()), mode.character().text()});
         }
-        body.layout();
     }
 
     /** All rows as text, tab-separated, in full precision. */

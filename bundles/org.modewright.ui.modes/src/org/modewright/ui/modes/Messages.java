@@ -107,6 +107,7 @@ final class Messages extends NLS {
     public static String Column_frequencyTip;
     public static String Column_characterTip;
     public static String Dominance_copy;
+    public static String Dominance_ofEnergy;
 
     static {
         NLS.initializeMessages("org.modewright.ui.modes.messages", Messages.class);

@@ -7,7 +7,7 @@ import org.modewright.modal.Mode;
 import org.modewright.ui.widgets.Numbers;
 
 /** A column of the table of modes: what it is called, what it shows, what is copied and how it sorts. */
-enum ModeColumn {
+public enum ModeColumn {
 
     NUMBER(null, true, 64), PERIOD(null, true, 64), FREQUENCY(null, true, 64),
     MASS_X(Direction.X, true, 60), MASS_Y(Direction.Y, true, 60), MASS_Z(Direction.Z, true, 60),
@@ -26,19 +26,19 @@ enum ModeColumn {
     }
 
     /** The direction of a mass column; null for others. */
-    Direction direction() {
+    public Direction direction() {
         return direction;
     }
 
-    boolean isShownAtFirst() {
+    public boolean isShownAtFirst() {
         return shownAtFirst;
     }
 
-    int width() {
+    public int width() {
         return width;
     }
 
-    boolean isNumeric() {
+    public boolean isNumeric() {
         return this != CHARACTER;
     }
 
@@ -50,7 +50,7 @@ enum ModeColumn {
         return direction.name().substring(direction.name().length() - 1);
     }
 
-    String header() {
+    public String header() {
         if (direction != null) {
             String pattern = isRunning() ? Messages.Column_running : direction.isTranslation() ? Messages.Column_mass : Messages.Column_rotary;
             return NLS.bind(pattern, axis());
@@ -66,7 +66,7 @@ enum ModeColumn {
         };
     }
 
-    String tip() {
+    public String tip() {
         if (direction != null) {
             String pattern = isRunning() ? Messages.Column_runningTip
                     : direction.isTranslation() ? Messages.Column_massTip : Messages.Column_rotaryTip;
@@ -84,7 +84,7 @@ enum ModeColumn {
     }
 
     /** The value that the column shows and sorts by; the mode's number for the character, which sorts by its words. */
-    double value(ModeRows rows, int mode) {
+    public double value(ModeRows rows, int mode) {
         Mode record = rows.mode(mode);
         if (direction != null) {
             return isRunning() ? rows.running(direction, mode) : record.effectiveMassShare(direction);
@@ -100,11 +100,11 @@ enum ModeColumn {
     }
 
     /** The share that the cell's bar shows; 0 for columns without a bar. */
-    double bar(ModeRows rows, int mode) {
+    public double bar(ModeRows rows, int mode) {
         return direction == null ? 0 : Math.min(1, value(rows, mode));
     }
 
-    String text(ModeRows rows, int mode) {
+    public String text(ModeRows rows, int mode) {
         if (this == CHARACTER) {
             return rows.mode(mode).character().text();
         }
@@ -121,7 +121,7 @@ enum ModeColumn {
     }
 
     /** The cell in full precision, for the clipboard. */
-    String exact(ModeRows rows, int mode) {
+    public String exact(ModeRows rows, int mode) {
         return switch (this) {
             case CHARACTER -> rows.mode(mode).character().text();
             case NUMBER -> Integer.toString(rows.mode(mode).number());
@@ -129,7 +129,7 @@ enum ModeColumn {
         };
     }
 
-    Comparator<Integer> order(ModeRows rows) {
+    public Comparator<Integer> order(ModeRows rows) {
         if (this == CHARACTER) {
             return Comparator.comparing((Integer mode) -> rows.mode(mode).character().text()).thenComparing(Comparator.naturalOrder());
         }

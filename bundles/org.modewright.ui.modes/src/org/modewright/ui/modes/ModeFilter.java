@@ -9,14 +9,14 @@ import org.modewright.modal.Direction;
  * @param share the least effective mass share, for {@link Kind#AT_LEAST}
  * @param direction the direction of the share; null: any translation
  */
-record ModeFilter(Kind kind, double share, Direction direction) {
+public record ModeFilter(Kind kind, double share, Direction direction) {
 
     /** Kinds of filter. */
-    enum Kind { ALL, LOCAL, NOT_LOCAL, AT_LEAST }
+    public enum Kind { ALL, LOCAL, NOT_LOCAL, AT_LEAST }
 
-    static final ModeFilter ALL = new ModeFilter(Kind.ALL, 0, null);
+    public static final ModeFilter ALL = new ModeFilter(Kind.ALL, 0, null);
 
-    boolean accepts(ModeRows rows, int mode) {
+    public boolean accepts(ModeRows rows, int mode) {
         return switch (kind) {
             case ALL -> true;
             case LOCAL -> rows.mode(mode).isLocal();

@@ -15,10 +15,10 @@ import org.modewright.modal.Mode;
 import org.modewright.ui.widgets.Numbers;
 
 /** What the table of modes shows of a result: running sums and the small signs of local and close modes, worked out once. */
-final class ModeRows {
+public final class ModeRows {
 
     /** Frequencies within ten percent correlate in the common combination rules (common practice, no source). */
-    static final double CLOSE = 0.10;
+    public static final double CLOSE = 0.10;
 
     private static final String LOCAL_SIGN = "\u25c7";
     private static final String CLOSE_SIGN = "\u2248";
@@ -29,35 +29,35 @@ final class ModeRows {
     private final Map<Direction, double[]> running = new EnumMap<>(Direction.class);
     private final Map<Integer, ModeShare> holding = new HashMap<>();
 
-    ModeRows(ModalResult result) {
+    public ModeRows(ModalResult result) {
         this.result = result;
         for (Direction direction : Direction.values()) {
             running.put(direction, result.running(direction));
         }
     }
 
-    ModalResult result() {
+    public ModalResult result() {
         return result;
     }
 
-    int count() {
+    public int count() {
         return result.modes().size();
     }
 
-    Mode mode(int mode) {
+    public Mode mode(int mode) {
         return result.modes().get(mode);
     }
 
-    double running(Direction direction, int mode) {
+    public double running(Direction direction, int mode) {
         return running.get(direction)[mode];
     }
 
-    boolean hasMass(Direction direction) {
+    public boolean hasMass(Direction direction) {
         return result.hasMass(direction);
     }
 
     /** Marks the modes in which the selected elements hold at least a share of the energy. */
-    void mark(Set<String> elementIds, double share) {
+    public void mark(Set<String> elementIds, double share) {
         holding.clear();
         if (!elementIds.isEmpty()) {
             new Dominance(result).modesOf(elementIds, share).forEach(row -> holding.put(row.mode(), row));
@@ -65,7 +65,7 @@ final class ModeRows {
     }
 
     /** The index of the neighbour that is within {@link #CLOSE} and nearest; -1 if there is none. */
-    int closeTo(int mode) {
+    public int closeTo(int mode) {
         double below = gap(mode - 1, mode);
         double above = gap(mode, mode + 1);
         if (Math.min(below, above) > CLOSE) {
@@ -82,7 +82,7 @@ final class ModeRows {
         return mode(upper).frequency() / mode(lower).frequency() - 1;
     }
 
-    String signs(int mode) {
+    public String signs(int mode) {
         StringBuilder signs = new StringBuilder();
         append(signs, holding.containsKey(mode), HOLDS_SIGN);
         append(signs, mode(mode).isUnstable(), UNSTABLE_SIGN);
@@ -98,7 +98,7 @@ final class ModeRows {
     }
 
     /** Why a mode carries its signs, a line each; empty where it carries none. */
-    String reasons(int mode) {
+    public String reasons(int mode) {
         List<String> lines = new ArrayList<>();
         if (mode(mode).isUnstable()) {
             lines.add(NLS.bind(Messages.Modes_unstableTip, mode(mode).character().text()));

@@ -7,14 +7,14 @@ import org.modewright.modal.Mode;
 import org.modewright.ui.widgets.Numbers;
 
 /** Which modes there are, in one sentence: "60 modes, 0.05 s to 1.42 s; 9 carry 95.0 % of X; 31 local". */
-final class ModesSentence {
+public final class ModesSentence {
 
     private static final double CARRIED = 0.95;
 
     private ModesSentence() {
     }
 
-    static String of(ModalResult result) {
+    public static String of(ModalResult result) {
         if (result.modes().isEmpty()) {
             return Messages.Modes_sentenceNone;
         }

@@ -16,6 +16,7 @@ import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableColumn;
 import org.eclipse.swt.widgets.TableItem;
+import org.modewright.fem.Kind;
 import org.modewright.modal.Dominance.Energy;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.Numbers;
@@ -122,7 +123,7 @@ final class RankingTable {
     }
 
     private String label(DominanceRow row) {
-        if (row.kind() != null) {
+        if (row.kind() != null && row.kind() != Kind.MEMBER) {
             return row.kind().word() + " " + row.label();
         }
         return row.label().isEmpty() ? Messages.Dominance_none : row.label();

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.IntConsumer;
+import java.util.stream.Collectors;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.graphics.GC;
@@ -30,9 +31,10 @@ import org.modewright.ui.widgets.ThemeColours;
 final class StaircasePlot extends Canvas {
 
     private static final int GAP = 4;
-    private static final int COLUMN_WIDTH = 20;
-    private static final int COLUMN_GAP = 20;
+    private static final int COLUMN_WIDTH = 16;
+    private static final int COLUMN_GAP = 16;
     private static final int LETTERS = 16;
+    private static final int KEY_LINE = 20;
     private static final int LINES_PER_STEP = 2;
     private static final int OPAQUE = 255;
     private static final int VEILED = 200;
@@ -86,7 +88,7 @@ final class StaircasePlot extends Canvas {
         int line = gc.getFontMetrics().getHeight();
         int left = gc.textExtent("100").x + 3 * GAP;
         int right = LETTERS + 3 * (COLUMN_WIDTH + COLUMN_GAP) + GAP;
-        int top = line + 2 * GAP;
+        int top = line + 3 * GAP;
         return new Rectangle(left, top, Math.max(10, client.width - left - right), Math.max(10, client.height - top - 2 * line - 3 * GAP));
     }
 
@@ -216,8 +218,24 @@ final class StaircasePlot extends Canvas {
             gc.setLineStyle(SWT.LINE_DASH);
             gc.drawLine(area.x, y, area.x + area.width, y);
             gc.setLineStyle(SWT.LINE_SOLID);
-            paintText(gc, NLS.bind(Messages.Capture_required, Numbers.percent(required)), area.x + GAP, y - gc.getFontMetrics().getHeight());
         });
+        paintRequiredKey(gc);
+    }
+
+    /** Says above the staircase what the dashed line is. */
+    private void paintRequiredKey(GC gc) {
+        String text = audit.verdicts().stream().map(Verdict::required).distinct().map(Numbers::percent)
+                .collect(Collectors.joining(", "));
+        if (text.isEmpty()) {
+            return;
+        }
+        int x = 4 * GAP + gc.textExtent(Messages.Capture_axisMass).x;
+        int middle = gc.getFontMetrics().getHeight() / 2;
+        gc.setForeground(getForeground());
+        gc.setLineStyle(SWT.LINE_DASH);
+        gc.drawLine(x, middle, x + KEY_LINE, middle);
+        gc.setLineStyle(SWT.LINE_SOLID);
+        gc.drawText(NLS.bind(Messages.Capture_required, text), x + KEY_LINE + GAP, 0, true);
     }
 
     private void paintStairs(GC gc, Rectangle area, Direction direction) {

@@ -38,7 +38,7 @@ public final class ThemeColours {
 
     /** The outline of what is selected, the same in every view. */
     public static Color selection(Control control) {
-        return isDark(control) ? new Color(0xFF, 0x7A, 0xC6) : new Color(0xC2, 0x18, 0x7E);
+        return isDark(control) ? new Color(0x3D, 0xB8, 0xFF) : new Color(0x00, 0x95, 0xE0);
     }
 
     /** Passed; always beside a sign and a word. */

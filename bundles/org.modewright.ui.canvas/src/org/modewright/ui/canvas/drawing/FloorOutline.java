@@ -1,19 +1,21 @@
 package org.modewright.ui.canvas.drawing;
 
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
+import java.util.Set;
 import org.modewright.model.structure.Node;
+import org.modewright.ui.canvas.drawing.PlaneGeometry.Point;
 
 /**
- * The outline of a rigid floor: the convex hull of its nodes in their plane, drawn a little inside, so that it is seen beside the beams
- * along the edge. The inset points are weighted means of the nodes and move as such.
+ * The outline of a rigid floor: a walk along the outermost members between its nodes, so that recesses stay open, or the convex hull of
+ * the nodes where members do not close a ring. It is drawn a little inside, so that it is seen beside the beams along the edge; the inset
+ * points are weighted means of the corners and move as such.
  */
 final class FloorOutline {
 
     private static final double INSET = 0.05;
-    private static final double FLAT = 1e-9;
 
     private final List<Node> corners;
 
@@ -21,9 +23,46 @@ final class FloorOutline {
         this.corners = corners;
     }
 
-    /** The outline of some nodes; one of fewer than three corners where the nodes span no plane. */
-    static FloorOutline of(List<Node> nodes) {
-        return new FloorOutline(hull(nodes));
+    /**
+     * The outline of some nodes.
+     *
+     * @param nodes nodes in one plane
+     * @param joined the nodes that members join to a node
+     */
+    static FloorOutline of(List<Node> nodes, Map<Node, Set<Node>> joined) {
+        Map<Node, Point> flat = PlaneGeometry.flatten(nodes);
+        if (flat.isEmpty()) {
+            return new FloorOutline(List.of());
+        }
+        List<Point> ring = walk(flat, joined);
+        List<Point> outline = ring.isEmpty() ? PlaneGeometry.hull(flat) : ring;
+        return new FloorOutline(outline.stream().map(Point::node).toList());
+    }
+
+    /**
+     * Goes round counter-clockwise from the leftmost point, at each point along the member that turns most to the right. Empty where the
+     * walk gets stuck or leaves corners of the floor outside.
+     */
+    private static List<Point> walk(Map<Node, Point> flat, Map<Node, Set<Node>> joined) {
+        Point start = flat.values().stream().min(Comparator.comparingDouble(Point::u).thenComparingDouble(Point::v)).orElseThrow();
+        Point from = new Point(null, start.u() - 1, start.v());
+        List<Point> ring = new ArrayList<>();
+        Point at = start;
+        do {
+            ring.add(at);
+            Point next = next(from, at, flat, joined);
+            if (next == null || ring.size() > 2 * flat.size()) {
+                return List.of();
+            }
+            from = at;
+            at = next;
+        } while (at != start);
+        return ring.containsAll(PlaneGeometry.hull(flat)) ? ring : List.of();
+    }
+
+    private static Point next(Point from, Point at, Map<Node, Point> flat, Map<Node, Set<Node>> joined) {
+        return joined.getOrDefault(at.node(), Set.of()).stream().map(flat::get).filter(point -> point != null && point != at)
+                .min(Comparator.comparingDouble(point -> PlaneGeometry.angle(from, at, point))).orElse(null);
     }
 
     /** The nodes at the corners, in order round the floor. */
@@ -39,7 +78,7 @@ final class FloorOutline {
     double[] line() {
         double[] at = new double[3 * corners.size()];
         for (int i = 0; i < corners.size(); i++) {
-            System.arraycopy(position(corners.get(i)), 0, at, 3 * i, 3);
+            System.arraycopy(PlaneGeometry.position(corners.get(i)), 0, at, 3 * i, 3);
         }
         return inset(at);
     }
@@ -56,102 +95,5 @@ final class FloorOutline {
             line[i] = (1 - INSET) * atCorners[i % atCorners.length] + INSET * mean[i % 3];
         }
         return line;
-    }
-
-    private record Flat(Node node, double u, double v) {
-    }
-
-    /** Andrew's monotone chain in the plane of the nodes (A. M. Andrew, Information Processing Letters 9 (1979) 216-219). */
-    private static List<Node> hull(List<Node> nodes) {
-        List<Flat> flat = flatten(nodes);
-        if (flat.size() < 3) {
-            return List.of();
-        }
-        flat.sort(Comparator.comparingDouble(Flat::u).thenComparingDouble(Flat::v));
-        List<Flat> hull = new ArrayList<>(chain(flat));
-        List<Flat> reversed = new ArrayList<>(flat);
-        Collections.reverse(reversed);
-        hull.addAll(chain(reversed));
-        return hull.stream().map(Flat::node).toList();
-    }
-
-    /** One half of the hull without its last point. */
-    private static List<Flat> chain(List<Flat> sorted) {
-        List<Flat> chain = new ArrayList<>();
-        for (Flat point : sorted) {
-            while (chain.size() > 1 && turn(chain.get(chain.size() - 2), chain.get(chain.size() - 1), point) <= 0) {
-                chain.remove(chain.size() - 1);
-            }
-            chain.add(point);
-        }
-        return chain.subList(0, chain.size() - 1);
-    }
-
-    private static double turn(Flat a, Flat b, Flat c) {
-        return (b.u - a.u) * (c.v - a.v) - (b.v - a.v) * (c.u - a.u);
-    }
-
-    /** Places in the plane of the nodes; none where they span no plane. */
-    private static List<Flat> flatten(List<Node> nodes) {
-        if (nodes.size() < 3) {
-            return List.of();
-        }
-        double[] origin = position(nodes.get(0));
-        double[] along = farthest(nodes, origin, null);
-        double reach = norm(along);
-        if (!(reach > 0)) {
-            return List.of();
-        }
-        scale(along, 1 / reach);
-        double[] across = farthest(nodes, origin, along);
-        double width = norm(across);
-        if (!(width > FLAT * reach)) {
-            return List.of();
-        }
-        scale(across, 1 / width);
-        List<Flat> flat = new ArrayList<>();
-        for (Node node : nodes) {
-            double[] from = minus(position(node), origin);
-            flat.add(new Flat(node, dot(from, along), dot(from, across)));
-        }
-        return flat;
-    }
-
-    /** The longest vector from the origin to a node, or the longest part of one that is square to an axis. */
-    private static double[] farthest(List<Node> nodes, double[] origin, double[] axis) {
-        double[] best = new double[3];
-        for (Node node : nodes) {
-            double[] from = minus(position(node), origin);
-            if (axis != null) {
-                double part = dot(from, axis);
-                from = new double[] {from[0] - part * axis[0], from[1] - part * axis[1], from[2] - part * axis[2]};
-            }
-            if (norm(from) > norm(best)) {
-                best = from;
-            }
-        }
-        return best;
-    }
-
-    private static double[] position(Node node) {
-        return new double[] {node.getX(), node.getY(), node.getZ()};
-    }
-
-    private static double[] minus(double[] a, double[] b) {
-        return new double[] {a[0] - b[0], a[1] - b[1], a[2] - b[2]};
-    }
-
-    private static double dot(double[] a, double[] b) {
-        return a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
-    }
-
-    private static double norm(double[] a) {
-        return Math.sqrt(dot(a, a));
-    }
-
-    private static void scale(double[] a, double by) {
-        for (int i = 0; i < a.length; i++) {
-            a[i] *= by;
-        }
     }
 }

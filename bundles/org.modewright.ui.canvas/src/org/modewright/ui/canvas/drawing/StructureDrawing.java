@@ -2,6 +2,7 @@ package org.modewright.ui.canvas.drawing;
 
 import java.util.Arrays;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -49,7 +50,7 @@ public final class StructureDrawing {
         model.getMembers().forEach(member -> addMember(member, segments));
         model.getRigidLinks().forEach(this::addLink);
         model.getSprings().forEach(this::addSpring);
-        model.getRigidFloors().forEach(this::addFloor);
+        addFloors(model);
         model.getSupports().forEach(this::addSupport);
         model.getMasses().forEach(this::addMass);
         addLevels(model);
@@ -136,8 +137,19 @@ public final class StructureDrawing {
         }
     }
 
-    private void addFloor(RigidFloor floor) {
-        FloorOutline outline = FloorOutline.of(floor.getNodes().stream().filter(vertices::containsKey).toList());
+    private void addFloors(StructuralModel model) {
+        Map<Node, Set<Node>> joined = new HashMap<>();
+        for (Member member : model.getMembers()) {
+            if (hasNodes(member.getStart(), member.getEnd())) {
+                joined.computeIfAbsent(member.getStart(), node -> new HashSet<>()).add(member.getEnd());
+                joined.computeIfAbsent(member.getEnd(), node -> new HashSet<>()).add(member.getStart());
+            }
+        }
+        model.getRigidFloors().forEach(floor -> addFloor(floor, joined));
+    }
+
+    private void addFloor(RigidFloor floor, Map<Node, Set<Node>> joined) {
+        FloorOutline outline = FloorOutline.of(floor.getNodes().stream().filter(vertices::containsKey).toList(), joined);
         if (outline.isDrawn()) {
             moving.floor(builder.line(objects.floor(floor), outline.line()), outline);
         }
