@@ -13,7 +13,7 @@ import org.eclipse.swt.graphics.Resource;
  * tool kit reports them when the garbage collector finds them, with the place where they were made; those made by this product's code
  * count.
  */
-final class ResourceLeaks {
+public final class ResourceLeaks {
 
     private static final String OURS = "org.modewright";
     private static final int MOST_COLLECTIONS = 200;
@@ -21,12 +21,12 @@ final class ResourceLeaks {
     private final List<Error> reports = new CopyOnWriteArrayList<>();
 
     /** Begins to watch; resources made before are not watched. */
-    void watch() {
+    public void watch() {
         Resource.setNonDisposeHandler(reports::add);
     }
 
     /** What was leaked so far, with stacks; empty if nothing. */
-    String found() {
+    public String found() {
         collectGarbage();
         StringWriter text = new StringWriter();
         for (Error report : reports) {

@@ -17,6 +17,7 @@ import java.util.Arrays;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipOutputStream;
 import org.eclipse.core.resources.IFile;
+import org.eclipse.core.runtime.jobs.Job;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -135,6 +136,19 @@ class RunStoreTest {
         }
         RunStoreException error = assertThrows(RunStoreException.class, () -> store.load(file));
         assertTrue(error.getMessage().contains("newer version"), error.getMessage());
+    }
+
+    @Test
+    void aKeptRunFollowsItsModelAndGoesWithIt() throws Exception {
+        store.save(file, run);
+        IFile renamed = project.project().getFile("tower.modewright");
+        file.move(renamed.getFullPath(), true, null);
+        Job.getJobManager().join(AuditJob.FAMILY, null);
+        assertFalse(project.project().getFile("mast.modes").exists());
+        assertEquals(run.modelHash(), store.load(renamed).orElseThrow().modelHash());
+        renamed.delete(true, null);
+        Job.getJobManager().join(AuditJob.FAMILY, null);
+        assertFalse(project.project().getFile("tower.modes").exists());
     }
 
     private Path kept() {

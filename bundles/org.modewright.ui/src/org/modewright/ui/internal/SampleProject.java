@@ -14,6 +14,7 @@ import org.eclipse.ui.IWorkbenchWindow;
 import org.eclipse.ui.PartInitException;
 import org.eclipse.ui.actions.WorkspaceModifyOperation;
 import org.eclipse.ui.ide.IDE;
+import org.eclipse.ui.wizards.newresource.BasicNewResourceWizard;
 import org.modewright.samples.Sample;
 import org.modewright.samples.Samples;
 import org.modewright.workspace.ModelProjects;
@@ -38,6 +39,7 @@ public final class SampleProject {
                 }
             });
             if (demonstration != null) {
+                BasicNewResourceWizard.selectAndReveal(demonstration, window);
                 IDE.openEditor(window.getActivePage(), demonstration, true);
             }
         } catch (InvocationTargetException failure) {

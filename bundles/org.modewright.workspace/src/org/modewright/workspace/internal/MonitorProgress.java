@@ -11,7 +11,7 @@ import org.modewright.numerics.Progress;
 public final class MonitorProgress implements Progress {
 
     private static final int WHOLE = 1000;
-    private static final int STAGE = 400;
+    private static final int STAGE = 250;
 
     private final IProgressMonitor root;
     private final SubMonitor whole;
