@@ -277,7 +277,8 @@ class FrameMemberTest {
             double[] byNode = cantileverChain(released, force, false);
             assertEquals(byNode.length, byRelease.length);
             for (int mode = 0; mode < byNode.length; mode++) {
-                assertEquals(byNode[mode], byRelease[mode], 1e-9 * Math.abs(byNode[mode]) + 1e-10 * byNode[byNode.length - 1], "mode " + mode);
+                assertEquals(byNode[mode], byRelease[mode], 1e-9 * Math.abs(byNode[mode]) + 1e-10 * byNode[byNode.length - 1],
+                        "mode " + mode);
             }
         }
     }

@@ -30,7 +30,9 @@ public record AssemblyParts(Transformation transformation, int[] kept, MatrixPai
         MatrixPair all = MatrixAssembler.assemble(store, transformation, progress);
         RigidMotions rigid = new RigidMotions(snapshot.nodes(), transformation, store, all.mass());
         MassLedger ledger = new LedgerBuilder(snapshot, store, nodalMasses, transformation, all.mass(), rigid).build();
-        MotionDropping dropping = MotionDropping.of(all, store, transformation, progress);
-        return new AssemblyParts(transformation, dropping.kept(), dropping.matrices(), store, rigid, ledger, dropping.dropped());
+        MotionDropping dropping = MotionDropping.of(store, transformation, progress);
+        int[] kept = dropping.kept();
+        MatrixPair matrices = dropping.dropped().isEmpty() ? all : all.restrictedTo(kept);
+        return new AssemblyParts(transformation, kept, matrices, store, rigid, ledger, dropping.dropped());
     }
 }

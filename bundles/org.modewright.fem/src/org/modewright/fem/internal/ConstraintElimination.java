@@ -64,6 +64,11 @@ final class ConstraintElimination {
         return expression[unknown];
     }
 
+    /** The unknowns that are expressed by a free unknown, itself apart. */
+    Set<Integer> users(int unknown) {
+        return users[unknown] == null ? Set.of() : users[unknown];
+    }
+
     private LinearForm substituted(LinearForm constraint) {
         LinearForm result = constraint;
         for (int i = 0; i < constraint.size(); i++) {

@@ -83,19 +83,20 @@ final class SmallNullSpace {
         }
     }
 
-    /** Whether an unknown is free to choose; the free ones determine all others. */
-    boolean isFree(int unknown) {
-        return pivotRow[unknown] < 0;
+    /** Number of independent equations. */
+    int rank() {
+        return rank;
     }
 
-    /** The solution with 1 at one free unknown and 0 at the other free ones. */
-    double[] solution(int free) {
-        double[] solution = new double[columns];
+    /** Independent equation i: the factors of all unknowns, 1 at its own pivot and 0 at the pivots of the others. */
+    double[] constraint(int i) {
+        double[] factors = Arrays.copyOfRange(matrix, i * columns, (i + 1) * columns);
         for (int j = 0; j < columns; j++) {
-            solution[j] = pivotRow[j] < 0 ? 0.0 : -matrix[pivotRow[j] * columns + free];
+            if (Math.abs(factors[j]) <= NEGLIGIBLE) {
+                factors[j] = 0.0;
+            }
         }
-        solution[free] = 1.0;
-        return solution;
+        return factors;
     }
 
     /** Whether some solution moves an unknown. */

@@ -30,7 +30,7 @@ class MotionDroppingTest {
         }
 
         MotionDropping drop() {
-            return MotionDropping.of(matrices, store, transformation, Progress.NONE);
+            return MotionDropping.of(store, transformation, Progress.NONE);
         }
     }
 
@@ -131,7 +131,7 @@ class MotionDroppingTest {
             int n = undropped.transformation().unknowns();
             assertEquals(n - rank(undropped.matrices()), dropping.dropped().size(), "seed " + seed);
             assertEquals(n, dropping.kept().length + dropping.dropped().size());
-            assertEquals(dropping.kept().length, rank(dropping.matrices()), "nothing is left to drop, seed " + seed);
+            assertEquals(dropping.kept().length, rank(undropped.matrices().restrictedTo(dropping.kept())), "nothing is left to drop, seed " + seed);
             withMotions += dropping.dropped().isEmpty() ? 0 : 1;
         }
         assertTrue(withMotions > 100, "the trials hold dropped motions: " + withMotions);
@@ -170,8 +170,8 @@ class MotionDroppingTest {
         structure.line(new double[] {0, 0, 0}, new double[] {30, 20, 10}, 60, section, material);
         MotionDropping dropping = Undropped.of(structure.snapshot()).drop();
         assertEquals(6, dropping.dropped().size());
-        // the translations move every node
-        assertEquals(3, dropping.dropped().stream().filter(motion -> motion.component() < 3 && motion.nodes().length == 61).count());
+        long moved = dropping.dropped().stream().flatMapToInt(motion -> Arrays.stream(motion.nodes())).distinct().count();
+        assertEquals(61, moved);
     }
 
     @Test
