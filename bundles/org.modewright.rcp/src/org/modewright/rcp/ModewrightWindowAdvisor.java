@@ -43,6 +43,7 @@ final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
     @Override
     public void postWindowOpen() {
         IWorkbenchWindow window = getWindowConfigurer().getWindow();
+        new WindowTitle(getWindowConfigurer()).follow();
         IWorkbenchPage page = window.getActivePage();
         if (page == null || page.getEditorReferences().length > 0) {
             return;
