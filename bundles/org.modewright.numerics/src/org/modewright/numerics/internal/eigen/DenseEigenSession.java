@@ -16,8 +16,8 @@ final class DenseEigenSession extends CertifiedSession {
     }
 
     static DenseEigenSession open(EigenProblem problem, Progress progress) {
-        int rank = MassRank.of(problem.mass(), progress);
         ShiftedProblem shifted = ShiftedProblem.of(problem, progress);
+        int rank = shifted.massRank();
         progress.report("Solving " + problem.order() + " equations with dense matrices", Double.NaN);
         DenseModes modes = rank == 0 ? DenseModes.NONE : DenseModes.of(problem, shifted.shift(), progress);
         double[] values = new double[modes.theta().length];

@@ -10,7 +10,7 @@ public final class LanczosEigenSolver implements EigenSolver {
 
     @Override
     public EigenSession open(EigenProblem problem, Progress progress) {
-        int rank = MassRank.of(problem.mass(), progress);
-        return new LanczosEigenSession(ShiftedProblem.of(problem, progress), rank);
+        ShiftedProblem shifted = ShiftedProblem.of(problem, progress);
+        return new LanczosEigenSession(shifted, shifted.massRank());
     }
 }

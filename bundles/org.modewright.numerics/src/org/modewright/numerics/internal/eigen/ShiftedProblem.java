@@ -6,11 +6,11 @@ import java.util.Random;
 import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.Factorisation;
 import org.modewright.numerics.Factoriser;
-import org.modewright.numerics.Factorisers;
 import org.modewright.numerics.Inertia;
 import org.modewright.numerics.PencilReduction;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SingularPencilException;
+import org.modewright.numerics.internal.sparse.SparseFactoriser;
 
 /**
  * An eigenproblem with the factors of K - &sigma;M, the shift &sigma; lying below every finite eigenvalue: 0 where K is positive definite,
@@ -26,6 +26,7 @@ final class ShiftedProblem {
 
     private final EigenProblem problem;
     private final Factoriser factoriser;
+    private final int massRank;
     private double shift;
     private Factorisation factorisation;
     private int negativeInfinities;
@@ -33,13 +34,16 @@ final class ShiftedProblem {
 
     private ShiftedProblem(EigenProblem problem, Progress progress) {
         this.problem = problem;
-        this.factoriser = Factorisers.sparse(problem, progress);
+        SparseFactoriser sparse = SparseFactoriser.forPattern(problem.stiffness(), problem.mass(), progress);
+        this.factoriser = sparse;
+        this.massRank = MassRank.of(problem.mass(), sparse, progress);
     }
 
     /**
      * Chooses the shift and factorises.
      *
      * @throws SingularPencilException if K and M share a null vector
+     * @throws IllegalArgumentException if the mass has a negative eigenvalue
      */
     static ShiftedProblem of(EigenProblem problem, Progress progress) {
         ShiftedProblem shifted = new ShiftedProblem(problem, progress);
@@ -193,6 +197,11 @@ final class ShiftedProblem {
      * @param below number of finite eigenvalues below
      */
     record Count(double shift, int below) {
+    }
+
+    /** Rank of M, which is the number of finite eigenvalues. */
+    int massRank() {
+        return massRank;
     }
 
     EigenProblem problem() {

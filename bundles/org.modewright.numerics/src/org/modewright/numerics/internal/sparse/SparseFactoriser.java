@@ -43,6 +43,18 @@ public final class SparseFactoriser implements Factoriser {
         return new SparseFactoriser(stiffness, mass, symbolic);
     }
 
+    /**
+     * A factoriser, without shifts, for another matrix in the order of elimination of this one: its entries must be part of this pattern.
+     *
+     * @param part pattern of the other matrix
+     */
+    public SparseFactoriser forPart(SymmetricMatrix part) {
+        if (part.order() != symbolic.order()) {
+            throw new IllegalArgumentException("A matrix of order " + part.order() + " is no part of one of order " + symbolic.order() + ".");
+        }
+        return new SparseFactoriser(part, null, symbolic);
+    }
+
     @Override
     public Factorisation factorise(SymmetricMatrix k, SymmetricMatrix m, double shift, Progress progress) {
         check(k, m, shift);
