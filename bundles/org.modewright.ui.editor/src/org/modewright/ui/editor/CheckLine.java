@@ -1,22 +1,27 @@
 package org.modewright.ui.editor;
 
+import org.eclipse.jface.resource.JFaceResources;
+import org.eclipse.jface.resource.LocalResourceManager;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.CLabel;
+import org.eclipse.swt.graphics.GC;
+import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
-import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.modewright.audit.Finding;
-import org.modewright.audit.Severity;
 import org.modewright.ui.UiIds;
-import org.modewright.ui.widgets.SentenceBar;
-import org.modewright.ui.widgets.SentenceBar.Sign;
+import org.modewright.ui.widgets.Images;
 
-/** The line above the pages: what the live checks say. A click goes to the first object concerned. */
+/** One line above the pages: what the live checks say, in full in the tooltip. A click goes to the first object concerned. */
 final class CheckLine {
 
-    private final SentenceBar bar;
+    private static final String CUT = "…";
+
+    private final EndCut line;
     private final Composite below;
     private final Checks checks;
+    private final LocalResourceManager images;
 
     CheckLine(Composite parent, EditorContext context, Checks checks) {
         this.checks = checks;
@@ -27,13 +32,15 @@ final class CheckLine {
         layout.marginHeight = 0;
         layout.verticalSpacing = 0;
         body.setLayout(layout);
-        bar = new SentenceBar(body);
-        bar.setData(UiIds.WIDGET_ID, "editor.checks");
-        bar.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+        line = new EndCut(body);
+        line.setMargins(8, 3, 8, 3);
+        line.setData(UiIds.WIDGET_ID, "editor.checks");
+        line.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+        line.addListener(SWT.MouseUp, event -> goToFirst(context));
+        images = new LocalResourceManager(JFaceResources.getResources(), line);
         below = new Composite(body, SWT.NONE);
         below.setLayout(new FillLayout());
         below.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
-        bar.onClick(() -> goToFirst(context));
     }
 
     /** Where the pages stand. */
@@ -42,34 +49,73 @@ final class CheckLine {
     }
 
     void show(boolean visible) {
-        bar.setVisible(visible);
-        ((GridData) bar.getLayoutData()).exclude = !visible;
+        line.setVisible(visible);
+        ((GridData) line.getLayoutData()).exclude = !visible;
         refresh();
+        line.requestLayout();
     }
 
     void refresh() {
-        if (!bar.isDisposed()) {
-            bar.show(sign(), checks.line());
+        if (line.isDisposed()) {
+            return;
         }
+        String text = checks.line();
+        if (!text.equals(line.full)) {
+            line.full = text;
+            line.setText(text.replace("&", "&&"));
+            line.setToolTipText(checks.all().isEmpty() ? null : checks.all().get(0).text() + " " + checks.all().get(0).remedy());
+        }
+        String sign = sign();
+        line.setImage(sign == null ? null : images.get(Images.descriptor(sign)));
+        line.setCursor(checks.all().isEmpty() ? null : line.getDisplay().getSystemCursor(SWT.CURSOR_HAND));
     }
 
-    private Sign sign() {
+    private String sign() {
+        if (!checks.isDone()) {
+            return null;
+        }
         if (checks.all().isEmpty()) {
-            return Sign.NONE;
+            return Images.PASSED;
         }
         return switch (checks.all().get(0).severity()) {
-            case ERROR -> Sign.ERROR;
-            case WARNING -> Sign.WARNING;
-            case INFO -> Sign.INFORMATION;
+            case ERROR -> Images.ERROR;
+            case WARNING -> Images.WARNING;
+            case INFO -> Images.INFORMATION;
         };
     }
 
     private void goToFirst(EditorContext context) {
         for (Finding finding : checks.all()) {
-            if (!finding.objects().isEmpty() && finding.severity() != Severity.INFO) {
-                context.session().revealProperties(finding.objects().get(0).id());
+            if (!finding.objects().isEmpty()) {
+                context.goTo(finding);
                 return;
             }
+        }
+    }
+
+    /** Cuts its text at the end, as the sentence begins with what matters. */
+    private static final class EndCut extends CLabel {
+
+        private String full = "";
+
+        EndCut(Composite parent) {
+            super(parent, SWT.NONE);
+        }
+
+        @Override
+        protected String shortenText(GC gc, String text, int width) {
+            int room = width - gc.textExtent(CUT, SWT.DRAW_MNEMONIC).x;
+            int low = 0;
+            int high = text.length();
+            while (low < high) {
+                int middle = (low + high + 1) / 2;
+                if (gc.textExtent(text.substring(0, middle), SWT.DRAW_MNEMONIC).x <= room) {
+                    low = middle;
+                } else {
+                    high = middle - 1;
+                }
+            }
+            return text.substring(0, low) + CUT;
         }
     }
 }

@@ -1,6 +1,7 @@
 package org.modewright.ui.editor;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -29,6 +30,7 @@ public final class Checks {
     private final Runnable whenDone;
     private List<Finding> findings = List.of();
     private Map<String, List<Finding>> byId = Map.of();
+    private boolean done;
     private boolean disposed;
     private StructuralModel waiting;
     private Job job;
@@ -73,9 +75,10 @@ public final class Checks {
         if (disposed) {
             return;
         }
-        findings = found;
+        findings = found.stream().sorted(Comparator.comparing(Finding::severity)).toList();
+        done = true;
         byId = new HashMap<>();
-        for (Finding finding : found) {
+        for (Finding finding : findings) {
             for (ObjectRef object : finding.objects()) {
                 byId.computeIfAbsent(object.id(), id -> new ArrayList<>()).add(finding);
             }
@@ -92,10 +95,15 @@ public final class Checks {
         return findings;
     }
 
+    /** Whether a check has ended since the editor was opened. */
+    boolean isDone() {
+        return done;
+    }
+
     /** All in one line: how many, and the first of them. */
     String line() {
         if (findings.isEmpty()) {
-            return Messages.Checks_none;
+            return done ? Messages.Checks_none : Messages.Checks_working;
         }
         Finding first = findings.get(0);
         return NLS.bind(Messages.Checks_first, counts(), first.text());

@@ -1,9 +1,11 @@
 package org.modewright.ui.editor;
 
+import java.util.List;
 import java.util.Set;
+import org.eclipse.emf.ecore.EObject;
 import org.eclipse.swt.widgets.Control;
 
-/** A page of the structure editor. */
+/** A page of the structure editor. Only the page on top is told of changes; another one is told when it comes to the top. */
 public interface EditorPage {
 
     /** What the tab says. */
@@ -22,9 +24,34 @@ public interface EditorPage {
 
     void setFocus();
 
+    /** Shows what the live checks say now. */
+    default void findingsChanged() {
+        // A page without objects shows no findings.
+    }
+
+    /** Brings the properties of what is selected forward and sets the focus into them. */
+    default void showProperties() {
+        setFocus();
+    }
+
+    /** Begins to rename what is selected. */
+    default void rename() {
+        showProperties();
+    }
+
+    /** What Delete deletes here; null: the objects selected in the session. */
+    default List<? extends EObject> toDelete() {
+        return null;
+    }
+
     /** Copies what is selected here as text. */
     default void copy() {
         // A page without text to copy leaves the clipboard alone.
+    }
+
+    /** Takes over rows from the clipboard. */
+    default void paste() {
+        // A page without a table takes nothing.
     }
 
     /** Selects everything that the page shows. */

@@ -12,7 +12,6 @@ public final class Messages extends NLS {
     public static String Error_title;
     public static String Error_reload;
     public static String Save_failed;
-    public static String Save_asTitle;
     public static String Undo;
     public static String Redo;
     public static String Undo_plain;
@@ -28,12 +27,10 @@ public final class Messages extends NLS {
     public static String Changed_question;
     public static String Changed_reload;
     public static String Changed_keep;
-    public static String Form_nothing;
     public static String Form_many;
     public static String Form_mixed;
     public static String Form_kinds;
     public static String Form_different;
-    public static String Form_group_name;
     public static String Checks_none;
     public static String Checks_first;
     public static String Tables_filter;
@@ -52,15 +49,8 @@ public final class Messages extends NLS {
     public static String Loads_addPattern;
     public static String Loads_addNodeLoad;
     public static String Loads_addMemberLoad;
-    public static String Loads_selfTitle;
     public static String Loads_massTitle;
     public static String Loads_source;
-    public static String Loads_mass;
-    public static String Loads_kind;
-    public static String Loads_kindNode;
-    public static String Loads_kindMember;
-    public static String Loads_target;
-    public static String Loads_value;
     public static String Loads_total;
     public static String Loads_notComputable;
     public static String Loads_working;
@@ -89,7 +79,25 @@ public final class Messages extends NLS {
     public static String Act_triple;
     public static String Act_supportedAlready;
     public static String Act_needsSomething;
-    public static String Tree_rename;
+    public static String Cut;
+    public static String Paste;
+    public static String Changed_overwriteQuestion;
+    public static String Changed_overwrite;
+    public static String Gone_title;
+    public static String Gone_question;
+    public static String Gone_keep;
+    public static String Gone_close;
+    public static String Fold_open;
+    public static String Fold_close;
+    public static String Form_nothingInSpace;
+    public static String Form_nothingInTable;
+    public static String Form_nothingInLoads;
+    public static String Checks_working;
+    public static String Tables_kinds;
+    public static String Loads_deletePattern;
+    public static String Loads_atNode;
+    public static String Loads_onMember;
+    public static String Loads_massHelp;
 
     static {
         NLS.initializeMessages("org.modewright.ui.editor.messages", Messages.class);

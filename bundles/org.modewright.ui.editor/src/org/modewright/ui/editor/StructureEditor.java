@@ -13,6 +13,7 @@ import org.eclipse.core.resources.IMarker;
 import org.eclipse.core.resources.IResource;
 import org.eclipse.core.runtime.CoreException;
 import org.eclipse.core.runtime.ILog;
+import org.eclipse.core.runtime.IPath;
 import org.eclipse.core.runtime.IProgressMonitor;
 import org.eclipse.core.runtime.Status;
 import org.eclipse.emf.common.command.BasicCommandStack;
@@ -22,9 +23,12 @@ import org.eclipse.emf.edit.domain.AdapterFactoryEditingDomain;
 import org.eclipse.emf.edit.domain.EditingDomain;
 import org.eclipse.emf.edit.domain.IEditingDomainProvider;
 import org.eclipse.jface.dialogs.ErrorDialog;
+import org.eclipse.jface.dialogs.IDialogConstants;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.osgi.util.NLS;
+import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Shell;
 import org.eclipse.ui.IEditorInput;
@@ -37,6 +41,7 @@ import org.eclipse.ui.part.FileEditorInput;
 import org.eclipse.ui.part.MultiPageEditorPart;
 import org.eclipse.ui.views.contentoutline.IContentOutlinePage;
 import org.modewright.audit.Finding;
+import org.modewright.audit.ObjectRef;
 import org.modewright.model.ModelFile;
 import org.modewright.model.ModelFileException;
 import org.modewright.model.Names;
@@ -61,12 +66,14 @@ public final class StructureEditor extends MultiPageEditorPart
 
     private static final int NAMED = 8;
 
-    private final List<EditorPage> pages = new ArrayList<>();
+    private final Pages pages = new Pages();
     private final List<Runnable> modelListeners = new ArrayList<>();
     private final FileWatch watch = new FileWatch(this::fileChanged, this::fileMoved);
+    private final AuditSession.Listener sessionListener = this::sessionChanged;
     private StructureEditAdapterFactory adapterFactory;
     private AdapterFactoryEditingDomain domain;
     private StructuralModel model;
+    private ModelFileException failure;
     private ModelIndex index;
     private AuditSession session;
     private Checks checks;
@@ -75,8 +82,8 @@ public final class StructureEditor extends MultiPageEditorPart
     private EditorActions actions;
     private boolean changePending;
     private boolean changedOutside;
+    private boolean gone;
     private boolean asking;
-    private final AuditSession.Listener sessionListener = this::sessionChanged;
 
     @Override
     public void init(IEditorSite site, IEditorInput input) throws PartInitException {
@@ -101,10 +108,11 @@ public final class StructureEditor extends MultiPageEditorPart
         model = null;
         index = null;
         failure = null;
+        changedOutside = false;
+        gone = false;
         try {
             model = ModelFile.load(path());
             domain.getResourceSet().getResources().add(model.eResource());
-            index = new ModelIndex(model);
             stack.addCommandStackListener(this::commandStackChanged);
             checks.request(model);
         } catch (ModelFileException fault) {
@@ -112,10 +120,15 @@ public final class StructureEditor extends MultiPageEditorPart
         }
     }
 
-    private ModelFileException failure;
-
     private Path path() {
         return getModelFile().getLocation().toFile().toPath();
+    }
+
+    private ModelIndex index() {
+        if (index == null) {
+            index = new ModelIndex(model);
+        }
+        return index;
     }
 
     @Override
@@ -135,7 +148,9 @@ public final class StructureEditor extends MultiPageEditorPart
             addPage(new LoadsPage(getContainer(), this));
             addPage(new AnalysisPage(getContainer(), this));
         }
-        actions = new EditorActions(this);
+        if (actions == null) {
+            actions = new EditorActions(this);
+        }
         checkLine.show(model != null);
     }
 
@@ -147,8 +162,7 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     protected void pageChange(int newPageIndex) {
         super.pageChange(newPageIndex);
-        EditorPage page = pages.get(newPageIndex);
-        page.select(session.selection().elementIds());
+        pages.shown(newPageIndex, session.selection().elementIds());
         if (actions != null) {
             actions.update();
         }
@@ -156,23 +170,26 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public void setFocus() {
-        if (!pages.isEmpty()) {
-            activePage().setFocus();
+        if (pages.top() != null) {
+            pages.top().setFocus();
         }
-        askAboutChange();
+        watch.look();
+        display().asyncExec(this::askAboutChange);
     }
 
     /** The page on top. */
     public EditorPage activePage() {
-        return pages.get(Math.max(0, getActivePage()));
+        return pages.top();
     }
 
     /** Brings a page to the top. */
     public void showPage(Class<? extends EditorPage> kind) {
-        for (int i = 0; i < pages.size(); i++) {
-            if (kind.isInstance(pages.get(i))) {
-                setActivePage(i);
-            }
+        showPage(pages.indexOf(kind));
+    }
+
+    private void showPage(int page) {
+        if (page >= 0 && page != getActivePage()) {
+            setActivePage(page);
         }
     }
 
@@ -181,8 +198,21 @@ public final class StructureEditor extends MultiPageEditorPart
         return checks;
     }
 
+    EditorActions actions() {
+        return actions;
+    }
+
+    /** Ids selected in the session, if it is about this editor. */
+    Set<String> selectedIds() {
+        return isCurrent() ? session.selection().elementIds() : Set.of();
+    }
+
+    StructureEditAdapterFactory adapterFactory() {
+        return adapterFactory;
+    }
+
     private void commandStackChanged(EventObject event) {
-        index = new ModelIndex(model);
+        index = null;
         if (!changePending) {
             changePending = true;
             display().asyncExec(this::publishChange);
@@ -193,13 +223,18 @@ public final class StructureEditor extends MultiPageEditorPart
         return getSite().getShell().getDisplay();
     }
 
+    private boolean isClosed() {
+        return getContainer() == null || getContainer().isDisposed();
+    }
+
     private void publishChange() {
         changePending = false;
-        if (getContainer() == null || getContainer().isDisposed() || model == null) {
+        if (isClosed() || model == null) {
             return;
         }
         firePropertyChange(PROP_DIRTY);
-        pages.forEach(EditorPage::modelChanged);
+        forgetWhatIsGone();
+        pages.modelChanged();
         if (outline != null) {
             outline.modelChanged();
         }
@@ -208,26 +243,45 @@ public final class StructureEditor extends MultiPageEditorPart
         List.copyOf(modelListeners).forEach(Runnable::run);
     }
 
+    private void forgetWhatIsGone() {
+        Set<String> selected = session.selection().elementIds();
+        if (isCurrent() && !selected.isEmpty()) {
+            Set<String> known = index().known(selected);
+            if (known.size() < selected.size()) {
+                select(known, this);
+            }
+        }
+    }
+
+    /** Whether the session is about this editor's file; another file may have the same ids. */
+    private boolean isCurrent() {
+        return getModelFile().equals(session.modelFile());
+    }
+
     private void checked() {
+        if (isClosed() || model == null) {
+            return;
+        }
         checkLine.refresh();
-        pages.forEach(EditorPage::modelChanged);
+        pages.findingsChanged();
         if (outline != null) {
-            outline.modelChanged();
+            outline.findingsChanged();
         }
     }
 
     private void sessionChanged(AuditSession.Change change) {
-        if (change == AuditSession.Change.SELECTION && model != null && getContainer() != null && !getContainer().isDisposed()) {
-            Set<String> ids = session.selection().elementIds();
-            if (session.selectionSource() != activePage()) {
-                activePage().select(ids);
-            }
-            if (outline != null && session.selectionSource() != outline) {
-                outline.select(ids);
-            }
-            ((ObjectSelections) getSite().getSelectionProvider()).publish(selected());
-            actions.update();
+        if (change != AuditSession.Change.SELECTION || model == null || isClosed() || !isCurrent()) {
+            return;
         }
+        Set<String> ids = session.selection().elementIds();
+        if (session.selectionSource() != activePage()) {
+            activePage().select(ids);
+        }
+        if (outline != null && session.selectionSource() != outline) {
+            outline.select(ids);
+        }
+        ((ObjectSelections) getSite().getSelectionProvider()).publish(selected());
+        actions.update();
     }
 
     @Override
@@ -241,22 +295,44 @@ public final class StructureEditor extends MultiPageEditorPart
     }
 
     private boolean save(IFile file, IProgressMonitor monitor) {
+        if (file.equals(getModelFile()) && watch.isOutOfStep() && !mayOverwrite()) {
+            cancel(monitor);
+            return false;
+        }
         try {
-            watch.saving();
             ModelFile.save(model, file.getLocation().toFile().toPath());
             file.refreshLocal(IResource.DEPTH_ZERO, monitor);
+            if (file.equals(getModelFile())) {
+                watch.contentKnown();
+            }
             ((BasicCommandStack) domain.getCommandStack()).saveIsDone();
             changedOutside = false;
+            gone = false;
             firePropertyChange(PROP_DIRTY);
             return true;
         } catch (ModelFileException | CoreException fault) {
             ILog.get().error(fault.getMessage(), fault);
             ErrorDialog.openError(shell(), Messages.Save_failed, null, Status.error(fault.getMessage(), fault));
-            if (monitor != null) {
-                monitor.setCanceled(true);
-            }
+            cancel(monitor);
             return false;
         }
+    }
+
+    private static void cancel(IProgressMonitor monitor) {
+        if (monitor != null) {
+            monitor.setCanceled(true);
+        }
+    }
+
+    private boolean mayOverwrite() {
+        int answer = MessageDialog.open(MessageDialog.QUESTION, shell(), Messages.Changed_title,
+                NLS.bind(Messages.Changed_overwriteQuestion, getModelFile().getName()), SWT.NONE, Messages.Changed_overwrite,
+                Messages.Changed_reload, IDialogConstants.CANCEL_LABEL);
+        if (answer == 1) {
+            watch.look();
+            reload();
+        }
+        return answer == 0;
     }
 
     @Override
@@ -272,7 +348,7 @@ public final class StructureEditor extends MultiPageEditorPart
         if (dialog.getResult() == null) {
             return;
         }
-        org.eclipse.core.runtime.IPath chosen = dialog.getResult();
+        IPath chosen = dialog.getResult();
         if (!ModelFile.EXTENSION.equals(chosen.getFileExtension())) {
             chosen = chosen.addFileExtension(ModelFile.EXTENSION);
         }
@@ -290,44 +366,60 @@ public final class StructureEditor extends MultiPageEditorPart
     }
 
     private void fileMoved(IFile file) {
-        if (file == null) {
-            if (!isDirty()) {
-                getSite().getPage().closeEditor(this, false);
-            }
-        } else {
+        if (isClosed()) {
+            return;
+        }
+        if (file != null) {
             moveTo(file);
+        } else if (isDirty()) {
+            gone = true;
+            askAboutChange();
+        } else {
+            getSite().getPage().closeEditor(this, false);
         }
     }
 
     private void fileChanged() {
-        if (getContainer() == null || getContainer().isDisposed()) {
+        if (isClosed()) {
             return;
         }
         if (isDirty()) {
             changedOutside = true;
-            if (getSite().getPage().getActivePart() == this) {
-                askAboutChange();
-            }
+            askAboutChange();
         } else {
             reload();
         }
     }
 
+    /** Asks what is to be done about a change from outside, once the user is here. */
     private void askAboutChange() {
-        if (!changedOutside || asking) {
+        if (isClosed() || asking || getSite().getPage().getActivePart() != this) {
             return;
         }
         asking = true;
         try {
-            int answer = MessageDialog.open(MessageDialog.QUESTION, shell(), Messages.Changed_title,
-                    NLS.bind(Messages.Changed_question, getModelFile().getName()), 0, Messages.Changed_reload, Messages.Changed_keep);
-            changedOutside = false;
-            if (answer == 0) {
-                reload();
+            if (gone) {
+                askAboutGone();
+            } else if (changedOutside) {
+                changedOutside = false;
+                if (ask(Messages.Changed_title, Messages.Changed_question, Messages.Changed_reload, Messages.Changed_keep) == 0) {
+                    reload();
+                }
             }
         } finally {
             asking = false;
         }
+    }
+
+    private void askAboutGone() {
+        gone = false;
+        if (ask(Messages.Gone_title, Messages.Gone_question, Messages.Gone_keep, Messages.Gone_close) == 1) {
+            getSite().getPage().closeEditor(this, false);
+        }
+    }
+
+    private int ask(String title, String question, String... answers) {
+        return MessageDialog.open(MessageDialog.QUESTION, shell(), title, NLS.bind(question, getModelFile().getName()), SWT.NONE, answers);
     }
 
     private void reload() {
@@ -337,13 +429,18 @@ public final class StructureEditor extends MultiPageEditorPart
         }
         pages.clear();
         adapterFactory.dispose();
+        watch.contentKnown();
         load();
         createPages();
         setActivePage(Math.min(Math.max(0, active), getPageCount() - 1));
         firePropertyChange(PROP_DIRTY);
+        if (model != null) {
+            forgetWhatIsGone();
+        }
         if (outline != null) {
             outline.modelChanged();
         }
+        actions.update();
         List.copyOf(modelListeners).forEach(Runnable::run);
     }
 
@@ -364,9 +461,9 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public <T> T getAdapter(Class<T> type) {
-        if (type == IContentOutlinePage.class && model != null) {
+        if (type == IContentOutlinePage.class) {
             if (outline == null || outline.isDisposed()) {
-                outline = new StructureOutline(this, adapterFactory);
+                outline = new StructureOutline(this);
             }
             return type.cast(outline);
         }
@@ -379,27 +476,36 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     public void gotoMarker(IMarker marker) {
         String ids = marker.getAttribute(FindingMarkers.ELEMENT_IDS, "");
-        Set<String> elements = Arrays.stream(ids.split("\n")).filter(id -> !id.isEmpty()).collect(Collectors.toSet());
-        if (elements.isEmpty() || model == null) {
-            return;
-        }
-        session.select(session.selection().withElements(elements), this);
-        elements.stream().filter(id -> index.get(id) != null).findFirst().ifPresent(this::showPageFor);
+        goTo(Arrays.stream(ids.split("\n")).filter(id -> !id.isEmpty()).toList());
     }
 
-    private void showPageFor(String id) {
-        if (!activePage().reveals(id)) {
-            showPage(TablesPage.class);
+    @Override
+    public void goTo(Finding finding) {
+        goTo(finding.objects().stream().map(ObjectRef::id).toList());
+    }
+
+    /** Selects what a finding is about and shows it; what is about no object is about the settings. */
+    private void goTo(List<String> ids) {
+        if (model == null) {
+            return;
         }
+        Set<String> known = index().known(ids);
+        if (known.isEmpty()) {
+            showPage(model.getNodes().isEmpty() ? TablesPage.class : AnalysisPage.class);
+            return;
+        }
+        select(known, this);
+        showPage(pages.indexThatReveals(ids.stream().filter(known::contains).findFirst().orElseThrow()));
+        activePage().select(known);
     }
 
     @Override
     public boolean reveal(String elementId) {
-        if (model == null || index.get(elementId) == null) {
+        if (model == null || object(elementId) == null) {
             return false;
         }
-        session.select(session.selection().withElements(Set.of(elementId)), this);
-        showPageFor(elementId);
+        goTo(List.of(elementId));
+        activePage().showProperties();
         return true;
     }
 
@@ -450,12 +556,12 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public List<Identified> selected() {
-        return index == null ? List.of() : index.all(session.selection().elementIds());
+        return model == null || !isCurrent() ? List.of() : index().all(session.selection().elementIds());
     }
 
     @Override
     public Identified object(String id) {
-        return index == null ? null : index.get(id);
+        return model == null ? null : index().get(id);
     }
 
     @Override
@@ -476,6 +582,9 @@ public final class StructureEditor extends MultiPageEditorPart
             return;
         }
         Deletion deletion = commands().deletion(objects);
+        if (!deletion.command().canExecute()) {
+            return;
+        }
         if (deletion.dependants().isEmpty() || MessageDialog.openQuestion(shell(), Messages.Delete_title, question(objects, deletion))) {
             execute(deletion.command());
         }
@@ -494,6 +603,16 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     public List<Finding> findings(String id) {
         return checks.of(id);
+    }
+
+    @Override
+    public Set<String> drawnIds() {
+        return model == null ? Set.of() : index().drawn();
+    }
+
+    @Override
+    public void offerMenu(Control control) {
+        StructureMenu.offer(control, getSite());
     }
 
     @Override

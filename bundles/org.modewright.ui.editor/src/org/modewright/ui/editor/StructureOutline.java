@@ -4,35 +4,43 @@ import java.net.URL;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.edit.provider.IItemLabelProvider;
+import org.eclipse.jface.action.Action;
 import org.eclipse.jface.resource.ImageDescriptor;
 import org.eclipse.jface.resource.JFaceResources;
 import org.eclipse.jface.resource.LocalResourceManager;
+import org.eclipse.jface.viewers.DecorationOverlayIcon;
+import org.eclipse.jface.viewers.IDecoration;
 import org.eclipse.jface.viewers.ISelection;
 import org.eclipse.jface.viewers.ISelectionChangedListener;
 import org.eclipse.jface.viewers.StructuredSelection;
-import org.eclipse.jface.action.Action;
-import org.eclipse.jface.action.MenuManager;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.TreeEditor;
 import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Text;
 import org.eclipse.swt.widgets.Tree;
 import org.eclipse.swt.widgets.TreeItem;
+import org.eclipse.ui.IActionBars;
+import org.eclipse.ui.ISharedImages;
+import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.actions.ActionFactory;
 import org.eclipse.ui.part.Page;
 import org.eclipse.ui.views.contentoutline.IContentOutlinePage;
+import org.modewright.audit.Finding;
 import org.modewright.model.edit.CategoryItemProvider;
 import org.modewright.model.edit.Labels;
-import org.modewright.model.edit.StructureEditAdapterFactory;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.StructurePackage;
 import org.modewright.ui.UiIds;
+import org.modewright.ui.widgets.TextCopy;
+import org.modewright.ui.widgets.ThemeColours;
 
 /** The model as a tree by kind; virtual, so that large models open at once. F2 renames, Delete deletes, a double click goes there. */
 public final class StructureOutline extends Page implements IContentOutlinePage {
@@ -40,15 +48,13 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
     private static final int MOST_SELECTED = 200;
 
     private final StructureEditor editor;
-    private final StructureEditAdapterFactory adapterFactory;
     private final List<CategoryItemProvider> categories = new ArrayList<>();
     private Tree tree;
     private LocalResourceManager images;
     private TreeEditor inPlace;
 
-    StructureOutline(StructureEditor editor, StructureEditAdapterFactory adapterFactory) {
+    StructureOutline(StructureEditor editor) {
         this.editor = editor;
-        this.adapterFactory = adapterFactory;
     }
 
     @Override
@@ -62,36 +68,74 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         tree.addListener(SWT.SetData, this::fill);
         tree.addListener(SWT.Selection, event -> picked());
         tree.addListener(SWT.DefaultSelection, this::opened);
-        tree.addListener(SWT.KeyDown, this::key);
-        modelChanged();
-        select(editor.session().selection().elementIds());
+        tree.addListener(SWT.MouseMove, this::explain);
+        StructureMenu.offer(tree, getSite());
         contributeActions();
+        modelChanged();
     }
 
     private void contributeActions() {
-        Action delete = new Action(Messages.Delete) {
+        IActionBars bars = getSite().getActionBars();
+        editor.actions().contribute(bars);
+        bars.setGlobalActionHandler(ActionFactory.DELETE.getId(), action(Messages.Delete, this::delete));
+        bars.setGlobalActionHandler(ActionFactory.RENAME.getId(), action(Messages.Rename, this::rename));
+        bars.setGlobalActionHandler(ActionFactory.COPY.getId(), action(Messages.Copy, this::copy));
+        bars.setGlobalActionHandler(ActionFactory.CUT.getId(), action(Messages.Cut, this::cut));
+        bars.setGlobalActionHandler(ActionFactory.PASTE.getId(), action(Messages.Paste, this::paste));
+        bars.setGlobalActionHandler(ActionFactory.SELECT_ALL.getId(), action(Messages.SelectAll, this::selectAll));
+        bars.updateActionBars();
+    }
+
+    private static Action action(String label, Runnable body) {
+        return new Action(label) {
             @Override
             public void run() {
-                editor.delete(chosen());
+                body.run();
             }
         };
-        Action rename = new Action(Messages.Rename) {
-            @Override
-            public void run() {
-                rename();
-            }
-        };
-        getSite().getActionBars().setGlobalActionHandler(ActionFactory.DELETE.getId(), delete);
-        getSite().getActionBars().setGlobalActionHandler(ActionFactory.RENAME.getId(), rename);
-        getSite().getActionBars().setGlobalActionHandler(ActionFactory.UNDO.getId(),
-                editor.getEditorSite().getActionBars().getGlobalActionHandler(ActionFactory.UNDO.getId()));
-        getSite().getActionBars().setGlobalActionHandler(ActionFactory.REDO.getId(),
-                editor.getEditorSite().getActionBars().getGlobalActionHandler(ActionFactory.REDO.getId()));
-        MenuManager menu = new MenuManager();
-        menu.add(rename);
-        menu.add(delete);
-        tree.setMenu(menu.createContextMenu(tree));
-        tree.addListener(SWT.Dispose, event -> menu.dispose());
+    }
+
+    private void delete() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            TextKeys.delete(tree.getDisplay());
+        } else {
+            editor.delete(chosen());
+        }
+    }
+
+    private void copy() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            TextKeys.copy(tree.getDisplay());
+        } else if (!chosen().isEmpty()) {
+            TextCopy.put(tree.getDisplay(), String.join("\n", chosen().stream().map(Labels::of).toList()));
+        }
+    }
+
+    private void cut() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            TextKeys.cut(tree.getDisplay());
+        }
+    }
+
+    private void paste() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            TextKeys.paste(tree.getDisplay());
+        }
+    }
+
+    /** Selects all objects of the categories in which something is selected. */
+    private void selectAll() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            TextKeys.selectAll(tree.getDisplay());
+            return;
+        }
+        Set<String> ids = new LinkedHashSet<>();
+        for (TreeItem item : tree.getSelection()) {
+            TreeItem category = item.getParentItem() == null ? item : item.getParentItem();
+            categories.get(tree.indexOf(category)).objects().forEach(object -> ids.add(((Identified) object).getId()));
+        }
+        editor.select(ids, this);
+        select(ids);
     }
 
     @Override
@@ -118,9 +162,22 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         for (int i = 0; i < categories.size(); i++) {
             TreeItem item = tree.getItem(i);
             label(item, i);
+            if (item.getExpanded()) {
+                item.clearAll(false);
+            }
         }
-        tree.clearAll(true);
-        select(editor.session().selection().elementIds());
+        select(editor.selectedIds());
+    }
+
+    /** Shows what the live checks say now. */
+    void findingsChanged() {
+        if (tree != null && !tree.isDisposed()) {
+            for (TreeItem item : tree.getItems()) {
+                if (item.getExpanded()) {
+                    item.clearAll(false);
+                }
+            }
+        }
     }
 
     private void collectCategories() {
@@ -130,15 +187,18 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         }
         for (EReference list : StructurePackage.Literals.STRUCTURAL_MODEL.getEAllContainments()) {
             if (list.isMany()) {
-                categories.add(adapterFactory.category(editor.model(), list));
+                categories.add(editor.adapterFactory().category(editor.model(), list));
             }
         }
     }
 
     private void label(TreeItem item, int category) {
-        item.setText(categories.get(category).getText(categories.get(category)));
-        item.setImage(image(categories.get(category).getImage(categories.get(category))));
-        item.setItemCount(categories.get(category).objects().size());
+        CategoryItemProvider shown = categories.get(category);
+        item.setText(shown.getText(shown));
+        item.setImage(image(shown.getImage(shown), List.of()));
+        if (item.getItemCount() != shown.objects().size()) {
+            item.setItemCount(shown.objects().size());
+        }
     }
 
     private void fill(Event event) {
@@ -150,11 +210,37 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
             }
             return;
         }
-        Object object = object(tree.indexOf(parent), event.index);
-        if (object != null) {
-            IItemLabelProvider labels = (IItemLabelProvider) adapterFactory.adapt(object, IItemLabelProvider.class);
+        if (object(tree.indexOf(parent), event.index) instanceof Identified object) {
+            IItemLabelProvider labels = (IItemLabelProvider) editor.adapterFactory().adapt(object, IItemLabelProvider.class);
             item.setText(Labels.of(object));
-            item.setImage(image(labels.getImage(object)));
+            item.setImage(image(labels.getImage(object), editor.findings(object.getId())));
+        }
+    }
+
+    private Image image(Object address, List<Finding> findings) {
+        if (!(address instanceof URL url)) {
+            return null;
+        }
+        ImageDescriptor plain = ImageDescriptor.createFromURL(url);
+        String sign = findings.isEmpty() ? null : switch (findings.get(0).severity()) {
+            case ERROR -> ISharedImages.IMG_DEC_FIELD_ERROR;
+            case WARNING -> ISharedImages.IMG_DEC_FIELD_WARNING;
+            case INFO -> null;
+        };
+        if (sign == null) {
+            return images.get(plain);
+        }
+        ImageDescriptor mark = PlatformUI.getWorkbench().getSharedImages().getImageDescriptor(sign);
+        return images.get(new DecorationOverlayIcon(plain, mark, IDecoration.BOTTOM_RIGHT));
+    }
+
+    private void explain(Event event) {
+        TreeItem item = tree.getItem(new Point(event.x, event.y));
+        Identified object = item == null ? null : object(item);
+        List<Finding> findings = object == null ? List.of() : editor.findings(object.getId());
+        String tip = findings.isEmpty() ? null : findings.get(0).text() + " " + findings.get(0).remedy();
+        if (!Objects.equals(tip, tree.getToolTipText())) {
+            tree.setToolTipText(tip);
         }
     }
 
@@ -164,10 +250,6 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         }
         List<?> objects = categories.get(category).objects();
         return index < objects.size() ? objects.get(index) : null;
-    }
-
-    private Image image(Object address) {
-        return address instanceof URL url ? images.get(ImageDescriptor.createFromURL(url)) : null;
     }
 
     private Identified object(TreeItem item) {
@@ -230,13 +312,10 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         return parent.getItem(index);
     }
 
-    private void key(Event event) {
-        if (event.keyCode == SWT.F2) {
-            rename();
-        }
-    }
-
     private void rename() {
+        if (TextKeys.apply(tree.getDisplay())) {
+            return;
+        }
         TreeItem[] selection = tree.getSelection();
         Identified object = selection.length == 1 ? object(selection[0]) : null;
         if (object == null) {
@@ -245,6 +324,7 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         Text text = new Text(tree, SWT.BORDER);
         text.setText(object.getName() == null ? "" : object.getName());
         text.selectAll();
+        text.setData(UiIds.WIDGET_ID, "outline.rename");
         text.addListener(SWT.FocusOut, event -> text.dispose());
         text.addListener(SWT.Traverse, event -> {
             if (event.detail == SWT.TRAVERSE_RETURN) {
@@ -265,7 +345,7 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
             text.dispose();
         } catch (IllegalArgumentException refused) {
             text.setToolTipText(refused.getMessage());
-            text.setBackground(org.modewright.ui.widgets.ThemeColours.mix(org.modewright.ui.widgets.ThemeColours.failed(text), tree.getBackground(), 0.2));
+            text.setForeground(ThemeColours.failed(text));
         }
     }
 

@@ -5,7 +5,9 @@ import java.util.List;
 import java.util.Set;
 import java.util.function.BiConsumer;
 import java.util.function.Consumer;
+import java.util.function.Supplier;
 import java.util.stream.Collectors;
+import org.eclipse.emf.common.command.Command;
 import org.eclipse.jface.dialogs.InputDialog;
 import org.eclipse.jface.window.Window;
 import org.eclipse.osgi.util.NLS;
@@ -63,7 +65,9 @@ enum Act {
     }
 
     private static void addNode(EditorContext editor) {
-        double[] place = askTriple(editor, Messages.Act_coordinates, Messages.Act_coordinatesPrompt, "0 0 0");
+        List<Node> nodes = selected(editor, Node.class);
+        String first = nodes.isEmpty() ? "0 0 0" : Triple.text(nodes.get(0).getX(), nodes.get(0).getY(), nodes.get(0).getZ());
+        double[] place = askTriple(editor, Messages.Act_coordinates, Messages.Act_coordinatesPrompt, first);
         if (place != null) {
             Node node = StructureFactory.eINSTANCE.createNode();
             node.setX(place[0]);
@@ -98,7 +102,7 @@ enum Act {
         create(editor, List.of(member));
     }
 
-    private static <T extends Identified> void createAtNodes(EditorContext editor, java.util.function.Supplier<T> maker, BiConsumer<T, Node> place) {
+    private static <T extends Identified> void createAtNodes(EditorContext editor, Supplier<T> maker, BiConsumer<T, Node> place) {
         List<Node> nodes = selected(editor, Node.class);
         if (nodes.isEmpty()) {
             throw new IllegalArgumentException(Messages.Act_needsNodes);
@@ -151,16 +155,17 @@ enum Act {
         }
         double[] offset = askTriple(editor, Messages.Act_offset, Messages.Act_offsetPrompt, "0 0 0");
         if (offset != null) {
-            editor.execute(editor.commands().duplicate(editor.selected(), offset[0], offset[1], offset[2]));
+            Command command = editor.commands().duplicate(editor.selected(), offset[0], offset[1], offset[2]);
+            editor.execute(command);
+            editor.select(command.getResult().stream().filter(Identified.class::isInstance).map(copy -> ((Identified) copy).getId())
+                    .collect(Collectors.toSet()), editor);
         }
     }
 
     private static void joinNodes(EditorContext editor) {
         List<Node> nodes = twoNodes(editor);
-        List<Node> all = editor.model().getNodes();
-        boolean inOrder = all.indexOf(nodes.get(0)) < all.indexOf(nodes.get(1));
-        Node kept = nodes.get(inOrder ? 0 : 1);
-        editor.execute(editor.commands().joinNodes(kept, nodes.get(inOrder ? 1 : 0)));
+        Node kept = nodes.get(0);
+        editor.execute(editor.commands().joinNodes(kept, nodes.get(1)));
         editor.select(Set.of(kept.getId()), editor);
     }
 

@@ -8,7 +8,11 @@ final class Triple {
     private Triple() {
     }
 
-    /** The numbers; the text has been found good before. */
+    /**
+     * The numbers.
+     *
+     * @throws IllegalArgumentException if the text is not three finite numbers
+     */
     static double[] parse(String text) {
         String[] words = text.strip().split("[\\s,;]+");
         if (words.length != 3) {
@@ -16,12 +20,30 @@ final class Triple {
         }
         double[] numbers = new double[3];
         for (int i = 0; i < numbers.length; i++) {
-            numbers[i] = Double.parseDouble(words[i]);
-            if (!Double.isFinite(numbers[i])) {
-                throw new IllegalArgumentException(Messages.Act_triple);
-            }
+            numbers[i] = number(words[i]);
         }
         return numbers;
+    }
+
+    private static double number(String word) {
+        try {
+            double number = Double.parseDouble(word);
+            if (Double.isFinite(number)) {
+                return number;
+            }
+        } catch (NumberFormatException notANumber) {
+            throw new IllegalArgumentException(Messages.Act_triple, notANumber);
+        }
+        throw new IllegalArgumentException(Messages.Act_triple);
+    }
+
+    /** The numbers as text. */
+    static String text(double x, double y, double z) {
+        return word(x) + " " + word(y) + " " + word(z);
+    }
+
+    private static String word(double number) {
+        return number == Math.rint(number) && Math.abs(number) < 1e9 ? Long.toString((long) number) : Double.toString(number);
     }
 
     /** Why a text is not three numbers; null if it is. */

@@ -55,6 +55,11 @@ abstract class FeatureField implements Field {
     }
 
     @Override
+    public void check(Collection<? extends EObject> objects, String text) {
+        parse(text.strip());
+    }
+
+    @Override
     public Command set(Collection<? extends EObject> objects, String text) {
         return context.commands().set(objects, feature, parse(text.strip()));
     }

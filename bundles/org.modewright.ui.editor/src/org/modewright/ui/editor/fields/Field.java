@@ -22,11 +22,16 @@ public interface Field {
 
     Style style();
 
-    /** What can be chosen, for {@link Style#CHOICE}; empty for others. */
+    /** What can be chosen, or proposed where a name is typed; empty for others. */
     List<String> choices();
 
-    /** The value as text; for a flag "true" or "false". */
+    /** The value as text, every digit; for a flag "true" or "false". */
     String text(EObject object);
+
+    /** The value as a table shows it: numbers with as many digits as mean something. */
+    default String shown(EObject object) {
+        return text(object);
+    }
 
     /** What a table sorts by where numbers are not to sort as words; else the text. */
     default Comparable<?> sortKey(EObject object) {
@@ -36,6 +41,31 @@ public interface Field {
     /** Whether the value is a number, set at the right of its column. */
     default boolean isNumber() {
         return false;
+    }
+
+    /** Whether the value can be changed. */
+    default boolean isEditable() {
+        return true;
+    }
+
+    /**
+     * Refuses a text that is no value, without making a command.
+     *
+     * @param objects objects that have this field
+     * @param text the value as text
+     * @throws IllegalArgumentException as {@link #set} does
+     */
+    void check(Collection<? extends EObject> objects, String text);
+
+    /**
+     * What the checks of the model say against a value that can be set, such as a negative area: a sentence and its remedy.
+     *
+     * @param object the object that would have the value
+     * @param text the value as text
+     * @return null if nothing is to be said, or the text is no value
+     */
+    default String warning(EObject object, String text) {
+        return null;
     }
 
     /**

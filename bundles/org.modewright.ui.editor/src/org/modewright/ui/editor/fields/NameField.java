@@ -24,6 +24,11 @@ final class NameField extends FeatureField {
     }
 
     @Override
+    public void check(Collection<? extends EObject> objects, String text) {
+        context().commands().rename((Identified) objects.iterator().next(), text);
+    }
+
+    @Override
     public Command set(Collection<? extends EObject> objects, String text) {
         return context().commands().rename((Identified) objects.iterator().next(), text);
     }

@@ -41,7 +41,7 @@ final class PartFields {
 
         @Override
         public Command set(Collection<? extends EObject> objects, String text) {
-            CompoundCommand command = new CompoundCommand(FeatureTexts.label(feature()));
+            CompoundCommand command = new CompoundCommand(NLS.bind(FieldMessages.setLabel, FeatureTexts.label(feature())));
             for (EObject object : objects) {
                 Object value = parse(text.strip());
                 command.append(SetCommand.create(context().domain(), object, feature(), value == null ? SetCommand.UNSET_VALUE : value));

@@ -30,11 +30,8 @@ final class ReferenceField extends FeatureField {
 
     @Override
     public List<String> choices() {
-        if (!hasFew()) {
-            return List.of();
-        }
         List<String> names = new ArrayList<>();
-        if (!feature().isRequired()) {
+        if (hasFew() && !feature().isRequired()) {
             names.add(FieldMessages.none);
         }
         Lookup.all(context().model(), kind).forEach(object -> names.add(object.getName()));

@@ -1,12 +1,15 @@
 package org.modewright.ui.editor.pages;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Set;
 import org.eclipse.emf.common.command.Command;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EStructuralFeature;
+import org.eclipse.jface.dialogs.IDialogConstants;
 import org.eclipse.jface.dialogs.MessageDialog;
+import org.eclipse.jface.resource.JFaceResources;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.ScrolledComposite;
@@ -15,7 +18,6 @@ import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
-import org.eclipse.swt.widgets.Group;
 import org.eclipse.swt.widgets.Label;
 import org.modewright.audit.RulePack;
 import org.modewright.audit.RulePackException;
@@ -29,7 +31,6 @@ import org.modewright.ui.editor.Messages;
 import org.modewright.ui.editor.fields.FeatureTexts;
 import org.modewright.ui.editor.fields.Field;
 import org.modewright.ui.editor.fields.Fields;
-import org.modewright.ui.widgets.ThemeColours;
 import org.modewright.workspace.WorkspacePreferences;
 
 /** Units and what holds for the whole structure, what is solved, and how it is judged; each with a short explanation. */
@@ -37,6 +38,8 @@ public final class AnalysisPage implements EditorPage {
 
     private record Row(FieldControl control, EObject object) {
     }
+
+    private static final int WIDEST = 800;
 
     private final EditorContext context;
     private final ScrolledComposite scroller;
@@ -64,67 +67,55 @@ public final class AnalysisPage implements EditorPage {
         rows.clear();
         shownUnits = context.model().getUnits();
         body = new Composite(scroller, SWT.NONE);
-        GridLayout layout = new GridLayout();
-        layout.marginWidth = 12;
-        layout.marginHeight = 12;
-        layout.verticalSpacing = 12;
+        GridLayout layout = new GridLayout(3, false);
+        layout.marginWidth = 8;
+        layout.horizontalSpacing = 8;
+        layout.verticalSpacing = 4;
         body.setLayout(layout);
-        Composite structure = group(Messages.Analysis_structure);
-        addUnits(structure);
-        add(structure, context.model(), Literals.STRUCTURAL_MODEL__NAME, Literals.STRUCTURAL_MODEL__TITLE, Literals.STRUCTURAL_MODEL__NOTES,
-                Literals.STRUCTURAL_MODEL__GRAVITY, Literals.STRUCTURAL_MODEL__MASS_FORMULATION, Literals.STRUCTURAL_MODEL__SHEAR_DEFORMATION);
+        title(Messages.Analysis_structure);
+        addUnits();
+        add(context.model(), false, Literals.STRUCTURAL_MODEL__NAME, Literals.STRUCTURAL_MODEL__TITLE, Literals.STRUCTURAL_MODEL__NOTES);
+        add(context.model(), true, Literals.STRUCTURAL_MODEL__GRAVITY, Literals.STRUCTURAL_MODEL__MASS_FORMULATION,
+                Literals.STRUCTURAL_MODEL__SHEAR_DEFORMATION);
         if (context.model().getAnalysis() != null) {
-            add(group(Messages.Analysis_solve), context.model().getAnalysis(), Literals.ANALYSIS_SETTINGS__MODES, Literals.ANALYSIS_SETTINGS__BELOW);
+            title(Messages.Analysis_solve);
+            add(context.model().getAnalysis(), true, Literals.ANALYSIS_SETTINGS__MODES, Literals.ANALYSIS_SETTINGS__BELOW);
         }
         if (context.model().getAudit() != null) {
-            Composite judge = group(Messages.Analysis_judge);
-            addRulePack(judge);
-            add(judge, context.model().getAudit(), Literals.AUDIT_SETTINGS__X, Literals.AUDIT_SETTINGS__Y, Literals.AUDIT_SETTINGS__Z,
+            title(Messages.Analysis_judge);
+            addRulePack();
+            add(context.model().getAudit(), true, Literals.AUDIT_SETTINGS__X, Literals.AUDIT_SETTINGS__Y, Literals.AUDIT_SETTINGS__Z,
                     Literals.AUDIT_SETTINGS__LOCAL_NODES, Literals.AUDIT_SETTINGS__COINCIDENCE);
         }
         scroller.setContent(body);
         refresh();
     }
 
-    private Composite group(String title) {
-        Group group = new Group(body, SWT.NONE);
-        group.setText(title);
-        GridData data = new GridData(SWT.LEFT, SWT.TOP, true, false);
-        data.widthHint = 640;
-        group.setLayoutData(data);
-        GridLayout layout = new GridLayout(2, false);
-        layout.marginWidth = 8;
-        layout.horizontalSpacing = 12;
-        group.setLayout(layout);
-        return group;
+    private void title(String text) {
+        Label title = new Label(body, SWT.NONE);
+        title.setText(text);
+        title.setFont(JFaceResources.getFontRegistry().getBold(JFaceResources.DIALOG_FONT));
+        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, 3, 1);
+        data.verticalIndent = body.getChildren().length > 1 ? 8 : 0;
+        title.setLayoutData(data);
     }
 
-    private void add(Composite parent, EObject object, EStructuralFeature... features) {
+    private void add(EObject object, boolean explained, EStructuralFeature... features) {
         for (EStructuralFeature feature : features) {
             Field field = Fields.one(context.fields(), object, feature);
-            rows.add(new Row(FieldControl.create(parent, field, context), object));
-            explain(parent, FeatureTexts.help(feature));
+            FieldControl.Place place = FieldControl.Place.explained(explained ? FeatureTexts.help(feature) : null);
+            rows.add(new Row(FieldControl.create(body, field, context, place), object));
         }
     }
 
-    private static Label explain(Composite parent, String text) {
-        Label label = new Label(parent, SWT.WRAP);
-        label.setText(text.replace("&", "&&"));
-        label.setForeground(ThemeColours.secondaryText(parent));
-        GridData data = new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1);
-        data.widthHint = 480;
-        label.setLayoutData(data);
-        return label;
-    }
-
-    private void addUnits(Composite parent) {
-        new Label(parent, SWT.NONE).setText(FeatureTexts.label(Literals.STRUCTURAL_MODEL__UNITS));
-        units = new Combo(parent, SWT.READ_ONLY);
+    private void addUnits() {
+        new Label(body, SWT.NONE).setText(FeatureTexts.label(Literals.STRUCTURAL_MODEL__UNITS));
+        units = new Combo(body, SWT.READ_ONLY);
         units.setData(UiIds.WIDGET_ID, "analysis.units");
-        units.setItems(java.util.Arrays.stream(UnitSystem.values()).map(UnitSystem::getLiteral).toArray(String[]::new));
-        units.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        units.setItems(Arrays.stream(UnitSystem.values()).map(UnitSystem::getLiteral).toArray(String[]::new));
+        units.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, false, false));
         units.addListener(SWT.Selection, event -> unitsChosen());
-        explain(parent, FeatureTexts.help(Literals.STRUCTURAL_MODEL__UNITS));
+        FieldControl.explain(body, FeatureTexts.help(Literals.STRUCTURAL_MODEL__UNITS));
     }
 
     private void unitsChosen() {
@@ -135,21 +126,25 @@ public final class AnalysisPage implements EditorPage {
         }
         int answer = MessageDialog.open(MessageDialog.QUESTION, context.shell(), Messages.Units_title,
                 NLS.bind(Messages.Units_question, now.getLiteral(), chosen.getLiteral()), SWT.NONE, Messages.Units_convert, Messages.Units_keep,
-                org.eclipse.jface.dialogs.IDialogConstants.CANCEL_LABEL);
+                IDialogConstants.CANCEL_LABEL);
         Command command = answer == 0 ? context.commands().convertUnits(chosen)
                 : answer == 1 ? context.commands().set(context.model(), Literals.STRUCTURAL_MODEL__UNITS, chosen) : null;
         context.execute(command);
         refresh();
     }
 
-    private void addRulePack(Composite parent) {
-        new Label(parent, SWT.NONE).setText(FeatureTexts.label(Literals.AUDIT_SETTINGS__RULE_PACK));
-        rulePack = new Combo(parent, SWT.READ_ONLY);
+    private void addRulePack() {
+        new Label(body, SWT.NONE).setText(FeatureTexts.label(Literals.AUDIT_SETTINGS__RULE_PACK));
+        rulePack = new Combo(body, SWT.READ_ONLY);
         rulePack.setData(UiIds.WIDGET_ID, "analysis.rulePack");
-        rulePack.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);
+        data.widthHint = 120;
+        rulePack.setLayoutData(data);
         rulePack.addListener(SWT.Selection, event -> context.execute(context.commands().set(context.model().getAudit(),
                 Literals.AUDIT_SETTINGS__RULE_PACK, packs.get(rulePack.getSelectionIndex()).id())));
-        rulePackNote = explain(parent, "");
+        new Label(body, SWT.NONE);
+        rulePackNote = FieldControl.explain(body, "");
+        ((GridData) rulePackNote.getLayoutData()).horizontalSpan = 2;
         packs = rulePacks();
         rulePack.setItems(packs.stream().map(pack -> pack.title() + " (" + pack.id() + ")").toArray(String[]::new));
     }
@@ -188,7 +183,8 @@ public final class AnalysisPage implements EditorPage {
     private void fit() {
         if (body != null && !body.isDisposed()) {
             body.layout(true, true);
-            scroller.setMinSize(body.computeSize(Math.max(1, scroller.getClientArea().width), SWT.DEFAULT));
+            int width = Math.max(1, Math.min(WIDEST, scroller.getClientArea().width));
+            scroller.setMinSize(body.computeSize(width, SWT.DEFAULT));
         }
     }
 

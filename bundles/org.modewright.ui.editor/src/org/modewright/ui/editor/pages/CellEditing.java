@@ -1,21 +1,25 @@
 package org.modewright.ui.editor.pages;
 
 import java.util.List;
+import java.util.function.Function;
 import java.util.function.IntConsumer;
+import java.util.function.Supplier;
+import org.eclipse.emf.ecore.EObject;
 import org.eclipse.jface.window.DefaultToolTip;
 import org.eclipse.jface.window.ToolTip;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.TableEditor;
 import org.eclipse.swt.graphics.Point;
+import org.eclipse.swt.widgets.Button;
 import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.TableItem;
 import org.eclipse.swt.widgets.Text;
-import org.modewright.model.structure.Identified;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.editor.EditorContext;
+import org.modewright.ui.editor.TextKeys;
 import org.modewright.ui.editor.fields.Field;
 
 /**
@@ -29,110 +33,147 @@ final class CellEditing {
     private final TableEditor place;
     private DefaultToolTip reason;
     private Control control;
+    private Field field;
+    private EObject object;
+    private String original;
+    private Supplier<String> value;
+    private IntConsumer next;
 
     CellEditing(Table table, EditorContext context) {
         this.table = table;
         this.context = context;
         place = new TableEditor(table);
         place.grabHorizontal = true;
+        place.grabVertical = true;
         place.minimumWidth = 60;
     }
 
-    /** Opens a cell; a flag changes at once. */
-    void open(TableItem item, int column, Field field, Identified object, IntConsumer next, int columns) {
+    /**
+     * Opens a cell.
+     *
+     * @param goOn told to edit the next (1) or the previous (-1) cell
+     */
+    void open(TableItem item, int column, Field of, EObject edited, IntConsumer goOn) {
         close();
-        switch (field.style()) {
-            case FLAG -> context.execute(field.set(List.of(object), Boolean.toString(!Boolean.parseBoolean(field.text(object)))));
-            case CHOICE -> place(item, column, combo(field, object));
-            case TEXT -> place(item, column, text(column, field, object, next, columns));
+        field = of;
+        object = edited;
+        original = of.text(edited);
+        next = goOn;
+        control = switch (of.style()) {
+            case FLAG -> check();
+            case CHOICE -> combo();
+            case TEXT -> text();
+        };
+        control.setData(UiIds.WIDGET_ID, "tables.cell");
+        control.addListener(SWT.Traverse, this::traverse);
+        place.setEditor(control, item, column);
+        control.setFocus();
+    }
+
+    /** Keeps the open cell with its object after rows have moved; gives up if the object has gone. */
+    void follow(Function<EObject, TableItem> rowOf) {
+        if (!isOpen()) {
+            return;
+        }
+        TableItem row = rowOf.apply(object);
+        if (row == null) {
+            close();
+        } else if (row != place.getItem()) {
+            place.setItem(row);
         }
     }
 
     void close() {
         hideReason();
-        if (control != null && !control.isDisposed()) {
+        if (isOpen()) {
             Control closing = control;
+            boolean focused = closing.isFocusControl();
             control = null;
             closing.dispose();
-            if (!table.isDisposed()) {
+            if (focused && !table.isDisposed()) {
                 table.setFocus();
             }
         }
     }
 
-    private void place(TableItem item, int column, Control editor) {
-        control = editor;
-        control.setData(UiIds.WIDGET_ID, "tables.cell");
-        place.setEditor(control, item, column);
-        control.setFocus();
+    private boolean isOpen() {
+        return control != null && !control.isDisposed();
     }
 
-    private Combo combo(Field field, Identified object) {
+    private Combo combo() {
         Combo combo = new Combo(table, SWT.READ_ONLY);
         combo.setItems(field.choices().toArray(new String[0]));
         combo.setText(field.text(object));
-        combo.addListener(SWT.Selection, event -> {
-            if (commit(field, object, combo.getText())) {
-                close();
-            }
-        });
-        combo.addListener(SWT.FocusOut, event -> close());
-        combo.addListener(SWT.Traverse, event -> {
-            if (event.detail == SWT.TRAVERSE_ESCAPE) {
-                event.doit = false;
-                close();
-            }
-        });
+        value = combo::getText;
+        combo.addListener(SWT.Selection, event -> commit());
+        combo.addListener(SWT.FocusOut, event -> leave(combo));
         return combo;
     }
 
-    private Text text(int column, Field field, Identified object, IntConsumer next, int columns) {
+    private Button check() {
+        Button check = new Button(table, SWT.CHECK);
+        check.setBackground(table.getBackground());
+        check.setSelection(Boolean.parseBoolean(field.text(object)));
+        value = () -> Boolean.toString(check.getSelection());
+        check.addListener(SWT.Selection, event -> commit());
+        check.addListener(SWT.FocusOut, event -> leave(check));
+        return check;
+    }
+
+    private Text text() {
         Text text = new Text(table, field.isNumber() ? SWT.RIGHT : SWT.LEFT);
         text.setText(field.text(object));
         text.selectAll();
-        text.addListener(SWT.Modify, event -> hideReason());
-        text.addListener(SWT.FocusOut, event -> leave(field, object, text));
-        text.addListener(SWT.Traverse, event -> traverse(event, column, field, object, text, next, columns));
+        value = text::getText;
+        text.addListener(SWT.Modify, event -> consider());
+        text.addListener(SWT.FocusOut, event -> leave(text));
+        TextKeys.onUndo(text, () -> takeBack(text));
         return text;
     }
 
-    /** Leaving the cell sets a good text and gives up a bad one. */
-    private void leave(Field field, Identified object, Text text) {
-        if (control == text) {
-            commit(field, object, text.getText());
+    private boolean takeBack(Text text) {
+        boolean typed = !text.getText().equals(original);
+        if (typed) {
+            text.setText(original);
+            text.selectAll();
+        }
+        return typed;
+    }
+
+    /** Leaving the cell sets a good value and gives up a bad one. */
+    private void leave(Control left) {
+        if (control == left && !left.isDisposed()) {
+            commit();
             close();
         }
     }
 
-    private void traverse(Event event, int column, Field field, Identified object, Text text, IntConsumer next, int columns) {
+    private void traverse(Event event) {
+        int direction = event.detail == SWT.TRAVERSE_TAB_NEXT ? 1 : event.detail == SWT.TRAVERSE_TAB_PREVIOUS ? -1 : 0;
         if (event.detail == SWT.TRAVERSE_ESCAPE) {
             event.doit = false;
-            text.setText(field.text(object));
             close();
-            return;
-        }
-        boolean forward = event.detail == SWT.TRAVERSE_TAB_NEXT;
-        boolean back = event.detail == SWT.TRAVERSE_TAB_PREVIOUS;
-        if (!forward && !back && event.detail != SWT.TRAVERSE_RETURN) {
-            return;
-        }
-        event.doit = false;
-        if (!commit(field, object, text.getText())) {
-            return;
-        }
-        close();
-        int target = forward ? column + 1 : column - 1;
-        if ((forward || back) && target >= 0 && target < columns) {
-            next.accept(target);
+        } else if (direction != 0 || event.detail == SWT.TRAVERSE_RETURN) {
+            event.doit = false;
+            IntConsumer goOn = next;
+            if (commit()) {
+                close();
+                if (direction != 0) {
+                    goOn.accept(direction);
+                }
+            }
         }
     }
 
-    private boolean commit(Field field, Identified object, String value) {
-        if (value.equals(field.text(object))) {
+    /** Sets the value; false, and the reason beside the cell, if it is refused. */
+    private boolean commit() {
+        String wanted = value.get();
+        if (wanted.equals(original) || wanted.equals(field.text(object))) {
             return true;
         }
         try {
-            context.execute(field.set(List.of(object), value));
+            context.execute(field.set(List.of(object), wanted));
+            original = wanted;
             return true;
         } catch (IllegalArgumentException refused) {
             showReason(refused.getMessage());
@@ -140,14 +181,28 @@ final class CellEditing {
         }
     }
 
+    private void consider() {
+        String wanted = value.get();
+        try {
+            field.check(List.of(object), wanted);
+            String warning = field.warning(object, wanted);
+            if (warning == null) {
+                hideReason();
+            } else {
+                showReason(warning);
+            }
+        } catch (IllegalArgumentException refused) {
+            showReason(refused.getMessage());
+        }
+    }
+
     private void showReason(String text) {
         hideReason();
-        if (control == null || control.isDisposed()) {
-            return;
+        if (isOpen()) {
+            reason = new DefaultToolTip(control, ToolTip.NO_RECREATE, true);
+            reason.setText(text);
+            reason.show(new Point(0, control.getSize().y));
         }
-        reason = new DefaultToolTip(control, ToolTip.NO_RECREATE, true);
-        reason.setText(text);
-        reason.show(new Point(0, control.getSize().y));
     }
 
     private void hideReason() {

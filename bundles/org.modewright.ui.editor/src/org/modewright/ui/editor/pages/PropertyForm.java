@@ -5,12 +5,15 @@ import java.util.List;
 import java.util.Set;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.jface.resource.JFaceResources;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
 import org.eclipse.swt.custom.ScrolledComposite;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
+import org.eclipse.swt.layout.RowLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
 import org.modewright.audit.Finding;
 import org.modewright.model.edit.Labels;
@@ -28,26 +31,29 @@ import org.modewright.ui.widgets.ThemeColours;
  */
 final class PropertyForm {
 
+    private static final String FORM = "org.modewright.ui.editor.form";
+
     private final EditorContext context;
+    private final String nothing;
     private final ScrolledComposite scroller;
     private Composite body;
+    private Label title;
     private Label findings;
     private final List<FieldControl> controls = new ArrayList<>();
     private List<EObject> objects = List.of();
-    private String shown = "";
+    private List<Object> shown = List.of();
 
-    PropertyForm(Composite parent, EditorContext context) {
+    /** @param nothing what stands there while nothing is selected */
+    PropertyForm(Composite parent, EditorContext context, String nothing) {
         this.context = context;
+        this.nothing = nothing;
         scroller = new ScrolledComposite(parent, SWT.V_SCROLL);
         scroller.setExpandHorizontal(true);
         scroller.setExpandVertical(true);
         scroller.setData(UiIds.WIDGET_ID, "editor.form");
+        scroller.setData(FORM, this);
         scroller.addListener(SWT.Resize, event -> fit());
         show(List.of());
-    }
-
-    Composite control() {
-        return scroller;
     }
 
     /** Shows the objects with these ids. */
@@ -66,24 +72,32 @@ final class PropertyForm {
     void show(List<? extends EObject> chosen) {
         objects = List.copyOf(chosen);
         List<Field> fields = sameKind() ? Fields.of(context.fields(), kind(), objects.get(0)) : List.of();
-        String now = identity(fields);
-        if (now.equals(shown)) {
-            refresh();
-            return;
+        List<Object> now = identity(fields);
+        if (!now.equals(shown)) {
+            rebuild(fields);
+            shown = now;
         }
-        shown = now;
-        rebuild(fields);
+        refresh();
     }
 
-    private String identity(List<Field> fields) {
-        StringBuilder identity = new StringBuilder();
-        objects.forEach(object -> identity.append(System.identityHashCode(object)).append(' '));
-        fields.forEach(field -> identity.append(field.label()).append(field.choices().hashCode()));
-        return identity.append('.').toString();
+    /** What the widgets depend on; the objects themselves may be others of the same kind. */
+    private List<Object> identity(List<Field> fields) {
+        List<Object> identity = new ArrayList<>();
+        identity.add(fields.isEmpty() ? title() : kind());
+        identity.add(objects.size() == 1);
+        for (Field field : fields) {
+            identity.add(field.label());
+            identity.add(field.style() == Field.Style.CHOICE ? field.choices() : List.of());
+        }
+        return identity;
     }
 
     private boolean sameKind() {
-        return !objects.isEmpty() && objects.stream().allMatch(object -> object.eClass() == kind());
+        if (objects.isEmpty()) {
+            return false;
+        }
+        EClass kind = kind();
+        return objects.stream().allMatch(object -> object.eClass() == kind);
     }
 
     private EClass kind() {
@@ -105,16 +119,38 @@ final class PropertyForm {
             layout.horizontalSpacing = 8;
             body.setLayout(layout);
             addTitle();
-            for (Field field : fields) {
-                if (objects.size() == 1 || !isName(field, fields)) {
-                    controls.add(FieldControl.create(body, field, context));
-                }
-            }
+            addFields(fields);
             scroller.setContent(body);
-            refresh();
         } finally {
             scroller.setRedraw(true);
         }
+    }
+
+    private void addFields(List<Field> fields) {
+        Composite flags = null;
+        for (Field field : fields) {
+            if (field.style() == Field.Style.FLAG) {
+                flags = flags == null ? flagRows() : flags;
+                controls.add(FieldControl.flag(flags, field, context));
+            } else if (objects.size() == 1 || !isName(field, fields)) {
+                flags = null;
+                controls.add(FieldControl.create(body, field, context));
+            }
+        }
+    }
+
+    /** Check boxes that follow each other stand side by side, as many as there is room for. */
+    private Composite flagRows() {
+        Composite rows = new Composite(body, SWT.NONE);
+        RowLayout layout = new RowLayout(SWT.HORIZONTAL);
+        layout.marginLeft = 0;
+        layout.marginTop = 0;
+        layout.marginBottom = 0;
+        layout.pack = false;
+        layout.spacing = 8;
+        rows.setLayout(layout);
+        rows.setLayoutData(wide());
+        return rows;
     }
 
     /** The name stands first and belongs to one object. */
@@ -123,14 +159,19 @@ final class PropertyForm {
     }
 
     private void addTitle() {
-        Label title = new Label(body, SWT.WRAP);
-        title.setText(title().replace("&", "&&"));
-        title.setFont(org.eclipse.jface.resource.JFaceResources.getFontRegistry().getBold(org.eclipse.jface.resource.JFaceResources.DIALOG_FONT));
+        title = new Label(body, SWT.WRAP);
+        boolean some = !objects.isEmpty();
+        if (some) {
+            title.setFont(JFaceResources.getFontRegistry().getBold(JFaceResources.DIALOG_FONT));
+        } else {
+            title.setForeground(ThemeColours.secondaryText(title));
+        }
         title.setLayoutData(wide());
         title.setData(UiIds.WIDGET_ID, "editor.form.title");
         findings = new Label(body, SWT.WRAP);
-        findings.setForeground(ThemeColours.failed(findings));
+        findings.setForeground(ThemeColours.caution(findings));
         findings.setLayoutData(wide());
+        findings.setData(UiIds.WIDGET_ID, "editor.form.findings");
     }
 
     private static GridData wide() {
@@ -141,7 +182,7 @@ final class PropertyForm {
 
     private String title() {
         if (objects.isEmpty()) {
-            return Messages.Form_nothing;
+            return nothing;
         }
         if (objects.size() == 1) {
             return Labels.of(objects.get(0));
@@ -151,7 +192,16 @@ final class PropertyForm {
     }
 
     private void refresh() {
+        title.setText(title().replace("&", "&&"));
         controls.forEach(control -> control.show(objects));
+        findingsChanged();
+    }
+
+    /** Shows what the live checks say about the object now. */
+    void findingsChanged() {
+        if (body == null || body.isDisposed()) {
+            return;
+        }
         String text = objects.size() == 1 && objects.get(0) instanceof Identified object ? reasons(object) : "";
         findings.setText(text.replace("&", "&&"));
         ((GridData) findings.getLayoutData()).exclude = text.isEmpty();
@@ -159,12 +209,32 @@ final class PropertyForm {
         fit();
     }
 
+    /** Sets the focus into the first field. */
+    void setFocus() {
+        if (controls.isEmpty()) {
+            scroller.setFocus();
+        } else {
+            controls.get(0).control().setFocus();
+        }
+    }
+
     private String reasons(Identified object) {
         List<String> lines = new ArrayList<>();
         for (Finding finding : context.findings(object.getId())) {
-            lines.add(finding.text() + " " + finding.remedy());
+            lines.add("⚠ " + finding.text() + " " + finding.remedy());
         }
         return String.join("\n", lines);
+    }
+
+    /** Makes room around a control of a form whose text has changed; elsewhere asks for a new layout. */
+    static void fitAround(Control control) {
+        for (Composite parent = control.getParent(); parent != null; parent = parent.getParent()) {
+            if (parent.getData(FORM) instanceof PropertyForm form) {
+                form.fit();
+                return;
+            }
+        }
+        control.requestLayout();
     }
 
     private void fit() {

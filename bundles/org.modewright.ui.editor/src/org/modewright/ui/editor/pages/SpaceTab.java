@@ -1,8 +1,6 @@
 package org.modewright.ui.editor.pages;
 
 import java.util.Set;
-import org.eclipse.swt.SWT;
-import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.modewright.model.structure.Identified;
@@ -21,16 +19,16 @@ import org.modewright.ui.editor.Messages;
 public final class SpaceTab implements EditorPage {
 
     private final EditorContext context;
-    private final SashForm parts;
+    private final SideBySide parts;
     private final SpacePage space;
     private final PropertyForm form;
 
     public SpaceTab(Composite parent, EditorContext context) {
         this.context = context;
-        parts = new SashForm(parent, SWT.HORIZONTAL);
-        space = new SpacePage(parts, context.session(), context::model);
-        form = new PropertyForm(parts, context);
-        parts.setWeights(70, 30);
+        parts = new SideBySide(parent, "space", true);
+        space = new SpacePage(parts.main(), context.session(), context::model);
+        form = new PropertyForm(parts.side(), context, Messages.Form_nothingInSpace);
+        context.offerMenu(space.canvas());
     }
 
     /** The drawing. */
@@ -45,13 +43,18 @@ public final class SpaceTab implements EditorPage {
 
     @Override
     public Control control() {
-        return parts;
+        return parts.body();
     }
 
     @Override
     public void modelChanged() {
         space.modelChanged();
         form.select(context.session().selection().elementIds());
+    }
+
+    @Override
+    public void findingsChanged() {
+        form.findingsChanged();
     }
 
     @Override
@@ -67,7 +70,19 @@ public final class SpaceTab implements EditorPage {
     }
 
     @Override
+    public void showProperties() {
+        parts.open(true);
+        form.setFocus();
+    }
+
+    @Override
     public void setFocus() {
         space.setFocus();
+    }
+
+    @Override
+    public void selectAll() {
+        context.select(context.drawnIds(), this);
+        form.select(context.session().selection().elementIds());
     }
 }

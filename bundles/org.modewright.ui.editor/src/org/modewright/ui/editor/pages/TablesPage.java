@@ -1,30 +1,38 @@
 package org.modewright.ui.editor.pages;
 
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Set;
 import org.eclipse.emf.common.command.Command;
+import org.eclipse.emf.ecore.EClass;
+import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.custom.SashForm;
 import org.eclipse.swt.dnd.Clipboard;
 import org.eclipse.swt.dnd.TextTransfer;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
-import org.eclipse.swt.widgets.Button;
+import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
+import org.eclipse.swt.widgets.ToolItem;
 import org.modewright.model.structure.Identified;
+import org.modewright.model.structure.StructurePackage.Literals;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.editor.EditorContext;
 import org.modewright.ui.editor.EditorPage;
 import org.modewright.ui.editor.Messages;
-import org.modewright.ui.editor.fields.Fields;
 import org.modewright.ui.editor.fields.FeatureTexts;
+import org.modewright.ui.editor.fields.Fields;
+import org.modewright.ui.widgets.Images;
 import org.modewright.ui.widgets.TextCopy;
 import org.modewright.ui.widgets.ThemeColours;
 
@@ -32,9 +40,12 @@ import org.modewright.ui.widgets.ThemeColours;
 public final class TablesPage implements EditorPage {
 
     private final EditorContext context;
-    private final SashForm parts;
-    private final org.eclipse.swt.widgets.List kinds;
+    private final SideBySide parts;
     private final List<EReference> lists = Tables.lists();
+    private final Combo kinds;
+    private final Text filter;
+    private final ToolItem duplicate;
+    private final ToolItem delete;
     private final ObjectTable table;
     private final Label hint;
     private final PropertyForm form;
@@ -42,54 +53,81 @@ public final class TablesPage implements EditorPage {
 
     public TablesPage(Composite parent, EditorContext context) {
         this.context = context;
-        parts = new SashForm(parent, SWT.HORIZONTAL);
-        kinds = new org.eclipse.swt.widgets.List(parts, SWT.SINGLE | SWT.V_SCROLL);
-        kinds.setData(UiIds.WIDGET_ID, "tables.kinds");
-        kinds.addListener(SWT.Selection, event -> show(lists.get(kinds.getSelectionIndex())));
-        Composite middle = new Composite(parts, SWT.NONE);
+        parts = new SideBySide(parent, "tables", false);
+        Composite middle = new Composite(parts.main(), SWT.NONE);
         GridLayout layout = new GridLayout();
         layout.marginWidth = 0;
-        layout.marginHeight = 4;
+        layout.marginHeight = 0;
+        layout.verticalSpacing = 4;
         middle.setLayout(layout);
-        createBar(middle);
+        Composite bar = bar(middle);
+        kinds = kinds(bar);
+        Tools tools = new Tools(bar);
+        tools.add(Images.descriptor(Images.ADD), Messages.Tables_add, "tables.add", this::add);
+        duplicate = tools.add(Tools.image("duplicate"), Messages.Tables_duplicate, "tables.duplicate", this::duplicate);
+        delete = tools.add(Images.descriptor(Images.DELETE), Messages.Tables_delete, "tables.delete", () -> context.delete(table().selected()));
+        tools.add(Images.descriptor(Images.COPY), Messages.Tables_copy, "tables.copy", this::copy);
+        tools.add(Tools.image("paste"), Messages.Tables_paste, "tables.paste", this::paste);
+        filter = filter(bar);
         hint = new Label(middle, SWT.WRAP);
         hint.setForeground(ThemeColours.secondaryText(middle));
+        hint.setData(UiIds.WIDGET_ID, "tables.hint");
         GridData hintData = new GridData(SWT.FILL, SWT.TOP, true, false);
         hintData.horizontalIndent = 8;
+        hintData.widthHint = 120;
         hint.setLayoutData(hintData);
-        table = new ObjectTable(middle, context, this::rowsSelected);
+        table = new ObjectTable(middle, context, "tables.table", this::rowsSelected);
         table.table().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         table.table().addListener(SWT.KeyDown, this::key);
-        form = new PropertyForm(parts, context);
-        parts.setWeights(16, 56, 28);
-        show(lists.get(4));
+        context.offerMenu(table.table());
+        form = new PropertyForm(parts.side(), context, Messages.Form_nothingInTable);
+        show(Literals.STRUCTURAL_MODEL__NODES);
     }
 
-    private void createBar(Composite parent) {
+    private ObjectTable table() {
+        return table;
+    }
+
+    private static Composite bar(Composite parent) {
         Composite bar = new Composite(parent, SWT.NONE);
         bar.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
-        GridLayout layout = new GridLayout(5, false);
+        GridLayout layout = new GridLayout(3, false);
         layout.marginHeight = 0;
+        layout.marginWidth = 4;
         bar.setLayout(layout);
-        button(bar, Messages.Tables_add, "tables.add", this::add);
-        button(bar, Messages.Tables_duplicate, "tables.duplicate", () -> context.execute(context.commands().duplicate(table.selected(), 0, 0, 0)));
-        button(bar, Messages.Tables_delete, "tables.delete", () -> context.delete(table.selected()));
-        button(bar, Messages.Tables_paste, "tables.paste", this::paste);
-        Text filter = new Text(bar, SWT.SEARCH | SWT.ICON_SEARCH | SWT.ICON_CANCEL);
-        filter.setMessage(Messages.Tables_filter);
-        filter.setData(UiIds.WIDGET_ID, "tables.filter");
-        filter.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
-        filter.addListener(SWT.Modify, event -> {
-            table.filter(filter.getText());
-            sayWhatIsMissing();
-        });
+        return bar;
     }
 
-    private static void button(Composite bar, String label, String id, Runnable body) {
-        Button button = new Button(bar, SWT.PUSH);
-        button.setText(label);
-        button.setData(UiIds.WIDGET_ID, id);
-        button.addListener(SWT.Selection, event -> body.run());
+    private Combo kinds(Composite bar) {
+        Combo combo = new Combo(bar, SWT.READ_ONLY);
+        combo.setVisibleItemCount(lists.size());
+        combo.setToolTipText(Messages.Tables_kinds);
+        combo.setData(UiIds.WIDGET_ID, "tables.kinds");
+        combo.addListener(SWT.Selection, event -> show(lists.get(combo.getSelectionIndex())));
+        return combo;
+    }
+
+    private Text filter(Composite bar) {
+        Text text = new Text(bar, SWT.SEARCH | SWT.ICON_SEARCH | SWT.ICON_CANCEL);
+        text.setMessage(Messages.Tables_filter);
+        text.setData(UiIds.WIDGET_ID, "tables.filter");
+        GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false);
+        data.widthHint = 80;
+        text.setLayoutData(data);
+        text.addListener(SWT.Modify, event -> {
+            table.filter(text.getText());
+            sayWhatIsMissing();
+        });
+        text.addListener(SWT.KeyDown, event -> {
+            if (event.keyCode == SWT.ESC && !text.getText().isEmpty()) {
+                text.setText("");
+                event.doit = false;
+            } else if (event.keyCode == SWT.ARROW_DOWN) {
+                table.table().setFocus();
+                event.doit = false;
+            }
+        });
+        return text;
     }
 
     private void show(EReference newList) {
@@ -98,43 +136,76 @@ public final class TablesPage implements EditorPage {
         nameKinds();
         sayWhatIsMissing();
         table.select(context.session().selection().elementIds());
+        enable();
     }
 
     private void nameKinds() {
         String[] names = lists.stream().map(any -> FeatureTexts.label(any) + " (" + Tables.objects(context.model(), any).size() + ")")
                 .toArray(String[]::new);
-        if (!java.util.Arrays.equals(names, kinds.getItems())) {
+        if (!Arrays.equals(names, kinds.getItems())) {
             kinds.setItems(names);
+            kinds.requestLayout();
         }
         kinds.select(lists.indexOf(list));
     }
 
     private void sayWhatIsMissing() {
         boolean none = Tables.objects(context.model(), list).isEmpty();
-        String text = none ? NLS.bind(Messages.Tables_empty, FeatureTexts.label(list).toLowerCase(java.util.Locale.ROOT))
+        String text = none ? NLS.bind(Messages.Tables_empty, FeatureTexts.label(list).toLowerCase(Locale.ROOT))
                 : table.count() == 0 ? Messages.Tables_noMatch : "";
+        if (text.equals(hint.getText()) && ((GridData) hint.getLayoutData()).exclude == text.isEmpty()) {
+            return;
+        }
         hint.setText(text);
         ((GridData) hint.getLayoutData()).exclude = text.isEmpty();
         hint.setVisible(!text.isEmpty());
         hint.requestLayout();
     }
 
-    private void add() {
-        Identified created = Tables.create(context.model(), list);
-        context.execute(context.commands().create(created));
-        context.select(Set.of(created.getId()), this);
-        modelChanged();
-        table.select(Set.of(created.getId()));
-        form.select(Set.of(created.getId()));
+    private void enable() {
+        boolean some = table.table().getSelectionCount() > 0;
+        duplicate.setEnabled(some);
+        delete.setEnabled(some);
     }
 
-    private void paste() {
-        Clipboard clipboard = new Clipboard(parts.getDisplay());
+    private void add() {
+        filter.setText("");
+        Identified created = Tables.create(context.model(), list);
+        context.execute(context.commands().create(created));
+        modelChanged();
+        selectHere(Set.of(created.getId()));
+        table.rename();
+    }
+
+    private void duplicate() {
+        Command command = context.commands().duplicate(table.selected(), 0, 0, 0);
+        EClass kind = list.getEReferenceType();
+        context.execute(command);
+        filter.setText("");
+        modelChanged();
+        Set<String> copies = new LinkedHashSet<>();
+        for (Object copy : command.getResult()) {
+            if (copy instanceof Identified identified && kind.isInstance(identified)) {
+                copies.add(identified.getId());
+            }
+        }
+        selectHere(copies);
+    }
+
+    private void selectHere(Set<String> ids) {
+        context.select(ids, this);
+        table.select(ids);
+        form.select(ids);
+        enable();
+    }
+
+    @Override
+    public void paste() {
+        Clipboard clipboard = new Clipboard(table.table().getDisplay());
         try {
             Object text = clipboard.getContents(TextTransfer.getInstance());
             if (text != null) {
-                Command command = new RowPaste(context, list, Fields.of(context.fields(), list.getEReferenceType(), null)).command(text.toString());
-                context.execute(command);
+                context.execute(new RowPaste(context.fields(), list).command(text.toString()));
             }
         } catch (IllegalArgumentException refused) {
             MessageDialog.openError(context.shell(), Messages.Tables_paste, refused.getMessage());
@@ -144,17 +215,17 @@ public final class TablesPage implements EditorPage {
     }
 
     private void key(Event event) {
-        boolean command = (event.stateMask & SWT.MOD1) != 0;
-        if (command && event.keyCode == 'v') {
-            paste();
-        } else if (event.keyCode == SWT.INSERT) {
+        if (event.keyCode == SWT.INSERT) {
             add();
         }
     }
 
-    private void rowsSelected(Set<String> ids) {
+    private void rowsSelected(List<EObject> objects) {
+        Set<String> ids = new LinkedHashSet<>();
+        objects.forEach(object -> ids.add(((Identified) object).getId()));
         context.select(ids, this);
-        form.select(ids);
+        form.show(objects);
+        enable();
     }
 
     @Override
@@ -164,15 +235,22 @@ public final class TablesPage implements EditorPage {
 
     @Override
     public Control control() {
-        return parts;
+        return parts.body();
     }
 
     @Override
     public void modelChanged() {
         nameKinds();
-        table.refresh();
+        table.show(Fields.of(context.fields(), list.getEReferenceType(), null), Tables.objects(context.model(), list));
         sayWhatIsMissing();
         form.select(context.session().selection().elementIds());
+        enable();
+    }
+
+    @Override
+    public void findingsChanged() {
+        table.findingsChanged();
+        form.findingsChanged();
     }
 
     @Override
@@ -183,6 +261,7 @@ public final class TablesPage implements EditorPage {
         }
         table.select(ids);
         form.select(ids);
+        enable();
     }
 
     /** The list in which all selected objects stand; null if they stand in several. */
@@ -203,7 +282,19 @@ public final class TablesPage implements EditorPage {
 
     @Override
     public boolean reveals(String id) {
-        return context.object(id) != null;
+        Identified object = context.object(id);
+        return object != null && lists.contains(Tables.listOf(object));
+    }
+
+    @Override
+    public void showProperties() {
+        parts.open(true);
+        form.setFocus();
+    }
+
+    @Override
+    public void rename() {
+        table.rename();
     }
 
     @Override
@@ -213,12 +304,12 @@ public final class TablesPage implements EditorPage {
 
     @Override
     public void copy() {
-        TextCopy.put(parts.getDisplay(), table.text());
+        TextCopy.put(table.table().getDisplay(), table.text());
     }
 
     @Override
     public void selectAll() {
         table.selectAll();
-        rowsSelected(Set.copyOf(table.selected().stream().map(Identified::getId).toList()));
+        rowsSelected(new ArrayList<>(table.selected()));
     }
 }
