@@ -26,6 +26,9 @@ public final class DominanceSentence {
     private static final double MOST_OF_IT = 0.8;
     private static final int FEW = 3;
 
+    /** A level called "2" or "L2" is spoken of as level 2; one called "roof" or "floor 2" by its name alone. */
+    private static final int LONGEST_NUMBER = 3;
+
     private DominanceSentence() {
     }
 
@@ -50,10 +53,11 @@ public final class DominanceSentence {
             return Messages.Dominance_modesOfNothing;
         }
         String who = who(result, elementIds);
+        boolean one = elementIds.size() == 1;
         if (modes.isEmpty()) {
-            return NLS.bind(Messages.Dominance_modesOfNone, who, Numbers.percent(share));
+            return NLS.bind(one ? Messages.Dominance_modesOfNone : Messages.Dominance_modesOfNoneTogether, who, Numbers.percent(share));
         }
-        return NLS.bind(Messages.Dominance_modesOf, new Object[] {who, Numbers.percent(share), modes.size(), result.modes().size()});
+        return NLS.bind(one ? Messages.Dominance_modesOf : Messages.Dominance_modesOfTogether, new Object[] {who, Numbers.percent(share), modes.size(), result.modes().size()});
     }
 
     private static String who(ModalResult result, Set<String> elementIds) {
@@ -63,8 +67,11 @@ public final class DominanceSentence {
                 names.add(carrier.kind().word() + " " + carrier.name());
             }
         }
-        String who = names.isEmpty() || names.size() > FEW ? "The " + elementIds.size() + " selected elements" : String.join(", ", names);
-        return who.substring(0, 1).toUpperCase(java.util.Locale.ROOT) + who.substring(1);
+        if (names.size() != elementIds.size() || names.size() > FEW) {
+            return NLS.bind(Messages.Dominance_selected, Numbers.counted(elementIds.size(), Messages.Dominance_selectedOne, Messages.Dominance_selectedMany));
+        }
+        String who = String.join(", ", names);
+        return Character.toUpperCase(who.charAt(0)) + who.substring(1);
     }
 
     private static String total(List<Share> shares) {
@@ -100,7 +107,11 @@ public final class DominanceSentence {
             return "";
         }
         levels.sort(null);
-        return levels.size() == 1 ? NLS.bind(Messages.Dominance_onLevel, levels.get(0))
-                : NLS.bind(Messages.Dominance_onLevels, String.join(", ", levels.subList(0, levels.size() - 1)), levels.get(levels.size() - 1));
+        boolean named = levels.stream().anyMatch(level -> level.length() > LONGEST_NUMBER);
+        if (levels.size() == 1) {
+            return NLS.bind(named ? Messages.Dominance_onPlace : Messages.Dominance_onLevel, levels.get(0));
+        }
+        return NLS.bind(named ? Messages.Dominance_onPlaces : Messages.Dominance_onLevels,
+                String.join(", ", levels.subList(0, levels.size() - 1)), levels.get(levels.size() - 1));
     }
 }

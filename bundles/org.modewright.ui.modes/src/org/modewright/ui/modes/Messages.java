@@ -77,6 +77,13 @@ final class Messages extends NLS {
     public static String Dominance_onLevels;
     public static String Dominance_many;
     public static String Dominance_modesOf;
+    public static String Dominance_modesOfTogether;
+    public static String Dominance_modesOfNoneTogether;
+    public static String Dominance_onPlace;
+    public static String Dominance_onPlaces;
+    public static String Dominance_selected;
+    public static String Dominance_selectedOne;
+    public static String Dominance_selectedMany;
     public static String Dominance_modesOfNothing;
     public static String Dominance_modesOfNone;
     public static String Dominance_atLeast;
