@@ -8,12 +8,15 @@ package org.modewright.fem;
 public final class LocalAxes {
 
     private static final double VERTICAL = 1e-6;
+    /** Components of a unit vector below this are round-off of its computation. */
+    private static final double ROUND_OFF = 4.0 * Math.ulp(1.0);
 
     private LocalAxes() {
     }
 
     /**
-     * The axes x, y, z, one after the other, in global components.
+     * The axes x, y, z, one after the other, in global components. A component that is round-off is exactly zero: across such a
+     * direction the member shall resist nothing at all, not 1e-32 of its stiffness, which would be an eigenvalue of its own.
      *
      * @param direction from start to end, of any length but zero; length 3
      * @param roll roll, rad
@@ -32,6 +35,9 @@ public final class LocalAxes {
             axes[i] = x[i];
             axes[3 + i] = cosine * y[i] + sine * z[i];
             axes[6 + i] = cosine * z[i] - sine * y[i];
+        }
+        for (int i = 0; i < axes.length; i++) {
+            axes[i] = Math.abs(axes[i]) < ROUND_OFF ? 0.0 : axes[i];
         }
         return axes;
     }

@@ -262,4 +262,68 @@ class AssemblyTest {
         Assembly assembly = Assembly.of(structure.snapshot(), ElementFormulations.standard().with(doubled), Progress.NONE);
         assertEquals(9.0, assembly.stiffness().get(0, 0), 0.0);
     }
+
+    @Test
+    void anElementWithoutFormulationIsNamed() {
+        StructuralElement unknown = new StructuralElement() {
+            @Override
+            public Kind kind() {
+                return Kind.PANEL;
+            }
+
+            @Override
+            public String id() {
+                return "p1";
+            }
+
+            @Override
+            public String name() {
+                return "W7";
+            }
+
+            @Override
+            public int[] nodes() {
+                return new int[] {0};
+            }
+
+            @Override
+            public String group() {
+                return null;
+            }
+
+            @Override
+            public String section() {
+                return null;
+            }
+
+            @Override
+            public String material() {
+                return null;
+            }
+
+            @Override
+            public double ownMass() {
+                return 0.0;
+            }
+        };
+        IllegalArgumentException thrown = assertThrows(IllegalArgumentException.class,
+                () -> ElementFormulations.standard().matrices(unknown, mixedFrame().snapshot()));
+        assertTrue(thrown.getMessage().contains("panel W7"), thrown.getMessage());
+    }
+
+    @Test
+    void aSnapshotDoesNotFollowTheModel() {
+        TestStructure structure = mixedFrame();
+        Snapshot snapshot = structure.snapshot();
+        double before = Assembly.of(snapshot, Progress.NONE).stiffness().quadratic(ones(snapshot));
+        structure.model().getMaterials().forEach(material -> material.setYoung(2.0 * material.getYoung()));
+        structure.model().getNodes().get(3).setX(77.0);
+        assertEquals(before, Assembly.of(snapshot, Progress.NONE).stiffness().quadratic(ones(snapshot)), 0.0);
+    }
+
+    private static double[] ones(Snapshot snapshot) {
+        double[] ones = new double[Assembly.of(snapshot, Progress.NONE).freeDofs()];
+        Arrays.fill(ones, 1.0);
+        return ones;
+    }
 }

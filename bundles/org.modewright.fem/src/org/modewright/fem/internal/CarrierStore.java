@@ -49,7 +49,7 @@ public final class CarrierStore {
     private void reportNow(Progress progress) {
         if (carriers.size() % 1024 == 0) {
             progress.checkCancelled();
-            progress.report("element matrices", elements == 0 ? 1.0 : (double) carriers.size() / elements);
+            progress.report("Element matrices", elements == 0 ? 1.0 : (double) carriers.size() / elements);
         }
     }
 

@@ -27,7 +27,7 @@ public final class MatrixAssembler {
         for (int carrier = 0; carrier < count; carrier++) {
             if (carrier % 1024 == 0) {
                 progress.checkCancelled();
-                progress.report("assembling", (double) carrier / count);
+                progress.report("Assembling", (double) carrier / count);
             }
             assembler.add(store.places(carrier), store.stiffness(carrier), assembler.stiffness, true);
             assembler.add(store.places(carrier), store.mass(carrier), assembler.mass, false);

@@ -33,7 +33,7 @@ final class MotionDropping {
     }
 
     static MotionDropping of(CarrierStore store, Transformation transformation, Progress progress) {
-        progress.report("looking for motions without stiffness and mass", Double.NaN);
+        progress.report("Looking for motions without stiffness and mass", Double.NaN);
         MotionDropping dropping = new MotionDropping(transformation, SuspectUnknowns.of(store, transformation, progress));
         if (dropping.suspects.length > 0) {
             dropping.search(new CarrierRows(store, transformation), store.carriers().size(), progress);
@@ -72,7 +72,7 @@ final class MotionDropping {
     }
 
     private static void checkNow(int count, Progress progress) {
-        if (count % 1024 == 0) {
+        if (count % 128 == 0) {
             progress.checkCancelled();
         }
     }

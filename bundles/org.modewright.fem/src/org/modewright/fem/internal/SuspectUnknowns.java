@@ -37,7 +37,7 @@ final class SuspectUnknowns {
     }
 
     private static void checkNow(int count, Progress progress) {
-        if (count % 1024 == 0) {
+        if (count % 128 == 0) {
             progress.checkCancelled();
         }
     }
