@@ -131,7 +131,8 @@ class MotionDroppingTest {
             int n = undropped.transformation().unknowns();
             assertEquals(n - rank(undropped.matrices()), dropping.dropped().size(), "seed " + seed);
             assertEquals(n, dropping.kept().length + dropping.dropped().size());
-            assertEquals(dropping.kept().length, rank(undropped.matrices().restrictedTo(dropping.kept())), "nothing is left to drop, seed " + seed);
+            assertEquals(dropping.kept().length, rank(undropped.matrices().restrictedTo(dropping.kept())),
+                    "nothing is left to drop, seed " + seed);
             withMotions += dropping.dropped().isEmpty() ? 0 : 1;
         }
         assertTrue(withMotions > 100, "the trials hold dropped motions: " + withMotions);
