@@ -58,6 +58,19 @@ class LocalAxesTest {
         }
     }
 
+    /** A direction across which a member resists nothing shall get a stiffness of zero, not one of round-off squared. */
+    @Test
+    void roundOffIsExactlyZero() {
+        Random random = new Random(5);
+        for (int i = 0; i < 1000; i++) {
+            double[] direction = {random.nextGaussian(), random.nextGaussian(), random.nextGaussian()};
+            assertEquals(0.0, LocalAxes.of(direction, 0.0)[5], 0.0);
+            double[] turned = LocalAxes.of(direction, Math.toRadians(90 * random.nextInt(4)));
+            assertTrue(turned[5] == 0.0 || turned[8] == 0.0);
+        }
+        assertArrayEquals(new double[] {0, 0, 1, -1, 0, 0, 0, -1, 0}, LocalAxes.of(new double[] {0, 0, 3}, Math.toRadians(90)), 0.0);
+    }
+
     private static double[] row(double[] axes, int i) {
         return new double[] {axes[3 * i], axes[3 * i + 1], axes[3 * i + 2]};
     }
