@@ -9,6 +9,7 @@ import org.eclipse.swt.layout.FillLayout;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
+import org.eclipse.swt.widgets.Label;
 import org.modewright.audit.Finding;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.Images;
@@ -18,6 +19,10 @@ final class CheckLine {
 
     private static final String CUT = "…";
 
+    private static final int ICON = 18;
+
+    private final Composite bar;
+    private final Label icon;
     private final EndCut line;
     private final Composite below;
     private final Checks checks;
@@ -32,12 +37,21 @@ final class CheckLine {
         layout.marginHeight = 0;
         layout.verticalSpacing = 0;
         body.setLayout(layout);
-        line = new EndCut(body);
-        line.setMargins(8, 3, 8, 3);
+        bar = new Composite(body, SWT.NONE);
+        bar.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+        GridLayout columns = new GridLayout(2, false);
+        columns.marginHeight = 0;
+        columns.horizontalSpacing = 0;
+        bar.setLayout(columns);
+        icon = new Label(bar, SWT.NONE);
+        GridData place = new GridData(SWT.LEFT, SWT.CENTER, false, false);
+        place.widthHint = ICON;
+        icon.setLayoutData(place);
+        line = new EndCut(bar);
         line.setData(UiIds.WIDGET_ID, "editor.checks");
-        line.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
+        line.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
         line.addListener(SWT.MouseUp, event -> goToFirst(context));
-        images = new LocalResourceManager(JFaceResources.getResources(), line);
+        images = new LocalResourceManager(JFaceResources.getResources(), bar);
         below = new Composite(body, SWT.NONE);
         below.setLayout(new FillLayout());
         below.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
@@ -49,10 +63,10 @@ final class CheckLine {
     }
 
     void show(boolean visible) {
-        line.setVisible(visible);
-        ((GridData) line.getLayoutData()).exclude = !visible;
+        bar.setVisible(visible);
+        ((GridData) bar.getLayoutData()).exclude = !visible;
         refresh();
-        line.requestLayout();
+        bar.requestLayout();
     }
 
     void refresh() {
@@ -66,7 +80,7 @@ final class CheckLine {
             line.setToolTipText(checks.all().isEmpty() ? null : checks.all().get(0).text() + " " + checks.all().get(0).remedy());
         }
         String sign = sign();
-        line.setImage(sign == null ? null : images.get(Images.descriptor(sign)));
+        icon.setImage(sign == null ? null : images.get(Images.descriptor(sign)));
         line.setCursor(checks.all().isEmpty() ? null : line.getDisplay().getSystemCursor(SWT.CURSOR_HAND));
     }
 

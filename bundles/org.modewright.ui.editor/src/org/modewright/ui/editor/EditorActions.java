@@ -7,6 +7,7 @@ import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.widgets.Display;
 import org.eclipse.ui.IActionBars;
 import org.eclipse.ui.actions.ActionFactory;
+import org.modewright.ui.editor.pages.TablesPage;
 
 /**
  * The workbench's own actions while the structure editor is active. While a text field has the focus they edit the text, otherwise the
@@ -30,6 +31,7 @@ final class EditorActions {
         bars.setGlobalActionHandler(ActionFactory.CUT.getId(), action(Messages.Cut, this::cut));
         bars.setGlobalActionHandler(ActionFactory.PASTE.getId(), action(Messages.Paste, this::paste));
         bars.setGlobalActionHandler(ActionFactory.SELECT_ALL.getId(), action(Messages.SelectAll, this::selectAll));
+        bars.setGlobalActionHandler(ActionFactory.FIND.getId(), action(Messages.Find, this::find));
         update();
     }
 
@@ -80,6 +82,13 @@ final class EditorActions {
     private void rename() {
         if (!TextKeys.apply(display()) && !editor.selected().isEmpty()) {
             editor.activePage().rename();
+        }
+    }
+
+    private void find() {
+        if (editor.getEditingDomain() != null) {
+            editor.showPage(TablesPage.class);
+            editor.activePage().find();
         }
     }
 

@@ -39,6 +39,11 @@ public interface EditorPage {
         showProperties();
     }
 
+    /** Goes to where the user says what is looked for. */
+    default void find() {
+        // A page without a filter finds nothing.
+    }
+
     /** What Delete deletes here; null: the objects selected in the session. */
     default List<? extends EObject> toDelete() {
         return null;

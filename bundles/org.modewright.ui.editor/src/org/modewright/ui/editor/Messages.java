@@ -98,6 +98,8 @@ public final class Messages extends NLS {
     public static String Loads_atNode;
     public static String Loads_onMember;
     public static String Loads_massHelp;
+    public static String Analysis_directions;
+    public static String Find;
 
     static {
         NLS.initializeMessages("org.modewright.ui.editor.messages", Messages.class);

@@ -84,8 +84,8 @@ public final class AnalysisPage implements EditorPage {
         if (context.model().getAudit() != null) {
             title(Messages.Analysis_judge);
             addRulePack();
-            add(context.model().getAudit(), true, Literals.AUDIT_SETTINGS__X, Literals.AUDIT_SETTINGS__Y, Literals.AUDIT_SETTINGS__Z,
-                    Literals.AUDIT_SETTINGS__LOCAL_NODES, Literals.AUDIT_SETTINGS__COINCIDENCE);
+            addDirections();
+            add(context.model().getAudit(), true, Literals.AUDIT_SETTINGS__LOCAL_NODES, Literals.AUDIT_SETTINGS__COINCIDENCE);
         }
         scroller.setContent(body);
         refresh();
@@ -108,8 +108,24 @@ public final class AnalysisPage implements EditorPage {
         }
     }
 
+    /** The directions stand in one row, as they are one question. */
+    private void addDirections() {
+        FieldControl.label(body, Messages.Analysis_directions);
+        Composite row = new Composite(body, SWT.NONE);
+        GridLayout layout = new GridLayout(3, false);
+        layout.marginWidth = 0;
+        layout.marginHeight = 0;
+        layout.horizontalSpacing = 12;
+        row.setLayout(layout);
+        row.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
+        for (EStructuralFeature axis : List.of(Literals.AUDIT_SETTINGS__X, Literals.AUDIT_SETTINGS__Y, Literals.AUDIT_SETTINGS__Z)) {
+            Field field = Fields.one(context.fields(), context.model().getAudit(), axis);
+            rows.add(new Row(FieldControl.flag(row, field, context), context.model().getAudit()));
+        }
+    }
+
     private void addUnits() {
-        new Label(body, SWT.NONE).setText(FeatureTexts.label(Literals.STRUCTURAL_MODEL__UNITS));
+        FieldControl.label(body, FeatureTexts.label(Literals.STRUCTURAL_MODEL__UNITS));
         units = new Combo(body, SWT.READ_ONLY);
         units.setData(UiIds.WIDGET_ID, "analysis.units");
         units.setItems(Arrays.stream(UnitSystem.values()).map(UnitSystem::getLiteral).toArray(String[]::new));
@@ -134,7 +150,7 @@ public final class AnalysisPage implements EditorPage {
     }
 
     private void addRulePack() {
-        new Label(body, SWT.NONE).setText(FeatureTexts.label(Literals.AUDIT_SETTINGS__RULE_PACK));
+        FieldControl.label(body, FeatureTexts.label(Literals.AUDIT_SETTINGS__RULE_PACK));
         rulePack = new Combo(body, SWT.READ_ONLY);
         rulePack.setData(UiIds.WIDGET_ID, "analysis.rulePack");
         GridData data = new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1);

@@ -24,6 +24,7 @@ import org.modewright.ui.widgets.ThemeColours;
 abstract class FieldControl {
 
     private static final int NARROW = 60;
+    private static final int WIDEST_LABEL = 100;
     private static final int EXPLAINED = 120;
 
     /**
@@ -76,9 +77,23 @@ abstract class FieldControl {
     abstract void present(String text, boolean different);
 
     final void labelBefore(Composite parent) {
-        Label label = new Label(parent, SWT.NONE);
-        label.setText(field.label().replace("&", "&&"));
-        label.setToolTipText(field.help());
+        label(parent, field.label()).setToolTipText(field.help());
+    }
+
+    /** A label that wraps where it is long, so that the fields keep their room. */
+    static Label label(Composite parent, String text) {
+        Label label = new Label(parent, SWT.WRAP);
+        label.setText(text.replace("&", "&&"));
+        GridData data = new GridData(SWT.LEFT, SWT.CENTER, false, false);
+        if (label.computeSize(SWT.DEFAULT, SWT.DEFAULT).x > WIDEST_LABEL) {
+            data.widthHint = WIDEST_LABEL;
+        }
+        label.setLayoutData(data);
+        return label;
+    }
+
+    final String help() {
+        return field.help();
     }
 
     final void describe() {
@@ -98,8 +113,10 @@ abstract class FieldControl {
         }
         fault = new Label(parent, SWT.WRAP);
         fault.setData(UiIds.WIDGET_ID, "fault." + field.label());
-        fault.setLayoutData(wrapping(place.columns()));
-        say("", false);
+        GridData below = wrapping(place.columns());
+        below.exclude = true;
+        fault.setLayoutData(below);
+        fault.setVisible(false);
     }
 
     static Label explain(Composite parent, String text) {
@@ -295,6 +312,7 @@ abstract class FieldControl {
             } else if (combo.getSelectionIndex() != index) {
                 combo.select(index);
             }
+            combo.setToolTipText(index < 0 ? help() : value + "\n" + help());
         }
     }
 

@@ -179,6 +179,7 @@ final class ObjectTable {
         return text.toString();
     }
 
+    /** The last column is empty: it takes the room that is left over, which numbers at the right of their column are not to do. */
     private void buildColumns() {
         table.setRedraw(false);
         try {
@@ -190,6 +191,7 @@ final class ObjectTable {
                 for (int i = 0; i < fields.size(); i++) {
                     addColumn(i, gc);
                 }
+                new TableColumn(table, SWT.LEFT).setResizable(false);
             } finally {
                 gc.dispose();
             }

@@ -107,6 +107,7 @@ final class PropertyForm {
     private void rebuild(List<Field> fields) {
         scroller.setRedraw(false);
         try {
+            scroller.setContent(null);
             if (body != null) {
                 body.dispose();
             }
@@ -238,7 +239,7 @@ final class PropertyForm {
     }
 
     private void fit() {
-        if (body == null || body.isDisposed()) {
+        if (scroller.getContent() == null) {
             return;
         }
         body.layout(true, true);

@@ -15,7 +15,7 @@ import org.osgi.framework.FrameworkUtil;
 final class SideBySide {
 
     private static final int LEAST = 120;
-    private static final int USUAL = 208;
+    private static final int USUAL = 240;
     private static final String OPEN = "open";
     private static final String WIDTH = "width";
 

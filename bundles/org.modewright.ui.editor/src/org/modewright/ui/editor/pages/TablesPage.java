@@ -39,6 +39,8 @@ import org.modewright.ui.widgets.ThemeColours;
 /** A table for each kind of object, with the properties of what is selected beside it. */
 public final class TablesPage implements EditorPage {
 
+    private static final int NARROW = 400;
+
     private final EditorContext context;
     private final SideBySide parts;
     private final List<EReference> lists = Tables.lists();
@@ -69,6 +71,7 @@ public final class TablesPage implements EditorPage {
         tools.add(Images.descriptor(Images.COPY), Messages.Tables_copy, "tables.copy", this::copy);
         tools.add(Tools.image("paste"), Messages.Tables_paste, "tables.paste", this::paste);
         filter = filter(bar);
+        bar.addListener(SWT.Resize, event -> arrange(bar));
         hint = new Label(middle, SWT.WRAP);
         hint.setForeground(ThemeColours.secondaryText(middle));
         hint.setData(UiIds.WIDGET_ID, "tables.hint");
@@ -96,6 +99,17 @@ public final class TablesPage implements EditorPage {
         layout.marginWidth = 4;
         bar.setLayout(layout);
         return bar;
+    }
+
+    /** The filter goes below the acts where there is no room beside them. */
+    private void arrange(Composite bar) {
+        GridLayout layout = (GridLayout) bar.getLayout();
+        int columns = bar.getSize().x < NARROW ? 2 : 3;
+        if (layout.numColumns != columns) {
+            layout.numColumns = columns;
+            ((GridData) filter.getLayoutData()).horizontalSpan = columns == 2 ? 2 : 1;
+            filter.requestLayout();
+        }
     }
 
     private Combo kinds(Composite bar) {
@@ -295,6 +309,12 @@ public final class TablesPage implements EditorPage {
     @Override
     public void rename() {
         table.rename();
+    }
+
+    @Override
+    public void find() {
+        filter.setFocus();
+        filter.selectAll();
     }
 
     @Override
