@@ -25,7 +25,6 @@ import org.modewright.ui.widgets.Numbers;
 final class ElementModes {
 
     private final Composite body;
-    private final Runnable whenCounted;
     private String sentence = "";
     private final Spinner least;
     private final Table table;
@@ -39,7 +38,6 @@ final class ElementModes {
      * @param whenCounted told that the sentence has changed by the user's choice of a share
      */
     ElementModes(Composite parent, IntConsumer whenPicked, Runnable whenCounted) {
-        this.whenCounted = whenCounted;
         body = new Composite(parent, SWT.NONE);
         GridLayout layout = new GridLayout(3, false);
         layout.marginWidth = 8;
