@@ -6,17 +6,22 @@ package org.modewright.fem.internal;
  */
 final class RigidArm {
 
+    /** Levers shorter than this share of the arm are round-off of an arm that points along the axis. */
+    private static final double ROUND_OFF = 4.0 * Math.ulp(1.0);
+
     private RigidArm() {
     }
 
     /**
-     * Motion of the end of an arm, in axes of its own, from the motion of the node in global axes: 6 x 6 by rows.
+     * Motion of the end of an arm, in axes of its own, from the motion of the node in global axes: 6 x 6 by rows. Along the arm a
+     * rotation moves nothing, exactly: a stiff member would turn round-off there into a stiffness of its own.
      *
      * @param axes the axes x, y, z, one after the other, in global components; length 9
      * @param arm from the node to the end of the arm, global axes; length 3
      */
     static double[] motion(double[] axes, double[] arm) {
         double[] matrix = new double[36];
+        double negligible = ROUND_OFF * Math.sqrt(arm[0] * arm[0] + arm[1] * arm[1] + arm[2] * arm[2]);
         for (int i = 0; i < 3; i++) {
             double ax = axes[3 * i];
             double ay = axes[3 * i + 1];
@@ -26,11 +31,15 @@ final class RigidArm {
                 matrix[6 * (i + 3) + j + 3] = axes[3 * i + j];
             }
             // a . (theta x r) = theta . (r x a)
-            matrix[6 * i + 3] = arm[1] * az - arm[2] * ay;
-            matrix[6 * i + 4] = arm[2] * ax - arm[0] * az;
-            matrix[6 * i + 5] = arm[0] * ay - arm[1] * ax;
+            matrix[6 * i + 3] = unless(negligible, arm[1] * az - arm[2] * ay);
+            matrix[6 * i + 4] = unless(negligible, arm[2] * ax - arm[0] * az);
+            matrix[6 * i + 5] = unless(negligible, arm[0] * ay - arm[1] * ax);
         }
         return matrix;
+    }
+
+    private static double unless(double negligible, double lever) {
+        return Math.abs(lever) <= negligible ? 0.0 : lever;
     }
 
     /**

@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.Random;
 
 import org.junit.jupiter.api.Test;
+import org.modewright.fem.LocalAxes;
 
 /** The small dense and sparse tools below the elements. */
 class SmallMatrixTest {
@@ -114,5 +115,22 @@ class SmallMatrixTest {
             assertTrue(expression == null || expression.size() == 1 && expression.factor(0) == 1.0);
         }
         assertEquals(1, free);
+    }
+
+    /** A rotation moves the end of a rigid zone across the member only; not even by round-off along it, where the member is stiffest. */
+    @Test
+    void anArmAlongItsAxisHasNoLeverThere() {
+        Random random = new Random(11);
+        for (int i = 0; i < 1000; i++) {
+            double[] axes = LocalAxes.of(new double[] {random.nextGaussian(), random.nextGaussian(), random.nextGaussian()},
+                    random.nextDouble());
+            double length = 0.1 + random.nextDouble();
+            double[] motion = RigidArm.motion(axes, new double[] {length * axes[0], length * axes[1], length * axes[2]});
+            assertArrayEquals(new double[3], new double[] {motion[3], motion[4], motion[5]}, 0.0);
+            for (int j = 0; j < 3; j++) {
+                assertEquals(length * axes[6 + j], motion[9 + j], 1e-15, "y moves by the rotation about z");
+                assertEquals(-length * axes[3 + j], motion[15 + j], 1e-15, "z moves against the rotation about y");
+            }
+        }
     }
 }
