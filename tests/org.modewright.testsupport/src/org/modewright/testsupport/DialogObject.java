@@ -23,7 +23,8 @@ public final class DialogObject {
         return new DialogObject(ui, ui.waitFor("the dialogue " + title, () -> shell(ui, title)));
     }
 
-    private static Shell shell(UiThread ui, String title) {
+    /** The visible dialogue with a title; null if there is none. */
+    static Shell shell(UiThread ui, String title) {
         for (Shell shell : ui.display().getShells()) {
             if (!shell.isDisposed() && shell.isVisible() && title.equals(shell.getText())) {
                 return shell;

@@ -71,6 +71,19 @@ public final class TableObject {
         });
     }
 
+    /** Clicks a header, by which the table is sorted. */
+    public void clickHeader(String header) {
+        ui.run(() -> Widgets.notifySelection(thereUnchecked().getColumn(columnUnchecked(header)), null, SWT.Selection));
+    }
+
+    private int columnUnchecked(String header) {
+        try {
+            return column(header);
+        } catch (Exception failure) {
+            throw new IllegalStateException(failure);
+        }
+    }
+
     /** Opens a row as a double click or Enter does. */
     public void open(int row) {
         ui.run(() -> {

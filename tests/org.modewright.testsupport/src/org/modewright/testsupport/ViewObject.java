@@ -3,10 +3,15 @@ package org.modewright.testsupport;
 import java.util.Arrays;
 import java.util.List;
 import org.eclipse.e4.ui.model.application.ui.basic.MPart;
+import org.eclipse.jface.action.ActionContributionItem;
+import org.eclipse.jface.action.IAction;
+import org.eclipse.jface.action.IContributionItem;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.custom.CTabFolder;
 import org.eclipse.swt.graphics.ImageData;
 import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Link;
 import org.eclipse.swt.widgets.Table;
@@ -110,6 +115,58 @@ public final class ViewObject {
             field.setFocus();
             field.setText(text);
             Widgets.notifySelection(field, null, SWT.DefaultSelection);
+        });
+    }
+
+    /** Chooses an item of a box. */
+    public void choose(String id, String item) {
+        ui.run(() -> {
+            Combo combo = (Combo) there(id);
+            combo.select(combo.indexOf(item));
+            Widgets.notifySelection(combo, null, SWT.Selection);
+        });
+    }
+
+    /** Brings a tab of a folder of tabs to the front. */
+    public void chooseTab(String id, int tab) {
+        ui.run(() -> {
+            CTabFolder folder = (CTabFolder) there(id);
+            folder.setSelection(tab);
+            Widgets.notifySelection(folder, folder.getItem(tab), SWT.Selection);
+        });
+    }
+
+    /** Runs an action of the view's menu. */
+    public void chooseMenu(String actionId) {
+        ui.run(() -> {
+            IContributionItem item = ((IViewPart) part).getViewSite().getActionBars().getMenuManager().find(actionId);
+            IAction action = ((ActionContributionItem) item).getAction();
+            action.setChecked(true);
+            action.run();
+        });
+    }
+
+    /** Presses a key on a control: a character, or a key code of {@link SWT} with character 0. */
+    public void press(String id, char character, int keyCode) {
+        ui.run(() -> {
+            Event event = new Event();
+            event.character = character;
+            event.keyCode = keyCode;
+            there(id).notifyListeners(SWT.KeyDown, event);
+        });
+    }
+
+    /** Presses and releases the first mouse button at a place of a control given as shares of its width and height. */
+    public void click(String id, double across, double down) {
+        ui.run(() -> {
+            Control control = there(id);
+            for (int type : new int[] {SWT.MouseDown, SWT.MouseUp}) {
+                Event event = new Event();
+                event.button = 1;
+                event.x = (int) (across * control.getSize().x);
+                event.y = (int) (down * control.getSize().y);
+                control.notifyListeners(type, event);
+            }
         });
     }
 

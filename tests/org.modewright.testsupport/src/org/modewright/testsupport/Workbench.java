@@ -57,6 +57,16 @@ public final class Workbench {
         return DialogObject.waitFor(ui, title);
     }
 
+    /** Closes a dialogue with a title if there is one, as Escape does. */
+    public void closeDialog(String title) {
+        ui.run(() -> {
+            Shell shell = DialogObject.shell(ui, title);
+            if (shell != null) {
+                shell.close();
+            }
+        });
+    }
+
     /** Whether a command can be executed now. */
     public boolean isEnabled(String command) {
         return ui.get(() -> window().getService(ICommandService.class).getCommand(command).isEnabled());

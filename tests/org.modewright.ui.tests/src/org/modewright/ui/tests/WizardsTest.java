@@ -24,7 +24,7 @@ import org.modewright.ui.StructureEditorPart;
 import org.modewright.ui.UiIds;
 
 @ExtendWith(WorkbenchExtension.class)
-class ImportTest {
+class WizardsTest {
 
     private static final String TITLE = "Import table package";
 
@@ -93,6 +93,24 @@ class ImportTest {
             StructuralModel original = ModelFile.load(bytes, "sample");
             assertEquals(original.getMembers().size(), workbench.ask(() -> editor.getLiveModel().getMembers().size()));
         }
+    }
+
+    @Test
+    void anExportedModelReadsBackAsTheSame(Workbench workbench, @TempDir Path folder) throws Exception {
+        workbench.openSample();
+        StructuralModel model = workbench.structureEditor().getLiveModel();
+        DialogObject wizard = workbench.executeForDialog(UiIds.EXPORT_COMMAND, "Export table package");
+        assertFalse(wizard.isEnabled("Finish"));
+        Path zip = folder.resolve("quay.zip");
+        wizard.type("export.target", zip.toString());
+        wizard.press("Finish");
+        workbench.ui().waitUntil("the exported file", () -> Files.exists(zip));
+        workbench.closeDialog("What the table package does not hold");
+        wizard.waitUntilClosed();
+        StructuralModel back = TablePackage.read(zip).model();
+        assertEquals(workbench.ask(() -> model.getMembers().size()), back.getMembers().size());
+        assertEquals(workbench.ask(() -> model.getNodes().size()), back.getNodes().size());
+        assertEquals(workbench.ask(model::getUnits), back.getUnits());
     }
 
     private static StructuralModel sample() throws Exception {
