@@ -1,7 +1,10 @@
 package org.modewright.ui.canvas;
 
+import java.io.IOException;
 import java.nio.file.Path;
+import java.util.Objects;
 import java.util.Set;
+import org.eclipse.core.resources.IFile;
 import org.eclipse.jface.action.Action;
 import org.eclipse.jface.action.IAction;
 import org.eclipse.jface.action.IMenuManager;
@@ -11,6 +14,7 @@ import org.eclipse.jface.action.Separator;
 import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.SWTException;
 import org.eclipse.swt.custom.StackLayout;
 import org.eclipse.swt.dnd.Clipboard;
 import org.eclipse.swt.dnd.ImageTransfer;
@@ -33,8 +37,6 @@ import org.modewright.model.structure.StructuralModel;
 import org.modewright.render.ColourRamp;
 import org.modewright.render.Deformation;
 import org.modewright.render.ModeAnimator;
-import org.modewright.render.PngEncoder;
-import org.modewright.render.Raster;
 import org.modewright.ui.AnimationPreferences;
 import org.modewright.ui.AuditSelection;
 import org.modewright.ui.AuditSession;
@@ -50,7 +52,6 @@ public final class ShapeView extends ViewPart {
 
     private static final int FRAME_MILLISECONDS = 16;
     private static final double STEP = 1.0 / 24;
-    private static final int STILL_WIDTH = 1920;
     private static final String COLOUR_KEY = "colour";
 
     private final ColourRamp ramp = ColourRamp.energy();
@@ -67,6 +68,7 @@ public final class ShapeView extends ViewPart {
     private IAction playAction;
     private Energy colouring = Energy.STRAIN;
     private StructuralModel drawnModel;
+    private IFile drawnFile;
     private ModalResult shownResult;
     private int shownMode = -1;
     private Deformation deformation;
@@ -258,7 +260,8 @@ public final class ShapeView extends ViewPart {
         StructuralModel model = session.model();
         if (model != drawnModel) {
             drawnModel = model;
-            canvas.show(StructureDrawing.of(model));
+            canvas.show(StructureDrawing.of(model), Objects.equals(drawnFile, session.modelFile()));
+            drawnFile = session.modelFile();
             deformation = null;
         }
     }
@@ -397,11 +400,6 @@ public final class ShapeView extends ViewPart {
         }
     }
 
-    private Raster still() {
-        int height = Math.max(1, STILL_WIDTH * canvas.getSize().y / Math.max(1, canvas.getSize().x));
-        return canvas.still(STILL_WIDTH, height);
-    }
-
     private void savePicture() {
         if (!canvas.hasScene() || shownMode < 0) {
             return;
@@ -417,11 +415,11 @@ public final class ShapeView extends ViewPart {
         }
     }
 
-    /** Writes the present picture. */
-    void savePicture(Path file) {
+    /** Writes the present picture as PNG; what goes wrong is told in a dialogue. */
+    public void savePicture(Path file) {
         try {
-            PngEncoder.write(still(), file);
-        } catch (java.io.IOException | java.io.UncheckedIOException failure) {
+            StillPicture.write(StillPicture.of(canvas, legend), file);
+        } catch (IOException | SWTException failure) {
             MessageDialog.openError(getSite().getShell(), Messages.Shape_save,
                     NLS.bind(Messages.Shape_saveFailed, file, failure.getMessage()));
         }
@@ -433,7 +431,7 @@ public final class ShapeView extends ViewPart {
         }
         Clipboard clipboard = new Clipboard(canvas.getDisplay());
         try {
-            clipboard.setContents(new Object[] {new RasterImage(canvas.getDisplay()).copy(still())}, new Transfer[] {ImageTransfer.getInstance()});
+            clipboard.setContents(new Object[] {StillPicture.of(canvas, legend)}, new Transfer[] {ImageTransfer.getInstance()});
         } finally {
             clipboard.dispose();
         }

@@ -92,7 +92,7 @@ public final class SpacePage extends Composite {
         pending = false;
         StructuralModel live = model.get();
         StructureDrawing drawing = live == null ? null : StructureDrawing.of(live);
-        canvas.show(drawing);
+        canvas.show(drawing, true);
         canvas.select(session.selection().elementIds());
         Control top = drawing == null || drawing.isEmpty() ? empty : body;
         if (stack.topControl != top) {

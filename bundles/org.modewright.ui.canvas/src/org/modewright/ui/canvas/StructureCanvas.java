@@ -117,13 +117,18 @@ public final class StructureCanvas extends Canvas {
         overlay = value;
     }
 
-    /** Shows a structure at rest; the camera stays where it is unless nothing was shown before. */
-    void show(StructureDrawing newDrawing) {
+    /**
+     * Shows a structure at rest.
+     *
+     * @param newDrawing the structure; null: none
+     * @param keepsCamera whether the camera stays where it is, if it has seen anything before; else all is brought into sight
+     */
+    void show(StructureDrawing newDrawing, boolean keepsCamera) {
         drawing = newDrawing;
         deformation = null;
         factor = 0;
         hovered = null;
-        if (newDrawing == null || newDrawing.isEmpty()) {
+        if (!keepsCamera || newDrawing == null || newDrawing.isEmpty()) {
             fitted = false;
         }
         redraw();
@@ -175,10 +180,10 @@ public final class StructureCanvas extends Canvas {
         }
     }
 
-    /** The present picture, drawn anew with smooth edges. */
+    /** The present picture in another size, drawn anew with smooth edges. */
     Raster still(int width, int height) {
-        Camera still = camera.fit(drawing.scene().bounds(), width, height);
-        return StillImage.render(drawing.scene(), still, deformation, factor, options.copy().theme(theme()), width, height);
+        RenderOptions larger = options.copy().theme(theme()).scale(options.scale() * width / raster.width());
+        return StillImage.render(drawing.scene(), camera, deformation, factor, larger, width, height);
     }
 
     boolean hasScene() {
