@@ -14,7 +14,6 @@ import org.modewright.model.structure.StructuralModel;
 import org.modewright.testsupport.Workbench;
 import org.modewright.testsupport.WorkbenchExtension;
 import org.modewright.ui.editor.StructureEditor;
-import org.modewright.ui.UiIds;
 
 /** A model of some twenty thousand members can be opened, selected as a whole and edited. */
 @ExtendWith(WorkbenchExtension.class)
