@@ -119,7 +119,7 @@ final class MemberPainter {
         }
     }
 
-    /** An outline lies a little behind its member and is round where it turns and ends. */
+    /** An outline lies a little behind its member and is round where it turns and ends; the rounds lie behind the line in turn. */
     private void chain(ProjectedScene p, int member, double width, int argb, boolean outline) {
         int first = frame.scene.firstVertex[member];
         int end = first + frame.scene.segments[member];
@@ -128,11 +128,11 @@ final class MemberPainter {
         for (int v = first; v < end; v += step) {
             segment(p, v, v + step, width, argb, bias);
             if (outline) {
-                joint(p, v, width, argb, bias);
+                joint(p, v, width, argb, bias - width / 2);
             }
         }
         if (outline) {
-            joint(p, end, width, argb, bias);
+            joint(p, end, width, argb, bias - width / 2);
         }
     }
 
