@@ -8,9 +8,6 @@ import org.eclipse.swt.widgets.Control;
 /** A page of the structure editor. Only the page on top is told of changes; another one is told when it comes to the top. */
 public interface EditorPage {
 
-    /** What the tab says. */
-    String title();
-
     Control control();
 
     /** Shows the model anew after an edit. */

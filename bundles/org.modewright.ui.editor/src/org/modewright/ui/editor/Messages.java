@@ -100,6 +100,7 @@ public final class Messages extends NLS {
     public static String Loads_massHelp;
     public static String Analysis_directions;
     public static String Find;
+    public static String Error_page;
 
     static {
         NLS.initializeMessages("org.modewright.ui.editor.messages", Messages.class);

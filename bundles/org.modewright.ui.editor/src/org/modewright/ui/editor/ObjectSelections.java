@@ -11,11 +11,14 @@ import org.eclipse.jface.viewers.StructuredSelection;
 /** Tells the workbench which objects of the model are selected. */
 final class ObjectSelections implements ISelectionProvider {
 
+    private static final int MOST = 200;
+
     private final List<ISelectionChangedListener> listeners = new CopyOnWriteArrayList<>();
     private ISelection selection = StructuredSelection.EMPTY;
 
+    /** Publishes objects; of very many only the first, as the workbench asks each of them for every command that it might enable. */
     void publish(List<?> objects) {
-        setSelection(new StructuredSelection(objects));
+        setSelection(new StructuredSelection(objects.subList(0, Math.min(MOST, objects.size()))));
     }
 
     @Override

@@ -1,75 +1,94 @@
 package org.modewright.ui.editor;
 
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Function;
+import org.eclipse.swt.SWT;
+import org.eclipse.swt.layout.FillLayout;
+import org.eclipse.swt.widgets.Composite;
 
-/** The pages of the editor. What is not shown is not brought up to date before it comes to the top: a large model has large pages. */
+/**
+ * The pages of the editor. A page is made when it comes to the top for the first time, and what is not shown is not brought up to date
+ * before it comes to the top again: a large model has large pages.
+ */
 final class Pages {
 
-    private final List<EditorPage> all = new ArrayList<>();
-    private final Set<EditorPage> outdated = new HashSet<>();
-    private EditorPage top;
+    private static final class Slot {
 
-    void add(EditorPage page) {
-        all.add(page);
-        top = top == null ? page : top;
+        private final Class<? extends EditorPage> kind;
+        private final Composite place;
+        private final Function<Composite, EditorPage> maker;
+        private EditorPage page;
+        private boolean outdated;
+
+        Slot(Class<? extends EditorPage> kind, Composite place, Function<Composite, EditorPage> maker) {
+            this.kind = kind;
+            this.place = place;
+            this.maker = maker;
+        }
+
+        EditorPage page() {
+            if (page == null) {
+                page = maker.apply(place);
+                place.layout(true, true);
+            } else if (outdated) {
+                page.modelChanged();
+            }
+            outdated = false;
+            return page;
+        }
+    }
+
+    private final List<Slot> slots = new ArrayList<>();
+    private Slot top;
+
+    /** Takes in a page; returns the control that its tab shows. */
+    Composite add(Composite parent, Class<? extends EditorPage> kind, Function<Composite, EditorPage> maker) {
+        Composite place = new Composite(parent, SWT.NONE);
+        place.setLayout(new FillLayout());
+        slots.add(new Slot(kind, place, maker));
+        return place;
     }
 
     void clear() {
-        all.clear();
-        outdated.clear();
+        slots.clear();
         top = null;
     }
 
     /** The page on top; null while there is none. */
     EditorPage top() {
-        return top;
+        return top == null ? null : top.page();
     }
 
     /** Says which page has come to the top. */
     void shown(int index, Set<String> selected) {
-        top = all.get(index);
-        if (outdated.remove(top)) {
-            top.modelChanged();
-        }
-        top.select(selected);
+        top = slots.get(index);
+        top.page().select(selected);
     }
 
     void modelChanged() {
-        outdated.addAll(all);
-        outdated.remove(top);
-        if (top != null) {
-            top.modelChanged();
+        outdate();
+        if (top != null && top.page != null) {
+            top.page.modelChanged();
         }
     }
 
     void findingsChanged() {
-        outdated.addAll(all);
-        outdated.remove(top);
-        if (top != null) {
-            top.findingsChanged();
+        outdate();
+        if (top != null && top.page != null) {
+            top.page.findingsChanged();
         }
+    }
+
+    private void outdate() {
+        slots.forEach(slot -> slot.outdated = slot != top);
     }
 
     /** Index of the page of a kind; -1 if there is none. */
     int indexOf(Class<? extends EditorPage> kind) {
-        for (int i = 0; i < all.size(); i++) {
-            if (kind.isInstance(all.get(i))) {
-                return i;
-            }
-        }
-        return -1;
-    }
-
-    /** Index of the page that shows an object itself, preferably the one on top; -1 if there is none. */
-    int indexThatReveals(String id) {
-        if (top != null && top.reveals(id)) {
-            return all.indexOf(top);
-        }
-        for (int i = all.size() - 1; i >= 0; i--) {
-            if (all.get(i).reveals(id)) {
+        for (int i = 0; i < slots.size(); i++) {
+            if (slots.get(i).kind == kind) {
                 return i;
             }
         }

@@ -7,6 +7,7 @@ import java.util.Collection;
 import java.util.EventObject;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IMarker;
@@ -49,6 +50,7 @@ import org.modewright.model.edit.StructureEditAdapterFactory;
 import org.modewright.model.edit.commands.Deletion;
 import org.modewright.model.edit.commands.StructureCommands;
 import org.modewright.model.structure.Identified;
+import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.StructureEditorPart;
@@ -141,12 +143,12 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     protected void createPages() {
         if (model == null) {
-            addPage(new ErrorPage(getContainer(), failure, this::reload));
+            addPage(Messages.Error_page, ErrorPage.class, parent -> new ErrorPage(parent, failure, this::reload));
         } else {
-            addPage(new SpaceTab(getContainer(), this));
-            addPage(new TablesPage(getContainer(), this));
-            addPage(new LoadsPage(getContainer(), this));
-            addPage(new AnalysisPage(getContainer(), this));
+            addPage(Messages.Page_space, SpaceTab.class, parent -> new SpaceTab(parent, this));
+            addPage(Messages.Page_tables, TablesPage.class, parent -> new TablesPage(parent, this));
+            addPage(Messages.Page_loads, LoadsPage.class, parent -> new LoadsPage(parent, this));
+            addPage(Messages.Page_analysis, AnalysisPage.class, parent -> new AnalysisPage(parent, this));
         }
         if (actions == null) {
             actions = new EditorActions(this);
@@ -154,9 +156,8 @@ public final class StructureEditor extends MultiPageEditorPart
         checkLine.show(model != null);
     }
 
-    private void addPage(EditorPage page) {
-        pages.add(page);
-        setPageText(addPage(page.control()), page.title());
+    private void addPage(String title, Class<? extends EditorPage> kind, Function<Composite, EditorPage> maker) {
+        setPageText(addPage(pages.add(getContainer(), kind, maker)), title);
     }
 
     @Override
@@ -184,10 +185,7 @@ public final class StructureEditor extends MultiPageEditorPart
 
     /** Brings a page to the top. */
     public void showPage(Class<? extends EditorPage> kind) {
-        showPage(pages.indexOf(kind));
-    }
-
-    private void showPage(int page) {
+        int page = pages.indexOf(kind);
         if (page >= 0 && page != getActivePage()) {
             setActivePage(page);
         }
@@ -495,8 +493,14 @@ public final class StructureEditor extends MultiPageEditorPart
             return;
         }
         select(known, this);
-        showPage(pages.indexThatReveals(ids.stream().filter(known::contains).findFirst().orElseThrow()));
+        showPageOf(ids.stream().filter(known::contains).findFirst().orElseThrow());
         activePage().select(known);
+    }
+
+    private void showPageOf(String id) {
+        if (!activePage().reveals(id)) {
+            showPage(object(id) instanceof LoadPattern ? LoadsPage.class : TablesPage.class);
+        }
     }
 
     @Override

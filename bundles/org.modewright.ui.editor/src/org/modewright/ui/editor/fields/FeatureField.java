@@ -2,8 +2,10 @@ package org.modewright.ui.editor.fields;
 
 import java.util.Collection;
 import java.util.List;
+import java.util.Objects;
 import org.eclipse.emf.common.command.Command;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.ecore.EStructuralFeature;
 
 /** A field that stands for one feature. */
@@ -52,6 +54,15 @@ abstract class FeatureField implements Field {
     @Override
     public List<String> choices() {
         return List.of();
+    }
+
+    @Override
+    public boolean agree(Collection<? extends EObject> objects) {
+        if (feature.isMany() || feature instanceof EReference reference && reference.isContainment()) {
+            return Field.super.agree(objects);
+        }
+        Object first = value(objects.iterator().next());
+        return objects.stream().allMatch(object -> Objects.equals(value(object), first));
     }
 
     @Override

@@ -43,6 +43,12 @@ public interface Field {
         return false;
     }
 
+    /** Whether all objects have the same value. */
+    default boolean agree(Collection<? extends EObject> objects) {
+        String first = text(objects.iterator().next());
+        return objects.stream().allMatch(object -> text(object).equals(first));
+    }
+
     /** Whether the value can be changed. */
     default boolean isEditable() {
         return true;

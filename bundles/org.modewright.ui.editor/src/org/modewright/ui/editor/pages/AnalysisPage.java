@@ -205,11 +205,6 @@ public final class AnalysisPage implements EditorPage {
     }
 
     @Override
-    public String title() {
-        return Messages.Page_analysis;
-    }
-
-    @Override
     public Control control() {
         return scroller;
     }

@@ -19,11 +19,6 @@ public final class ErrorPage implements EditorPage {
     }
 
     @Override
-    public String title() {
-        return Messages.Error_title;
-    }
-
-    @Override
     public Control control() {
         return body;
     }

@@ -139,7 +139,7 @@ abstract class FieldControl {
     final void show(List<? extends EObject> newObjects) {
         objects = newObjects;
         String first = field.text(objects.get(0));
-        boolean different = objects.stream().anyMatch(object -> !field.text(object).equals(first));
+        boolean different = objects.size() > 1 && !field.agree(objects);
         present(first, different);
         warn(different ? null : first);
     }
@@ -151,7 +151,7 @@ abstract class FieldControl {
 
     /** Sets the text; false if it is refused. */
     final boolean commit(String text) {
-        if (objects.isEmpty() || objects.stream().allMatch(object -> field.text(object).equals(text))) {
+        if (objects.isEmpty() || field.text(objects.get(0)).equals(text) && field.agree(objects)) {
             warn(text);
             return true;
         }

@@ -74,7 +74,7 @@ public final class LoadsPage implements EditorPage {
         loads = new ObjectTable(below, context, "loads.loads", this::loadsSelected);
         fill(loads.table());
         rows.setWeights(46, 54);
-        form = new PropertyForm(parts.side(), context, Messages.Form_nothingInLoads);
+        form = new PropertyForm(parts, context, Messages.Form_nothingInLoads);
         sum = new MassSum(rows.getDisplay(), masses::show);
         rows.addListener(SWT.Dispose, event -> sum.cancel());
         modelChanged();
@@ -190,11 +190,6 @@ public final class LoadsPage implements EditorPage {
         addMemberLoad.setEnabled(one && !context.model().getMembers().isEmpty());
         deletePattern.setEnabled(!patterns.selected().isEmpty());
         deleteLoad.setEnabled(!loads.selected().isEmpty());
-    }
-
-    @Override
-    public String title() {
-        return Messages.Page_loads;
     }
 
     @Override

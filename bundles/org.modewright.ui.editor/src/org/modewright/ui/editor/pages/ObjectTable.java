@@ -183,6 +183,8 @@ final class ObjectTable {
     private void buildColumns() {
         table.setRedraw(false);
         try {
+            table.setItemCount(0);
+            rows = new EObject[0];
             for (TableColumn old : table.getColumns()) {
                 old.dispose();
             }

@@ -33,6 +33,7 @@ final class PropertyForm {
 
     private static final String FORM = "org.modewright.ui.editor.form";
 
+    private final SideBySide parts;
     private final EditorContext context;
     private final String nothing;
     private final ScrolledComposite scroller;
@@ -44,15 +45,17 @@ final class PropertyForm {
     private List<Object> shown = List.of();
 
     /** @param nothing what stands there while nothing is selected */
-    PropertyForm(Composite parent, EditorContext context, String nothing) {
+    PropertyForm(SideBySide parts, EditorContext context, String nothing) {
+        this.parts = parts;
         this.context = context;
         this.nothing = nothing;
-        scroller = new ScrolledComposite(parent, SWT.V_SCROLL);
+        scroller = new ScrolledComposite(parts.side(), SWT.V_SCROLL);
         scroller.setExpandHorizontal(true);
         scroller.setExpandVertical(true);
         scroller.setData(UiIds.WIDGET_ID, "editor.form");
         scroller.setData(FORM, this);
         scroller.addListener(SWT.Resize, event -> fit());
+        parts.whenOpened(this::showNow);
         show(List.of());
     }
 
@@ -71,6 +74,12 @@ final class PropertyForm {
     /** Shows objects; their fields are kept while the same objects, with the same choices and units, are shown. */
     void show(List<? extends EObject> chosen) {
         objects = List.copyOf(chosen);
+        if (parts.isOpen()) {
+            showNow();
+        }
+    }
+
+    private void showNow() {
         List<Field> fields = sameKind() ? Fields.of(context.fields(), kind(), objects.get(0)) : List.of();
         List<Object> now = identity(fields);
         if (!now.equals(shown)) {
@@ -200,7 +209,7 @@ final class PropertyForm {
 
     /** Shows what the live checks say about the object now. */
     void findingsChanged() {
-        if (body == null || body.isDisposed()) {
+        if (body == null || !parts.isOpen()) {
             return;
         }
         String text = objects.size() == 1 && objects.get(0) instanceof Identified object ? reasons(object) : "";

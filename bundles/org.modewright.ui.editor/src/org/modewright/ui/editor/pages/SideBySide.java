@@ -25,6 +25,7 @@ final class SideBySide {
     private final Composite side;
     private final IDialogSettings kept;
     private int width;
+    private Runnable opened = () -> { };
 
     /**
      * @param key name under which the state is kept
@@ -61,12 +62,24 @@ final class SideBySide {
         return side;
     }
 
+    boolean isOpen() {
+        return side.getVisible();
+    }
+
+    /** Says what is to be done when the properties are brought back. */
+    void whenOpened(Runnable action) {
+        opened = action;
+    }
+
     /** Folds the properties away or brings them back. */
     void open(boolean open) {
         kept.put(OPEN, open);
         side.setVisible(open);
         bar.show(open);
         body.layout();
+        if (open) {
+            opened.run();
+        }
     }
 
     private void toggle() {

@@ -27,18 +27,13 @@ public final class SpaceTab implements EditorPage {
         this.context = context;
         parts = new SideBySide(parent, "space", true);
         space = new SpacePage(parts.main(), context.session(), context::model);
-        form = new PropertyForm(parts.side(), context, Messages.Form_nothingInSpace);
+        form = new PropertyForm(parts, context, Messages.Form_nothingInSpace);
         context.offerMenu(space.canvas());
     }
 
     /** The drawing. */
     public SpacePage space() {
         return space;
-    }
-
-    @Override
-    public String title() {
-        return Messages.Page_space;
     }
 
     @Override

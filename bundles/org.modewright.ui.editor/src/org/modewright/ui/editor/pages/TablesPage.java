@@ -83,7 +83,7 @@ public final class TablesPage implements EditorPage {
         table.table().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         table.table().addListener(SWT.KeyDown, this::key);
         context.offerMenu(table.table());
-        form = new PropertyForm(parts.side(), context, Messages.Form_nothingInTable);
+        form = new PropertyForm(parts, context, Messages.Form_nothingInTable);
         show(Literals.STRUCTURAL_MODEL__NODES);
     }
 
@@ -240,11 +240,6 @@ public final class TablesPage implements EditorPage {
         context.select(ids, this);
         form.show(objects);
         enable();
-    }
-
-    @Override
-    public String title() {
-        return Messages.Page_tables;
     }
 
     @Override
