@@ -437,6 +437,26 @@ class FrameMemberTest {
         assertEquals(Math.sqrt(3.0 * 2e11 / (7850 * 169.0)), omega[2], 1e-9 * omega[2]);
     }
 
+    /** Where the end of a taut bar is free to slide across it, the tension holds nothing and the bar's mass moves with the other end. */
+    @Test
+    void releasesOfATautBarCondenseItsGeometricStiffness() {
+        TestStructure structure = new TestStructure();
+        Material material = structure.material(2e11, 0.3, 7850);
+        FrameSection section = structure.section(0.001, 0, 0, 0, 0, 0);
+        Node[] nodes = structure.line(new double[] {0, 0, 0}, new double[] {2, 0, 0}, 1, section, material);
+        Member bar = structure.model().getMembers().get(0);
+        bar.setAxialOnly(true);
+        bar.setAxialForce(1e4);
+        bar.getStartFree().add(Component.UY);
+        structure.hold(nodes[0], TestStructure.ALL);
+        double[] omega = structure.circular();
+        double mass = 7850 * 0.001 * 2;
+        assertEquals(3, omega.length);
+        assertEquals(0.0, omega[0], 1e-6);
+        assertEquals(Math.sqrt(1e4 / 2 / (mass / 3)), omega[1], 1e-9 * omega[1]);
+        assertEquals(mass * 4 / 3, structure.assemble().ledger().movable()[0] + structure.assemble().ledger().movable()[1], 1e-9);
+    }
+
     @Test
     void lumpedMassSitsInTheTranslationsOfTheNodes() {
         TestStructure structure = new TestStructure();

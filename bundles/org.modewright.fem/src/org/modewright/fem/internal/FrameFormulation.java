@@ -75,8 +75,7 @@ public final class FrameFormulation implements ElementFormulation {
         double[] across = line(member.axialForce() / member.length());
         for (int component = 1; component <= 2; component++) {
             int[] places = {component, component + 6};
-            scatter(places, across, stiffness);
-            scatter(places, linear(total), mass);
+            addAction(member, places, TRANSLATIONS, across.clone(), linear(total), stiffness, mass);
         }
     }
 
