@@ -10,19 +10,14 @@ import org.modewright.model.structure.Level;
 import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.Material;
 import org.modewright.model.structure.Member;
-import org.modewright.model.structure.MemberLoad;
 import org.modewright.model.structure.MultiPointTie;
 import org.modewright.model.structure.NodalMass;
 import org.modewright.model.structure.Node;
-import org.modewright.model.structure.NodeLoad;
 import org.modewright.model.structure.RigidFloor;
 import org.modewright.model.structure.RigidLink;
 import org.modewright.model.structure.Spring;
-import org.modewright.model.structure.SpringCoupling;
 import org.modewright.model.structure.StructuralModel;
-import org.modewright.model.structure.StructureFactory;
 import org.modewright.model.structure.Support;
-import org.modewright.model.structure.TieTerm;
 import org.modewright.model.structure.UnitSystem;
 import org.modewright.model.structure.Vector;
 import org.modewright.numerics.EigenPairs;
@@ -30,6 +25,7 @@ import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.EigenRequest;
 import org.modewright.numerics.EigenSolvers;
 import org.modewright.numerics.Progress;
+import org.modewright.testmodels.Parts;
 
 /** Builds small structures for tests, in N, m and kg unless told otherwise, and solves them by the dense method. */
 public final class TestStructure {
@@ -38,9 +34,8 @@ public final class TestStructure {
     /** Everything but motion in the x-y plane. */
     public static final String OUT_OF_XY = "uz rx ry";
 
-    private static final StructureFactory FACTORY = StructureFactory.eINSTANCE;
-
     private final StructuralModel model = ModelFile.create("test");
+    private final Parts parts = new Parts(model);
     private int ids;
 
     public TestStructure() {
@@ -55,51 +50,34 @@ public final class TestStructure {
         return model;
     }
 
-    private <T extends Identified> T named(T object) {
+    private String nextName() {
         ids++;
-        object.setId("o" + ids);
-        object.setName("o" + ids);
+        return "o" + ids;
+    }
+
+    /** Ids equal names, so that a test can call parts of a snapshot by either. */
+    private static <T extends Identified> T identified(T object) {
+        object.setId(object.getName());
         return object;
     }
 
     public Node node(double x, double y, double z) {
-        Node node = named(FACTORY.createNode());
-        node.setX(x);
-        node.setY(y);
-        node.setZ(z);
-        model.getNodes().add(node);
-        return node;
+        return identified(parts.node(nextName(), x, y, z));
     }
 
     public Material material(double young, double poisson, double density) {
-        Material material = named(FACTORY.createMaterial());
-        material.setYoung(young);
-        material.setPoisson(poisson);
-        material.setDensity(density);
-        model.getMaterials().add(material);
-        return material;
+        return identified(parts.material(nextName(), young, poisson, density));
     }
 
     public FrameSection section(double area, double iy, double iz, double torsion, double shearY, double shearZ) {
-        FrameSection section = named(FACTORY.createFrameSection());
-        section.setArea(area);
-        section.setIy(iy);
-        section.setIz(iz);
-        section.setTorsion(torsion);
+        FrameSection section = identified(parts.section(nextName(), area, iy, iz, torsion));
         section.setShearAreaY(shearY);
         section.setShearAreaZ(shearZ);
-        model.getFrameSections().add(section);
         return section;
     }
 
     public Member member(Node start, Node end, FrameSection section, Material material) {
-        Member member = named(FACTORY.createMember());
-        member.setStart(start);
-        member.setEnd(end);
-        member.setSection(section);
-        member.setMaterial(material);
-        model.getMembers().add(member);
-        return member;
+        return identified(parts.member(nextName(), start, end, section, material));
     }
 
     /** A straight line of equal members; the nodes from the first to the last. */
@@ -126,16 +104,9 @@ public final class TestStructure {
     public Support hold(Node node, String components) {
         Support support = model.getSupports().stream().filter(s -> s.getNode() == node).findFirst().orElse(null);
         if (support == null) {
-            support = named(FACTORY.createSupport());
-            support.setNode(node);
-            model.getSupports().add(support);
+            return identified(parts.support(nextName(), node, components));
         }
-        support.setUx(support.isUx() || components.contains("ux"));
-        support.setUy(support.isUy() || components.contains("uy"));
-        support.setUz(support.isUz() || components.contains("uz"));
-        support.setRx(support.isRx() || components.contains("rx"));
-        support.setRy(support.isRy() || components.contains("ry"));
-        support.setRz(support.isRz() || components.contains("rz"));
+        Parts.hold(support, components);
         return support;
     }
 
@@ -161,108 +132,56 @@ public final class TestStructure {
     }
 
     public NodalMass mass(Node node, double x, double y, double z, double rx, double ry, double rz) {
-        NodalMass mass = named(FACTORY.createNodalMass());
-        mass.setNode(node);
-        mass.setUx(x);
-        mass.setUy(y);
-        mass.setUz(z);
-        mass.setRx(rx);
-        mass.setRy(ry);
-        mass.setRz(rz);
-        model.getMasses().add(mass);
-        return mass;
+        return identified(parts.mass(nextName(), node, x, y, z, rx, ry, rz));
     }
 
     public static Vector vector(double x, double y, double z) {
-        Vector vector = FACTORY.createVector();
-        vector.setX(x);
-        vector.setY(y);
-        vector.setZ(z);
-        return vector;
+        return Parts.vector(x, y, z);
     }
 
-    /** A spring; to ground where `to` is null. */
+    /** A spring; to ground where {@code to} is null. */
     public Spring spring(Node node, Node to, double... stiffness) {
-        double[] k = Arrays.copyOf(stiffness, 6);
-        Spring spring = named(FACTORY.createSpring());
-        spring.setNode(node);
-        spring.setTo(to);
-        spring.setUx(k[0]);
-        spring.setUy(k[1]);
-        spring.setUz(k[2]);
-        spring.setRx(k[3]);
-        spring.setRy(k[4]);
-        spring.setRz(k[5]);
-        model.getSprings().add(spring);
-        return spring;
+        return identified(parts.spring(nextName(), node, to, stiffness));
     }
 
     public static void couple(Spring spring, Component first, Component second, double stiffness) {
-        SpringCoupling coupling = FACTORY.createSpringCoupling();
-        coupling.setFirst(first);
-        coupling.setSecond(second);
-        coupling.setStiffness(stiffness);
-        spring.getCouplings().add(coupling);
+        Parts.couple(spring, first, second, stiffness);
     }
 
     public RigidFloor floor(Node... nodes) {
-        RigidFloor floor = named(FACTORY.createRigidFloor());
-        floor.getNodes().addAll(Arrays.asList(nodes));
-        model.getRigidFloors().add(floor);
-        return floor;
+        return identified(parts.floor(nextName(), Arrays.asList(nodes)));
     }
 
     public RigidLink link(Node from, Node to, Component... components) {
-        RigidLink link = named(FACTORY.createRigidLink());
-        link.setFrom(from);
-        link.setTo(to);
-        link.getComponents().addAll(Arrays.asList(components));
-        model.getRigidLinks().add(link);
-        return link;
+        return identified(parts.link(nextName(), from, to, components));
     }
 
     public MultiPointTie tie() {
-        MultiPointTie tie = named(FACTORY.createMultiPointTie());
-        model.getTies().add(tie);
-        return tie;
+        return identified(parts.tie(nextName()));
     }
 
     public static void term(MultiPointTie tie, Node node, Component component, double factor) {
-        TieTerm term = FACTORY.createTieTerm();
-        term.setNode(node);
-        term.setComponent(component);
-        term.setFactor(factor);
-        tie.getTerms().add(term);
+        Parts.term(tie, node, component, factor);
     }
 
     public Level level(String name, double elevation) {
-        Level level = named(FACTORY.createLevel());
-        level.setName(name);
-        level.setElevation(elevation);
-        model.getLevels().add(level);
+        Level level = parts.level(name, elevation);
+        level.setId(nextName());
         return level;
     }
 
     public LoadPattern pattern(String name, double factor) {
-        LoadPattern pattern = named(FACTORY.createLoadPattern());
-        pattern.setName(name);
-        pattern.setMassFactor(factor);
-        model.getLoadPatterns().add(pattern);
+        LoadPattern pattern = parts.pattern(name, factor);
+        pattern.setId(nextName());
         return pattern;
     }
 
     public static void load(LoadPattern pattern, Node node, double force) {
-        NodeLoad load = FACTORY.createNodeLoad();
-        load.setNode(node);
-        load.setValue(force);
-        pattern.getLoads().add(load);
+        Parts.load(pattern, node, force);
     }
 
     public static void load(LoadPattern pattern, Member member, double forcePerLength) {
-        MemberLoad load = FACTORY.createMemberLoad();
-        load.setMember(member);
-        load.setValue(forcePerLength);
-        pattern.getLoads().add(load);
+        Parts.load(pattern, member, forcePerLength);
     }
 
     public Snapshot snapshot() {

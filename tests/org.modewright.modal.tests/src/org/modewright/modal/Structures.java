@@ -1,229 +1,24 @@
 package org.modewright.modal;
 
-import java.util.HashMap;
-import java.util.Map;
 import org.modewright.fem.Snapshot;
-import org.modewright.model.Ids;
-import org.modewright.model.structure.Component;
-import org.modewright.model.structure.FrameSection;
-import org.modewright.model.structure.Group;
-import org.modewright.model.structure.Level;
-import org.modewright.model.structure.MassFormulation;
-import org.modewright.model.structure.Material;
-import org.modewright.model.structure.Member;
-import org.modewright.model.structure.MultiPointTie;
-import org.modewright.model.structure.NodalMass;
-import org.modewright.model.structure.Node;
-import org.modewright.model.structure.RigidFloor;
-import org.modewright.model.structure.RigidLink;
-import org.modewright.model.structure.Spring;
-import org.modewright.model.structure.StructuralModel;
-import org.modewright.model.structure.StructureFactory;
-import org.modewright.model.structure.Support;
-import org.modewright.model.structure.TieTerm;
-import org.modewright.model.structure.UnitSystem;
-import org.modewright.model.structure.Vector;
 import org.modewright.numerics.Progress;
+import org.modewright.testmodels.NamedStructure;
 
-/** Builds small structures for tests, in N, m and kg. */
-final class Structures {
-
-    private static final StructureFactory FACTORY = StructureFactory.eINSTANCE;
-
-    private final StructuralModel model = FACTORY.createStructuralModel();
-    private final Map<String, Node> nodes = new HashMap<>();
+/** Builds small structures for tests, in N, m and kg, and runs their modes. */
+final class Structures extends NamedStructure<Structures> {
 
     Structures(String name) {
-        model.setName(name);
-        model.setUnits(UnitSystem.NEWTON_METRE);
+        super(name);
     }
 
     /** A chain of masses (kg) on springs (N/m) along X from the ground, the nodes one above the other; nothing else can move. */
     static Structures chain(double[] masses, double[] stiffnesses) {
-        Structures structures = new Structures("chain");
-        structures.node("base", 0, 0, 0).support("base", "ux uy uz rx ry rz");
-        String below = "base";
-        for (int i = 0; i < masses.length; i++) {
-            String floor = "floor " + (i + 1);
-            structures.node(floor, 0, 0, 3.0 * (i + 1)).support(floor, "uy uz rx ry rz").mass(floor, masses[i], 0, 0, 0, 0, 0);
-            structures.spring("storey " + (i + 1), below, floor, stiffnesses[i], 0, 0, 0, 0, 0);
-            below = floor;
-        }
-        return structures;
+        return new Structures("chain").storeys(masses, stiffnesses);
     }
 
-    Structures node(String name, double x, double y, double z) {
-        Node node = FACTORY.createNode();
-        node.setName(name);
-        node.setX(x);
-        node.setY(y);
-        node.setZ(z);
-        model.getNodes().add(node);
-        nodes.put(name, node);
+    @Override
+    protected Structures self() {
         return this;
-    }
-
-    Node node(String name) {
-        return nodes.get(name);
-    }
-
-    Structures support(String node, String held) {
-        Support support = FACTORY.createSupport();
-        support.setName("support " + node);
-        support.setNode(nodes.get(node));
-        support.setUx(held.contains("ux"));
-        support.setUy(held.contains("uy"));
-        support.setUz(held.contains("uz"));
-        support.setRx(held.contains("rx"));
-        support.setRy(held.contains("ry"));
-        support.setRz(held.contains("rz"));
-        model.getSupports().add(support);
-        return this;
-    }
-
-    Structures mass(String node, double... components) {
-        NodalMass mass = FACTORY.createNodalMass();
-        mass.setName("mass " + (model.getMasses().size() + 1));
-        mass.setNode(nodes.get(node));
-        mass.setUx(components[0]);
-        mass.setUy(components[1]);
-        mass.setUz(components[2]);
-        mass.setRx(components[3]);
-        mass.setRy(components[4]);
-        mass.setRz(components[5]);
-        model.getMasses().add(mass);
-        return this;
-    }
-
-    Structures massOffset(double x, double y, double z) {
-        model.getMasses().get(model.getMasses().size() - 1).setOffset(vector(x, y, z));
-        return this;
-    }
-
-    Structures spring(String name, String node, String to, double... stiffness) {
-        Spring spring = FACTORY.createSpring();
-        spring.setName(name);
-        spring.setNode(nodes.get(node));
-        spring.setTo(to == null ? null : nodes.get(to));
-        spring.setUx(stiffness[0]);
-        spring.setUy(stiffness[1]);
-        spring.setUz(stiffness[2]);
-        spring.setRx(stiffness[3]);
-        spring.setRy(stiffness[4]);
-        spring.setRz(stiffness[5]);
-        model.getSprings().add(spring);
-        return this;
-    }
-
-    Structures material(String name, double young, double poisson, double density) {
-        Material material = FACTORY.createMaterial();
-        material.setName(name);
-        material.setYoung(young);
-        material.setPoisson(poisson);
-        material.setDensity(density);
-        model.getMaterials().add(material);
-        return this;
-    }
-
-    Structures section(String name, double area, double iy, double iz, double torsion) {
-        FrameSection section = FACTORY.createFrameSection();
-        section.setName(name);
-        section.setArea(area);
-        section.setIy(iy);
-        section.setIz(iz);
-        section.setTorsion(torsion);
-        model.getFrameSections().add(section);
-        return this;
-    }
-
-    /** A member of the last section and material. */
-    Member member(String name, String start, String end) {
-        Member member = FACTORY.createMember();
-        member.setName(name);
-        member.setStart(nodes.get(start));
-        member.setEnd(nodes.get(end));
-        member.setSection(model.getFrameSections().get(model.getFrameSections().size() - 1));
-        member.setMaterial(model.getMaterials().get(model.getMaterials().size() - 1));
-        model.getMembers().add(member);
-        return member;
-    }
-
-    Structures with(String name, String start, String end) {
-        member(name, start, end);
-        return this;
-    }
-
-    static void free(Member member, boolean atStart, Component... components) {
-        for (Component component : components) {
-            (atStart ? member.getStartFree() : member.getEndFree()).add(component);
-        }
-    }
-
-    static Vector vector(double x, double y, double z) {
-        Vector vector = FACTORY.createVector();
-        vector.setX(x);
-        vector.setY(y);
-        vector.setZ(z);
-        return vector;
-    }
-
-    Structures floor(String name, String... members) {
-        RigidFloor floor = FACTORY.createRigidFloor();
-        floor.setName(name);
-        for (String member : members) {
-            floor.getNodes().add(nodes.get(member));
-        }
-        model.getRigidFloors().add(floor);
-        return this;
-    }
-
-    Structures link(String name, String from, String to) {
-        RigidLink link = FACTORY.createRigidLink();
-        link.setName(name);
-        link.setFrom(nodes.get(from));
-        link.setTo(nodes.get(to));
-        model.getRigidLinks().add(link);
-        return this;
-    }
-
-    /** The sum of factor times component is zero; terms as node, component, factor in turn. */
-    Structures tie(String name, Object... terms) {
-        MultiPointTie tie = FACTORY.createMultiPointTie();
-        tie.setName(name);
-        for (int i = 0; i < terms.length; i += 3) {
-            TieTerm term = FACTORY.createTieTerm();
-            term.setNode(nodes.get((String) terms[i]));
-            term.setComponent((Component) terms[i + 1]);
-            term.setFactor((Double) terms[i + 2]);
-            tie.getTerms().add(term);
-        }
-        model.getTies().add(tie);
-        return this;
-    }
-
-    Structures level(String name, double elevation) {
-        Level level = FACTORY.createLevel();
-        level.setName(name);
-        level.setElevation(elevation);
-        model.getLevels().add(level);
-        return this;
-    }
-
-    Group group(String name) {
-        Group group = FACTORY.createGroup();
-        group.setName(name);
-        model.getGroups().add(group);
-        return group;
-    }
-
-    Structures lumped() {
-        model.setMassFormulation(MassFormulation.LUMPED);
-        return this;
-    }
-
-    StructuralModel model() {
-        Ids.assignMissing(model);
-        return model;
     }
 
     Snapshot snapshot() {

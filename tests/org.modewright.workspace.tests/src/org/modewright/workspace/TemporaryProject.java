@@ -11,15 +11,13 @@ import org.eclipse.core.resources.IncrementalProjectBuilder;
 import org.eclipse.core.resources.ResourcesPlugin;
 import org.eclipse.core.runtime.NullProgressMonitor;
 import org.eclipse.core.runtime.jobs.Job;
+import org.modewright.model.Ids;
 import org.modewright.model.ModelFile;
 import org.modewright.model.structure.FrameSection;
 import org.modewright.model.structure.Material;
-import org.modewright.model.structure.Member;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.StructuralModel;
-import org.modewright.model.structure.StructureFactory;
-import org.modewright.model.structure.Support;
-import org.modewright.model.Ids;
+import org.modewright.testmodels.Parts;
 
 /** A project that goes away with the test, and a small sound model to put into it. */
 final class TemporaryProject implements AutoCloseable {
@@ -69,46 +67,17 @@ final class TemporaryProject implements AutoCloseable {
 
     /** A cantilever of three members along z with a section and a material; well formed, with mass. */
     static StructuralModel cantilever() {
-        StructureFactory factory = StructureFactory.eINSTANCE;
         StructuralModel model = ModelFile.create("cantilever");
-        Material steel = factory.createMaterial();
-        steel.setName("steel");
-        steel.setYoung(210e6);
-        steel.setPoisson(0.3);
-        steel.setDensity(7.85);
-        model.getMaterials().add(steel);
-        FrameSection section = factory.createFrameSection();
-        section.setName("tube");
-        section.setArea(0.01);
-        section.setIy(1e-4);
-        section.setIz(2e-4);
-        section.setTorsion(3e-4);
-        model.getFrameSections().add(section);
-        for (int i = 0; i <= 3; i++) {
-            Node node = factory.createNode();
-            node.setName("N" + i);
-            node.setZ(3.0 * i);
-            model.getNodes().add(node);
+        Parts parts = new Parts(model);
+        Material steel = parts.material("steel", 210e6, 0.3, 7.85);
+        FrameSection tube = parts.section("tube", 0.01, 1e-4, 2e-4, 3e-4);
+        Node below = parts.node("N0", 0, 0, 0);
+        parts.support("base", below, "ux uy uz rx ry rz");
+        for (int i = 1; i <= 3; i++) {
+            Node above = parts.node("N" + i, 0, 0, 3.0 * i);
+            parts.member("M" + i, below, above, tube, steel);
+            below = above;
         }
-        for (int i = 0; i < 3; i++) {
-            Member member = factory.createMember();
-            member.setName("M" + (i + 1));
-            member.setStart(model.getNodes().get(i));
-            member.setEnd(model.getNodes().get(i + 1));
-            member.setSection(section);
-            member.setMaterial(steel);
-            model.getMembers().add(member);
-        }
-        Support support = factory.createSupport();
-        support.setName("base");
-        support.setNode(model.getNodes().get(0));
-        support.setUx(true);
-        support.setUy(true);
-        support.setUz(true);
-        support.setRx(true);
-        support.setRy(true);
-        support.setRz(true);
-        model.getSupports().add(support);
         Ids.assignMissing(model);
         return model;
     }

@@ -2,7 +2,6 @@ package org.modewright.exchange.samples;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
-import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -12,34 +11,28 @@ import org.modewright.model.ModelFile;
 import org.modewright.model.structure.Component;
 import org.modewright.model.structure.FrameSection;
 import org.modewright.model.structure.Group;
-import org.modewright.model.structure.Level;
 import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.Material;
 import org.modewright.model.structure.Member;
-import org.modewright.model.structure.MemberLoad;
-import org.modewright.model.structure.NodalMass;
 import org.modewright.model.structure.Node;
-import org.modewright.model.structure.RigidFloor;
-import org.modewright.model.structure.RigidLink;
-import org.modewright.model.structure.Spring;
 import org.modewright.model.structure.StructuralModel;
-import org.modewright.model.structure.StructureFactory;
-import org.modewright.model.structure.Support;
 import org.modewright.model.structure.UnitSystem;
+import org.modewright.testmodels.Parts;
 
 /** Builds a structural model by the names of its parts. */
 final class ModelBuilder {
 
-    private static final StructureFactory FACTORY = StructureFactory.eINSTANCE;
     private static final MathContext FOUR_FIGURES = new MathContext(4);
 
     private final StructuralModel model;
+    private final Parts parts;
     private final Map<String, Node> nodes = new HashMap<>();
     private final Map<String, Group> groups = new HashMap<>();
     private final Map<String, LoadPattern> patterns = new HashMap<>();
 
     ModelBuilder(String name, String title, String units, String notes) {
         model = ModelFile.create(name);
+        parts = new Parts(model);
         model.setTitle(title);
         model.setUnits(UnitSystem.get(units));
         model.setNotes(notes);
@@ -51,12 +44,7 @@ final class ModelBuilder {
     }
 
     Node node(String name, double x, double y, double z) {
-        Node node = FACTORY.createNode();
-        node.setName(name);
-        node.setX(x);
-        node.setY(y);
-        node.setZ(z);
-        model.getNodes().add(node);
+        Node node = parts.node(name, x, y, z);
         nodes.put(name, node);
         return node;
     }
@@ -67,24 +55,11 @@ final class ModelBuilder {
     }
 
     Material material(String name, double young, double poisson, double density) {
-        Material material = FACTORY.createMaterial();
-        material.setName(name);
-        material.setYoung(young);
-        material.setPoisson(poisson);
-        material.setDensity(density);
-        model.getMaterials().add(material);
-        return material;
+        return parts.material(name, young, poisson, density);
     }
 
     FrameSection section(String name, double area, double iy, double iz, double torsion) {
-        FrameSection section = FACTORY.createFrameSection();
-        section.setName(name);
-        section.setArea(area);
-        section.setIy(iy);
-        section.setIz(iz);
-        section.setTorsion(torsion);
-        model.getFrameSections().add(section);
-        return section;
+        return parts.section(name, area, iy, iz, torsion);
     }
 
     /** Welded I-section of three plates, without fillets: web h by tw between flanges b by tf. */
@@ -115,14 +90,8 @@ final class ModelBuilder {
     }
 
     Member member(String name, String start, String end, FrameSection section, Material material, String group) {
-        Member member = FACTORY.createMember();
-        member.setName(name);
-        member.setStart(required(start));
-        member.setEnd(required(end));
-        member.setSection(section);
-        member.setMaterial(material);
-        member.setGroup(group == null ? null : groups.computeIfAbsent(group, this::group));
-        model.getMembers().add(member);
+        Member member = parts.member(name, required(start), required(end), section, material);
+        member.setGroup(group == null ? null : groups.computeIfAbsent(group, parts::group));
         return member;
     }
 
@@ -132,83 +101,37 @@ final class ModelBuilder {
         return member;
     }
 
-    private Group group(String name) {
-        Group group = FACTORY.createGroup();
-        group.setName(name);
-        model.getGroups().add(group);
-        return group;
-    }
-
     /** Holds the components that are named, such as {@code ux uy}. */
     void support(String node, String held) {
-        Support support = FACTORY.createSupport();
-        List<String> words = List.of(held.split(" "));
-        support.setName(node);
-        support.setNode(required(node));
-        support.setUx(words.contains("ux"));
-        support.setUy(words.contains("uy"));
-        support.setUz(words.contains("uz"));
-        support.setRx(words.contains("rx"));
-        support.setRy(words.contains("ry"));
-        support.setRz(words.contains("rz"));
-        model.getSupports().add(support);
+        parts.support(node, required(node), held);
     }
 
     void mass(String node, double x, double y, double z) {
-        NodalMass mass = FACTORY.createNodalMass();
-        mass.setName(node);
-        mass.setNode(required(node));
-        mass.setUx(x);
-        mass.setUy(y);
-        mass.setUz(z);
-        model.getMasses().add(mass);
+        parts.mass(node, required(node), x, y, z);
     }
 
     void spring(String name, String node, String to, double ux) {
-        Spring spring = FACTORY.createSpring();
-        spring.setName(name);
-        spring.setNode(required(node));
-        spring.setTo(to == null ? null : required(to));
-        spring.setUx(ux);
-        model.getSprings().add(spring);
+        parts.spring(name, required(node), to == null ? null : required(to), ux);
     }
 
     void floor(String name, List<Node> floorNodes) {
-        RigidFloor floor = FACTORY.createRigidFloor();
-        floor.setName(name);
-        floor.getNodes().addAll(floorNodes);
-        model.getRigidFloors().add(floor);
+        parts.floor(name, floorNodes);
     }
 
     void link(String name, String from, String to, Component... components) {
-        RigidLink link = FACTORY.createRigidLink();
-        link.setName(name);
-        link.setFrom(required(from));
-        link.setTo(required(to));
-        link.getComponents().addAll(Arrays.asList(components));
-        model.getRigidLinks().add(link);
+        parts.link(name, required(from), required(to), components);
     }
 
     void level(String name, double elevation) {
-        Level level = FACTORY.createLevel();
-        level.setName(name);
-        level.setElevation(elevation);
-        model.getLevels().add(level);
+        parts.level(name, elevation);
     }
 
     void pattern(String name, double massFactor) {
-        LoadPattern pattern = FACTORY.createLoadPattern();
-        pattern.setName(name);
-        pattern.setMassFactor(massFactor);
-        model.getLoadPatterns().add(pattern);
-        patterns.put(name, pattern);
+        patterns.put(name, parts.pattern(name, massFactor));
     }
 
     void lineLoad(String pattern, Member member, double value) {
-        MemberLoad load = FACTORY.createMemberLoad();
-        load.setMember(member);
-        load.setValue(value);
-        patterns.get(pattern).getLoads().add(load);
+        Parts.load(patterns.get(pattern), member, value);
     }
 
     void selfMassFactor(double factor) {
