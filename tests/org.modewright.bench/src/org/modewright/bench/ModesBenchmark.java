@@ -45,8 +45,8 @@ final class ModesBenchmark {
         EigenProblem problem = new EigenProblem(assembly.stiffness(), assembly.mass());
         Timing factorising = timed("order and factorise K", () -> factorise(problem));
         Timing solving = timed(MODES + " modes with certificate", () -> solve(EigenSolvers.lanczos(), problem));
-        out.printf(Locale.ROOT, "      %.2f factorisations to assemble, %.1f factorisations to solve, in processor time%n", assembling.ratioTo(factorising),
-                solving.ratioTo(factorising));
+        out.printf(Locale.ROOT, "      %.2f factorisations to assemble, %.1f factorisations to solve, in processor time%n",
+                assembling.ratioTo(factorising), solving.ratioTo(factorising));
         if (problem.order() <= LIBRARY_ORDER) {
             GeneralLibrary library = new GeneralLibrary(problem.stiffness());
             Timing general = timed("factorise K with EJML's sparse Cholesky", library::factorise);

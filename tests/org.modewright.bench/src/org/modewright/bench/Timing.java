@@ -21,10 +21,10 @@ record Timing(double first, double warm, double processor) {
     private static final double SHORTEST_RUN = 0.3;
     private static final int MOST_REPETITIONS = 50;
 
-    /** Runs the work once and three times more. */
+    /** Runs the work once, once more to see how long it takes, and three times to measure. */
     static Timing of(Callable<?> work) throws Exception {
         Run first = Run.of(work, 1);
-        int repetitions = (int) Math.min(MOST_REPETITIONS, Math.ceil(SHORTEST_RUN / first.elapsed()));
+        int repetitions = (int) Math.min(MOST_REPETITIONS, Math.ceil(SHORTEST_RUN / Run.of(work, 1).elapsed()));
         Run[] later = new Run[WARM_RUNS];
         for (int run = 0; run < WARM_RUNS; run++) {
             later[run] = Run.of(work, repetitions);
