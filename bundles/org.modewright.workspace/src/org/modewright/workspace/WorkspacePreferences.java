@@ -17,6 +17,9 @@ public final class WorkspacePreferences {
     /** Key: number of threads of a run; 0: as many as the computer has processors. */
     public static final String THREADS = "threads";
 
+    /** Key: whether a model that has been run before is run again when it is saved. */
+    public static final String RUN_ON_SAVE = "runOnSave";
+
     private WorkspacePreferences() {
     }
 
@@ -30,6 +33,11 @@ public final class WorkspacePreferences {
     public static int threads() {
         int set = service().getInt(NODE, THREADS, 0, null);
         return set > 0 ? set : Runtime.getRuntime().availableProcessors();
+    }
+
+    /** Whether a model that has been run before is run again when it is saved. */
+    public static boolean runsOnSave() {
+        return service().getBoolean(NODE, RUN_ON_SAVE, true, null);
     }
 
     private static IPreferencesService service() {

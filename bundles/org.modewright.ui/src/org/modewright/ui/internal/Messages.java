@@ -75,6 +75,7 @@ public final class Messages extends NLS {
     public static String Preferences_folder;
     public static String Preferences_noFolder;
     public static String Preferences_play;
+    public static String Preferences_runOnSave;
     public static String Preferences_runs;
     public static String Preferences_speed;
     public static String Preferences_speedUnit;

@@ -8,6 +8,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import org.eclipse.core.resources.IFile;
+import org.eclipse.core.runtime.NullProgressMonitor;
+import org.eclipse.core.runtime.preferences.InstanceScope;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
 import org.modewright.model.structure.StructuralModel;
@@ -18,6 +20,7 @@ import org.modewright.ui.AuditSession;
 import org.modewright.ui.StructureEditorPart;
 import org.modewright.ui.UiIds;
 import org.modewright.workspace.RunStore;
+import org.modewright.workspace.WorkspacePreferences;
 
 @ExtendWith(WorkbenchExtension.class)
 class KeptResultTest {
@@ -54,5 +57,41 @@ class KeptResultTest {
         workbench.open(file);
         workbench.ui().waitUntil("the result of the edited model to be stale", session::isStale);
         assertEquals(file, workbench.ask(session::modelFile));
+    }
+
+    @Test
+    void savingAModelWithAResultRunsItAgain(Workbench workbench) {
+        AuditSession session = editedAfterRun(workbench);
+        save(workbench);
+        workbench.ui().waitUntil("the result of the saved model", () -> !session.isRunning() && !session.isStale());
+    }
+
+    @Test
+    void savingRunsNothingIfTheUserDoesNotWantIt(Workbench workbench) {
+        InstanceScope.INSTANCE.getNode(WorkspacePreferences.NODE).putBoolean(WorkspacePreferences.RUN_ON_SAVE, false);
+        try {
+            AuditSession session = editedAfterRun(workbench);
+            save(workbench);
+            workbench.waitForBuild();
+            assertTrue(workbench.ask(session::isStale));
+        } finally {
+            InstanceScope.INSTANCE.getNode(WorkspacePreferences.NODE).remove(WorkspacePreferences.RUN_ON_SAVE);
+        }
+    }
+
+    private static AuditSession editedAfterRun(Workbench workbench) {
+        workbench.openSample();
+        workbench.runAudit();
+        StructureEditorPart editor = workbench.structureEditor();
+        assertTrue(workbench.ask(() -> editor.reveal(editor.getLiveModel().getMembers().get(0).getId())));
+        workbench.editor().type("field.Name", "another name");
+        AuditSession session = workbench.session();
+        workbench.ui().waitUntil("the result to be stale", session::isStale);
+        return session;
+    }
+
+    private static void save(Workbench workbench) {
+        StructureEditorPart editor = workbench.structureEditor();
+        workbench.ui().run(() -> editor.doSave(new NullProgressMonitor()));
     }
 }

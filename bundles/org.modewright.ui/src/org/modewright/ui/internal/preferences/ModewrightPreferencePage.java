@@ -32,6 +32,7 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
     private Themes themes;
     private Text folder;
     private Spinner threads;
+    private Button runOnSave;
     private Spinner amplitude;
     private Spinner speed;
     private Button play;
@@ -59,6 +60,7 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
     public boolean performOk() {
         runs.setValue(WorkspacePreferences.RULE_PACK_FOLDER, folder.getText().strip());
         runs.setValue(WorkspacePreferences.THREADS, threads.getSelection());
+        runs.setValue(WorkspacePreferences.RUN_ON_SAVE, runOnSave.getSelection());
         animation.setValue(AnimationPreferences.AMPLITUDE, amplitude.getSelection());
         animation.setValue(AnimationPreferences.SPEED, speed.getSelection());
         animation.setValue(AnimationPreferences.PLAY, play.getSelection());
@@ -72,6 +74,7 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
     protected void performDefaults() {
         folder.setText("");
         threads.setSelection(0);
+        runOnSave.setSelection(true);
         amplitude.setSelection(animation.getDefaultInt(AnimationPreferences.AMPLITUDE));
         speed.setSelection(animation.getDefaultInt(AnimationPreferences.SPEED));
         play.setSelection(animation.getDefaultBoolean(AnimationPreferences.PLAY));
@@ -101,6 +104,9 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
         GridDataFactory.fillDefaults().span(2, 1).applyTo(number);
         threads = spinner(number, 0, 256);
         label(number, Messages.Preferences_threadsNote);
+        runOnSave = new Button(area, SWT.CHECK);
+        runOnSave.setText(Messages.Preferences_runOnSave);
+        GridDataFactory.swtDefaults().span(3, 1).applyTo(runOnSave);
     }
 
     private void createAnimation(Composite area) {
@@ -127,6 +133,7 @@ public final class ModewrightPreferencePage extends PreferencePage implements IW
     private void show() {
         folder.setText(runs.getString(WorkspacePreferences.RULE_PACK_FOLDER));
         threads.setSelection(runs.getInt(WorkspacePreferences.THREADS));
+        runOnSave.setSelection(WorkspacePreferences.runsOnSave());
         amplitude.setSelection(animation.getInt(AnimationPreferences.AMPLITUDE));
         speed.setSelection(animation.getInt(AnimationPreferences.SPEED));
         play.setSelection(animation.getBoolean(AnimationPreferences.PLAY));

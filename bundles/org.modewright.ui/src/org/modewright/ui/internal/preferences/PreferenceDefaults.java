@@ -4,6 +4,7 @@ import org.eclipse.core.runtime.preferences.AbstractPreferenceInitializer;
 import org.eclipse.core.runtime.preferences.DefaultScope;
 import org.eclipse.core.runtime.preferences.IEclipsePreferences;
 import org.modewright.ui.AnimationPreferences;
+import org.modewright.workspace.WorkspacePreferences;
 
 /** What is set before the user sets anything. */
 public final class PreferenceDefaults extends AbstractPreferenceInitializer {
@@ -14,5 +15,6 @@ public final class PreferenceDefaults extends AbstractPreferenceInitializer {
         defaults.putInt(AnimationPreferences.AMPLITUDE, 6);
         defaults.putInt(AnimationPreferences.SPEED, 5);
         defaults.putBoolean(AnimationPreferences.PLAY, true);
+        DefaultScope.INSTANCE.getNode(WorkspacePreferences.NODE).putBoolean(WorkspacePreferences.RUN_ON_SAVE, true);
     }
 }

@@ -38,14 +38,22 @@ final class ModelReader implements IResourceChangeListener {
     private final Display display;
     private final RunRegistry registry;
     private final Consumer<Content> arrived;
+    private final Runnable saved;
     private IFile file;
     private boolean withModel;
     private Job reading;
 
-    ModelReader(Display display, RunRegistry registry, Consumer<Content> arrived) {
+    /**
+     * @param display where to report
+     * @param registry where kept runs come from
+     * @param arrived told of what was read
+     * @param saved told when the file of a model that an editor holds has been written
+     */
+    ModelReader(Display display, RunRegistry registry, Consumer<Content> arrived, Runnable saved) {
         this.display = display;
         this.registry = registry;
         this.arrived = arrived;
+        this.saved = saved;
     }
 
     /** Reads the kept run of a model, and the model too where no editor holds it. */
@@ -81,8 +89,13 @@ final class ModelReader implements IResourceChangeListener {
     }
 
     private void reread(IFile watched) {
-        if (watched.equals(file) && withModel) {
+        if (!watched.equals(file)) {
+            return;
+        }
+        if (withModel) {
             schedule();
+        } else {
+            saved.run();
         }
     }
 

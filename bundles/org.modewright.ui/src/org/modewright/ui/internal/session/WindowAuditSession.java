@@ -28,6 +28,7 @@ import org.modewright.ui.internal.session.TargetTracker.Target;
 import org.modewright.workspace.AuditJob;
 import org.modewright.workspace.RunRegistry;
 import org.modewright.workspace.StoredRun;
+import org.modewright.workspace.WorkspacePreferences;
 
 /** The audit session of one workbench window. */
 final class WindowAuditSession implements AuditSession {
@@ -53,7 +54,7 @@ final class WindowAuditSession implements AuditSession {
         this.window = window;
         display = window.getShell().getDisplay();
         changes = new ChangeQueue(display);
-        reader = new ModelReader(display, registry, this::contentRead);
+        reader = new ModelReader(display, registry, this::contentRead, this::modelSaved);
         freshness = new Freshness(display, () -> changes.fire(Change.RESULT));
         tracker = new TargetTracker(window, this::retarget);
         registry.addListener(runs);
@@ -201,6 +202,19 @@ final class WindowAuditSession implements AuditSession {
         }
         reader.read(target.file(), target.editor() == null);
         follow();
+    }
+
+    /** A saved model that has been run before is run again, if the user wants that; defects are for the markers to tell. */
+    private void modelSaved() {
+        StructuralModel model = model();
+        if (model == null || run == null || !isStale() || isRunning() || !WorkspacePreferences.runsOnSave()) {
+            return;
+        }
+        try {
+            AuditJob.of(target.file(), model, registry).schedule();
+        } catch (ModelDefectsException defects) {
+            changes.fire(Change.RESULT);
+        }
     }
 
     private void detach() {
