@@ -18,6 +18,10 @@ import org.modewright.workspace.RunStoreException;
 /** Gathers what the explorer says about a model. */
 final class ModelFactReading {
 
+    private static final int TITLE = 0;
+    private static final int SIZE = 1;
+    private static final int RESULT = 2;
+
     private final RunRegistry registry;
 
     ModelFactReading(RunRegistry registry) {
@@ -29,7 +33,7 @@ final class ModelFactReading {
         try {
             addModel(facts, file, ModelFiles.load(file));
         } catch (ModelFileException broken) {
-            facts.add(new ModelFact(file, broken.reason(), Images.ERROR));
+            facts.add(new ModelFact(file, SIZE, broken.reason(), Images.ERROR));
         }
         addResult(facts, file);
         return facts;
@@ -37,27 +41,28 @@ final class ModelFactReading {
 
     private static void addModel(List<ModelFact> facts, IFile file, StructuralModel model) {
         if (model.getTitle() != null && !model.getTitle().isBlank()) {
-            facts.add(new ModelFact(file, model.getTitle(), Images.INFORMATION));
+            facts.add(new ModelFact(file, TITLE, model.getTitle(), Images.INFORMATION));
         }
         String size = NLS.bind(Messages.Explorer_size, new Object[] {
             Numbers.counted(model.getNodes().size(), Messages.Explorer_node, Messages.Explorer_nodes),
             Numbers.counted(model.getMembers().size(), Messages.Explorer_member, Messages.Explorer_members),
             model.getUnits().getLiteral()});
-        facts.add(new ModelFact(file, size, Images.SHAPE));
+        facts.add(new ModelFact(file, SIZE, size, Images.SHAPE));
     }
 
     private void addResult(List<ModelFact> facts, IFile file) {
         try {
             facts.add(registry.lastRun(file).map(run -> result(file, run.result()))
-                    .orElseGet(() -> new ModelFact(file, Messages.Explorer_noResult, Images.NOT_JUDGED)));
+                    .orElseGet(() -> new ModelFact(file, RESULT, Messages.Explorer_noResult, Images.NOT_JUDGED)));
         } catch (RunStoreException damaged) {
-            facts.add(new ModelFact(file, damaged.getMessage(), Images.WARNING));
+            facts.add(new ModelFact(file, RESULT, damaged.getMessage(), Images.WARNING));
         }
     }
 
     private static ModelFact result(IFile file, AuditResult result) {
         String modes = Numbers.counted(result.modal().modes().size(), Messages.Explorer_mode, Messages.Explorer_modes);
-        return new ModelFact(file, NLS.bind(word(result.status()), modes), result.status() == AuditStatus.PASSED ? Images.PASSED : Images.FAILED);
+        return new ModelFact(file, RESULT, NLS.bind(word(result.status()), modes),
+                result.status() == AuditStatus.PASSED ? Images.PASSED : Images.FAILED);
     }
 
     private static String word(AuditStatus status) {
