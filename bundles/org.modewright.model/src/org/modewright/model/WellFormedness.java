@@ -19,7 +19,7 @@ public final class WellFormedness {
             "support-repeated", "support-elastic-on-held",
             "floor-too-few-nodes", "floor-node-repeated", "floor-not-coplanar", "floor-line-not-horizontal",
             "link-to-itself", "link-component-repeated", "link-cyclic",
-            "tie-empty", "tie-term-repeated", "level-repeated");
+            "tie-empty", "tie-term-repeated", "level-repeated", "mass-negative");
 
     private WellFormedness() {
     }
@@ -46,6 +46,7 @@ public final class WellFormedness {
         new MemberChecks(model, defects).run();
         new SpringChecks(model, defects).run();
         new ConstraintChecks(model, defects).run();
+        new MassChecks(model, defects).run();
         return defects.toList();
     }
 

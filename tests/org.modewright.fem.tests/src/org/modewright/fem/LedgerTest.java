@@ -2,6 +2,7 @@ package org.modewright.fem;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Arrays;
@@ -11,6 +12,7 @@ import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.modewright.model.Defect;
 import org.modewright.model.structure.Component;
 import org.modewright.model.structure.FrameSection;
 import org.modewright.model.structure.LoadPattern;
@@ -253,5 +255,16 @@ class LedgerTest {
         assertArrayEquals(new double[] {1, 2, 3}, ledger.centre());
         assertEquals(0.0, ledger.balance());
         assertTrue(ledger.sources().isEmpty());
+    }
+
+    @Test
+    void aNegativeSeismicMassIsRefused() {
+        TestStructure s = new TestStructure();
+        Node node = s.node(0, 0, 0);
+        s.mass(node, 500);
+        TestStructure.load(s.pattern("buoyancy", 1), node, -9806.65);
+        ModelDefectsException refusal = assertThrows(ModelDefectsException.class, s::snapshot);
+        assertEquals(List.of("mass-negative"), refusal.defects().stream().map(Defect::id).toList());
+        assertTrue(refusal.getMessage().contains("buoyancy") && refusal.getMessage().contains("-1000 kg"), refusal.getMessage());
     }
 }

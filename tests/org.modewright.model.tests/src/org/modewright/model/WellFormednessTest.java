@@ -2,6 +2,7 @@ package org.modewright.model;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.modewright.model.Severity.ERROR;
 import static org.modewright.model.Severity.INFO;
@@ -20,7 +21,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.modewright.model.structure.Component;
 import org.modewright.model.structure.Level;
+import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.Member;
+import org.modewright.model.structure.MemberLoad;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.RigidFloor;
 import org.modewright.model.structure.RigidLink;
@@ -50,7 +53,7 @@ class WellFormednessTest {
     }
 
     static List<Case> cases() {
-        return Stream.of(references(), numbers(), members(), springs(), constraints()).flatMap(s -> s).toList();
+        return Stream.of(references(), numbers(), members(), springs(), constraints(), masses()).flatMap(s -> s).toList();
     }
 
     private static Stream<Case> references() {
@@ -172,6 +175,13 @@ class WellFormednessTest {
                         m -> m.getTies().get(0).getTerms().get(1).setNode(m.getNodes().get(8))));
     }
 
+    /** The beam's 5 kN/m over 4 m put 10 kN on each of its nodes, so 10 kN is what a node load may take away again. */
+    private static Stream<Case> masses() {
+        return Stream.of(
+                error("mass-negative", "node load", m -> nodeLoad(m, -10.001), m -> nodeLoad(m, -10)),
+                error("mass-negative", "line load", m -> lineLoad(m, -1e-9), m -> lineLoad(m, 0)));
+    }
+
     @ParameterizedTest
     @MethodSource("cases")
     void triggeredByTheFaultAndNotByItsTwin(Case c) {
@@ -208,6 +218,35 @@ class WellFormednessTest {
         assertEquals(new TreeSet<>(WellFormedness.checks()), covered);
     }
 
+    /** (10 kN - 110 kN) times the factor 0.3 over 9.80665 m/s2 is -3.059 t. */
+    @Test
+    void aNegativeMassNamesPatternAndNode() {
+        StructuralModel model = Fixtures.sound();
+        nodeLoad(model, -110);
+        Defect defect = WellFormedness.check(model).get(0);
+        assertEquals("Load pattern Live gives node N6 a negative mass, -3.06 t.", defect.text());
+        assertSame(model.getLoadPatterns().get(0), defect.object());
+    }
+
+    /** What counts is the sum of all patterns: one may take away what another brings, and one without a factor takes nothing. */
+    @Test
+    void patternsMayTakeAwayWhatOthersBring() {
+        StructuralModel model = Fixtures.sound();
+        LoadPattern opening = StructureFactory.eINSTANCE.createLoadPattern();
+        opening.setName("Opening");
+        opening.setMassFactor(0.3);
+        MemberLoad load = StructureFactory.eINSTANCE.createMemberLoad();
+        load.setMember(model.getMembers().get(1));
+        load.setValue(-5);
+        opening.getLoads().add(load);
+        model.getLoadPatterns().add(opening);
+        assertEquals(List.of(), WellFormedness.check(model));
+        load.setValue(-6);
+        assertEquals(List.of("mass-negative"), WellFormedness.check(model).stream().map(Defect::id).toList());
+        opening.setMassFactor(0);
+        assertEquals(List.of(), WellFormedness.check(model));
+    }
+
     @Test
     void redundantConstraintsAreComputable() {
         StructuralModel model = Fixtures.sound();
@@ -218,6 +257,14 @@ class WellFormednessTest {
 
     private static EObject load(StructuralModel m) {
         return m.getLoadPatterns().get(0).getLoads().get(0);
+    }
+
+    private static void nodeLoad(StructuralModel m, double force) {
+        m.getLoadPatterns().get(0).getLoads().get(0).setValue(force);
+    }
+
+    private static void lineLoad(StructuralModel m, double forcePerLength) {
+        m.getLoadPatterns().get(0).getLoads().get(1).setValue(forcePerLength);
     }
 
     private static void level(StructuralModel m, double elevation) {

@@ -1,0 +1,117 @@
+package org.modewright.model;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.IdentityHashMap;
+import java.util.LinkedHashMap;
+import java.util.Map;
+
+import org.modewright.model.structure.GravityLoad;
+import org.modewright.model.structure.LoadPattern;
+import org.modewright.model.structure.Member;
+import org.modewright.model.structure.MemberLoad;
+import org.modewright.model.structure.Node;
+import org.modewright.model.structure.NodeLoad;
+import org.modewright.model.structure.StructuralModel;
+import org.modewright.model.structure.StructurePackage;
+
+/**
+ * Load patterns that take mass away from nodes. The loads of all patterns together must give no node a negative mass: only then is the
+ * mass matrix positive semidefinite whatever the elements weigh, as every eigenvalue method needs it.
+ */
+final class MassChecks {
+
+    /** Below this share of what a node carries, up and down, the sum counts as zero: it is round-off. */
+    private static final double ROUND_OFF = 1e-12;
+    private static final MathContext THREE_FIGURES = new MathContext(3);
+
+    private final StructuralModel model;
+    private final DefectList defects;
+    private final Map<Node, Weight> weights = new IdentityHashMap<>();
+
+    MassChecks(StructuralModel model, DefectList defects) {
+        this.model = model;
+        this.defects = defects;
+    }
+
+    void run() {
+        model.getLoadPatterns().forEach(this::addPattern);
+        Map<LoadPattern, Lack> lacks = new LinkedHashMap<>();
+        for (Node node : model.getNodes()) {
+            Weight weight = weights.get(node);
+            if (weight != null && weight.sum < -ROUND_OFF * weight.amount) {
+                lacks.computeIfAbsent(weight.lightest(), pattern -> new Lack()).add(node, weight.sum);
+            }
+        }
+        lacks.forEach(this::report);
+    }
+
+    private void addPattern(LoadPattern pattern) {
+        for (GravityLoad load : pattern.getLoads()) {
+            double value = pattern.getMassFactor() * load.getValue();
+            if (load instanceof NodeLoad onNode) {
+                add(onNode.getNode(), pattern, value);
+            } else if (load instanceof MemberLoad onMember) {
+                addMemberLoad(onMember.getMember(), pattern, value);
+            }
+        }
+    }
+
+    private void addMemberLoad(Member member, LoadPattern pattern, double perLength) {
+        if (member != null && member.getStart() != null && member.getEnd() != null) {
+            double half = 0.5 * perLength * Geometry.distance(Geometry.position(member.getStart()), Geometry.position(member.getEnd()));
+            add(member.getStart(), pattern, half);
+            add(member.getEnd(), pattern, half);
+        }
+    }
+
+    private void add(Node node, LoadPattern pattern, double force) {
+        if (node != null && force != 0) {
+            weights.computeIfAbsent(node, key -> new Weight()).add(pattern, force);
+        }
+    }
+
+    private void report(LoadPattern pattern, Lack lack) {
+        String others = lack.nodes == 1 ? "" : "; so it is with " + (lack.nodes - 1) + " more";
+        double mass = lack.worst / Units.gravity(model);
+        defects.error("mass-negative", pattern, StructurePackage.Literals.LOAD_PATTERN__LOADS,
+                ReferenceChecks.sentenceStart(pattern) + " gives " + Names.describe(lack.node) + " a negative mass, "
+                        + new BigDecimal(mass).round(THREE_FIGURES).toPlainString() + " " + Units.of(model).symbol(Quantity.MASS) + others
+                        + ".",
+                "Gravity loads count downwards positive: turn the sign of its loads, or set its mass factor to 0.");
+    }
+
+    /** What the patterns put on one node, in the model's unit of force. */
+    private static final class Weight {
+
+        private final Map<LoadPattern, Double> byPattern = new LinkedHashMap<>();
+        private double sum;
+        private double amount;
+
+        void add(LoadPattern pattern, double force) {
+            byPattern.merge(pattern, force, Double::sum);
+            sum += force;
+            amount += Math.abs(force);
+        }
+
+        LoadPattern lightest() {
+            return byPattern.entrySet().stream().min(Map.Entry.comparingByValue()).orElseThrow().getKey();
+        }
+    }
+
+    /** The nodes that a pattern makes negative, and the worst of them. */
+    private static final class Lack {
+
+        private Node node;
+        private double worst;
+        private int nodes;
+
+        void add(Node candidate, double force) {
+            nodes++;
+            if (node == null || force < worst) {
+                node = candidate;
+                worst = force;
+            }
+        }
+    }
+}
