@@ -34,27 +34,32 @@ final class EnergyLegend {
     }
 
     void paint(GC gc) {
+        Rectangle area = canvas.getClientArea();
+        paint(gc, area.width, area.height);
+    }
+
+    /** Draws into a picture of another size. */
+    void paint(GC gc, int width, int height) {
         if (energy == null) {
             return;
         }
-        Rectangle area = canvas.getClientArea();
         String title = energy == Energy.STRAIN ? Messages.Legend_strain : Messages.Legend_kinetic;
         Point size = gc.textExtent(title);
         gc.setForeground(ThemeColours.isDark(canvas) ? new Color(0xE6, 0xE6, 0xE6) : new Color(0x30, 0x30, 0x30));
-        gc.drawText(title, area.width - MARGIN - size.x, MARGIN, true);
+        gc.drawText(title, width - MARGIN - size.x, MARGIN, true);
         int top = MARGIN + size.y + MARGIN;
-        int left = area.width - MARGIN - STRIP_WIDTH;
-        int height = Math.min(TALLEST, area.height - top - MARGIN);
-        if (height < LEAST) {
+        int left = width - MARGIN - STRIP_WIDTH;
+        int tall = Math.min(TALLEST, height - top - MARGIN);
+        if (tall < LEAST) {
             return;
         }
-        paintStrip(gc, left, top, height);
-        int parts = height < 3 * size.y ? 1 : 2;
+        paintStrip(gc, left, top, tall);
+        int parts = tall < 3 * size.y ? 1 : 2;
         for (int part = 0; part <= parts; part++) {
             String text = Numbers.percent(largest * part / parts);
             Point extent = gc.textExtent(text);
-            int y = top + height - part * height / parts;
-            gc.drawText(text, left - MARGIN / 2 - extent.x, Math.max(top, Math.min(y - extent.y / 2, top + height - extent.y)), true);
+            int y = top + tall - part * tall / parts;
+            gc.drawText(text, left - MARGIN / 2 - extent.x, Math.max(top, Math.min(y - extent.y / 2, top + tall - extent.y)), true);
         }
     }
 

@@ -17,22 +17,25 @@ final class StillPicture {
 
     private static final int WIDTH = 1920;
 
+    /** Pixels of the picture for one of text, lines and signs. */
+    private static final int SCALE = 2;
+
     private StillPicture() {
     }
 
     /** The picture, {@value #WIDTH} pixels wide, as high as the canvas is in proportion. */
     static ImageData of(StructureCanvas canvas, EnergyLegend legend) {
         Point size = canvas.getSize();
-        double scale = WIDTH / (double) Math.max(1, size.x);
+        int height = Math.max(1, (int) Math.round(size.y * WIDTH / (double) Math.max(1, size.x)));
         Device device = canvas.getDisplay();
-        Image image = new Image(device, new RasterImage(device).copy(canvas.still(WIDTH, Math.max(1, (int) Math.round(size.y * scale)))));
+        Image image = new Image(device, new RasterImage(device).copy(canvas.still(WIDTH, height, SCALE)));
         GC gc = new GC(image);
         Transform larger = new Transform(device);
         try {
-            larger.scale((float) scale, (float) scale);
+            larger.scale(SCALE, SCALE);
             gc.setTransform(larger);
             gc.setFont(canvas.getFont());
-            legend.paint(gc);
+            legend.paint(gc, WIDTH / SCALE, height / SCALE);
             gc.setTransform(null);
             return image.getImageData();
         } finally {

@@ -181,8 +181,8 @@ public final class StructureCanvas extends Canvas {
     }
 
     /** The present picture in another size, drawn anew with smooth edges. */
-    Raster still(int width, int height) {
-        RenderOptions larger = options.copy().theme(theme()).scale(options.scale() * width / raster.width());
+    Raster still(int width, int height, double scale) {
+        RenderOptions larger = options.copy().theme(theme()).scale(scale);
         return StillImage.render(drawing.scene(), camera, deformation, factor, larger, width, height);
     }
 

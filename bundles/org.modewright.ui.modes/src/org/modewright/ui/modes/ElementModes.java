@@ -2,13 +2,16 @@ package org.modewright.ui.modes;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import java.util.function.IntConsumer;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Spinner;
 import org.eclipse.swt.widgets.Table;
@@ -23,6 +26,11 @@ import org.modewright.ui.widgets.Numbers;
 
 /** The modes in which the selected elements hold more than a chosen share of the strain or kinetic energy. */
 final class ElementModes {
+
+    private static final int WORDS = 4;
+    private static final int LEAST_WORDS = 80;
+    private static final int MARGIN = 12;
+    private static final int INDENT = 8;
 
     private final Composite body;
     private String sentence = "";
@@ -40,10 +48,14 @@ final class ElementModes {
     ElementModes(Composite parent, IntConsumer whenPicked, Runnable whenCounted) {
         body = new Composite(parent, SWT.NONE);
         GridLayout layout = new GridLayout(3, false);
-        layout.marginWidth = 8;
+        layout.marginWidth = 0;
         layout.marginHeight = 4;
         body.setLayout(layout);
-        new Label(body, SWT.NONE).setText(Messages.Dominance_atLeast);
+        Label atLeast = new Label(body, SWT.NONE);
+        atLeast.setText(Messages.Dominance_atLeast);
+        GridData indented = new GridData();
+        indented.horizontalIndent = INDENT;
+        atLeast.setLayoutData(indented);
         least = new Spinner(body, SWT.BORDER);
         least.setValues(50, 1, 1000, 1, 10, 50);
         least.setData(UiIds.WIDGET_ID, "dominance.least");
@@ -56,11 +68,13 @@ final class ElementModes {
         table.setHeaderVisible(true);
         table.setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true, 3, 1));
         table.setData(UiIds.WIDGET_ID, "dominance.modes");
-        column(SWT.RIGHT, Messages.Column_number, 56);
-        column(SWT.RIGHT, Messages.Column_period, 64);
-        column(SWT.RIGHT, Messages.Dominance_strainShort, 88);
-        column(SWT.RIGHT, Messages.Dominance_kineticShort, 88);
-        column(SWT.LEFT, Messages.Column_character, 200);
+        column(SWT.RIGHT, Messages.Column_number, 48);
+        column(SWT.RIGHT, Messages.Column_period, 56);
+        column(SWT.RIGHT, Messages.Dominance_strainShort, 76);
+        column(SWT.RIGHT, Messages.Dominance_kineticShort, 80);
+        column(SWT.LEFT, Messages.Column_character, LEAST_WORDS);
+        table.addListener(SWT.Resize, event -> fitWords());
+        table.addListener(SWT.MouseMove, this::explain);
         table.addListener(SWT.Selection, event -> pick(whenPicked));
     }
 
@@ -95,10 +109,33 @@ final class ElementModes {
         double share = least.getSelection() / 1000.0;
         shares = new Dominance(result).modesOf(elementIds, share);
         sentence = DominanceSentence.modesOf(result, elementIds, share, shares);
+        int words = table.getColumn(WORDS).getWidth() - MARGIN;
         for (ModeShare row : shares) {
             Mode mode = result.modes().get(row.mode());
             new TableItem(table, SWT.NONE).setText(new String[] {Integer.toString(mode.number()), Numbers.significant(mode.period()),
-                Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()), mode.character().text()});
+                Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()),
+                TextFit.shortened(table, mode.character().text(), words)});
+        }
+    }
+
+    /** The column of words takes the room that the numbers leave. */
+    private void fitWords() {
+        int room = table.getClientArea().width;
+        for (int i = 0; i < WORDS; i++) {
+            room -= table.getColumn(i).getWidth();
+        }
+        int width = Math.max(LEAST_WORDS, room);
+        if (width != table.getColumn(WORDS).getWidth()) {
+            table.getColumn(WORDS).setWidth(width);
+            refresh();
+        }
+    }
+
+    private void explain(Event event) {
+        TableItem item = table.getItem(new Point(event.x, event.y));
+        String tip = item == null ? null : result.modes().get(shares.get(table.indexOf(item)).mode()).character().text();
+        if (!Objects.equals(tip, table.getToolTipText())) {
+            table.setToolTipText(tip);
         }
     }
 

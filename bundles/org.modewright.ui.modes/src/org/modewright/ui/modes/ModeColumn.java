@@ -9,11 +9,11 @@ import org.modewright.ui.widgets.Numbers;
 /** A column of the table of modes: what it is called, what it shows, what is copied and how it sorts. */
 public enum ModeColumn {
 
-    NUMBER(null, true, 64), PERIOD(null, true, 64), FREQUENCY(null, true, 64),
-    MASS_X(Direction.X, true, 60), MASS_Y(Direction.Y, true, 60), MASS_Z(Direction.Z, true, 60),
-    RUNNING_X(Direction.X, true, 64), RUNNING_Y(Direction.Y, true, 64), RUNNING_Z(Direction.Z, false, 64),
+    NUMBER(null, true, 66), PERIOD(null, true, 60), FREQUENCY(null, true, 60),
+    MASS_X(Direction.X, true, 52), MASS_Y(Direction.Y, true, 52), MASS_Z(Direction.Z, true, 52),
+    RUNNING_X(Direction.X, true, 60), RUNNING_Y(Direction.Y, true, 60), RUNNING_Z(Direction.Z, false, 60),
     MASS_RX(Direction.RX, false, 88), MASS_RY(Direction.RY, false, 88), MASS_RZ(Direction.RZ, false, 88),
-    CHARACTER(null, true, 120), SPREAD(null, true, 64), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100);
+    CHARACTER(null, true, 96), SPREAD(null, false, 64), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100);
 
     private final Direction direction;
     private final boolean shownAtFirst;

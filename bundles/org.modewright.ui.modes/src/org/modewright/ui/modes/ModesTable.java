@@ -29,8 +29,7 @@ final class ModesTable {
 
     private static final int BAR_HEIGHT = 3;
     private static final int CELL_MARGIN = 4;
-    private static final int HEADER_ROOM = 28;
-    private static final int WIDEST = 400;
+    private static final int HEADER_ROOM = 24;
 
     private final Table table;
     private final Set<ModeColumn> shown = EnumSet.noneOf(ModeColumn.class);
@@ -48,6 +47,7 @@ final class ModesTable {
         table.addListener(SWT.PaintItem, this::paintBar);
         table.addListener(SWT.Selection, event -> notifySelection(whenSelected));
         table.addListener(SWT.MouseMove, this::explain);
+        table.addListener(SWT.Resize, event -> fitWords());
         for (ModeColumn column : ModeColumn.values()) {
             if (column.isShownAtFirst()) {
                 shown.add(column);
@@ -77,9 +77,6 @@ final class ModesTable {
 
     void setRows(ModeRows newRows) {
         rows = newRows;
-        for (TableColumn column : table.getColumns()) {
-            column.setWidth(widthOf((ModeColumn) column.getData()));
-        }
         refresh();
     }
 
@@ -143,6 +140,7 @@ final class ModesTable {
                 addColumn(column);
             }
             showSort();
+            fitWords();
         } finally {
             table.setRedraw(true);
         }
@@ -156,21 +154,37 @@ final class ModesTable {
         widget.setMoveable(true);
         widget.setWidth(widthOf(column));
         widget.addListener(SWT.Selection, event -> sortBy(column));
+        if (!column.isNumeric()) {
+            widget.addListener(SWT.Resize, event -> table.clearAll());
+        }
     }
 
-    /** Wide enough for the header in the platform's font, with room for the sign of the sorted column, and for the longest words. */
+    /** Wide enough for the header in the platform's font, with room for the sign of the sorted column. */
     private int widthOf(ModeColumn column) {
         GC gc = new GC(table);
         try {
-            int width = Math.max(column.width(), gc.textExtent(column.header()).x + HEADER_ROOM);
-            return column.isNumeric() || rows == null ? width : Math.min(WIDEST, Math.max(width, longest(gc, column) + 4 * CELL_MARGIN));
+            return Math.max(column.width(), gc.textExtent(column.header()).x + HEADER_ROOM);
         } finally {
             gc.dispose();
         }
     }
 
-    private int longest(GC gc, ModeColumn column) {
-        return IntStream.range(0, rows.count()).map(mode -> gc.textExtent(column.text(rows, mode)).x).max().orElse(0);
+    /** The column of words takes the room that the numbers leave. */
+    private void fitWords() {
+        int room = table.getClientArea().width;
+        TableColumn words = null;
+        for (TableColumn column : table.getColumns()) {
+            if (column.getData() == ModeColumn.CHARACTER) {
+                words = column;
+            } else {
+                room -= column.getWidth();
+            }
+        }
+        int width = Math.max(ModeColumn.CHARACTER.width(), room);
+        if (words != null && width != words.getWidth()) {
+            words.setWidth(width);
+            table.clearAll();
+        }
     }
 
     private void sortBy(ModeColumn column) {
@@ -224,7 +238,9 @@ final class ModesTable {
         }
         TableColumn[] columns = table.getColumns();
         for (int i = 0; i < columns.length; i++) {
-            item.setText(i, ((ModeColumn) columns[i].getData()).text(rows, order[row]));
+            ModeColumn column = (ModeColumn) columns[i].getData();
+            String text = column.text(rows, order[row]);
+            item.setText(i, column.isNumeric() ? text : TextFit.shortened(table, text, columns[i].getWidth() - 3 * CELL_MARGIN));
         }
     }
 

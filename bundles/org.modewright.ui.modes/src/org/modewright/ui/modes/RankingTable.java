@@ -111,7 +111,10 @@ final class RankingTable {
         int side = Math.max(LEAST_SIDE, (room - running) * 30 / 100);
         int name = Math.max(LEAST_NAME, room - 2 * side - running);
         setWidth(STRAIN, side);
-        setWidth(NAME, name);
+        if (table.getColumn(NAME).getWidth() != name) {
+            table.getColumn(NAME).setWidth(name);
+            table.clearAll();
+        }
         setWidth(KINETIC, side);
         setWidth(RUNNING, running);
     }
@@ -134,7 +137,8 @@ final class RankingTable {
             return;
         }
         DominanceRow row = rows.get(event.index);
-        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), label(row), Numbers.percentNumber(row.kinetic()),
+        String name = TextFit.shortened(table, label(row), table.getColumn(NAME).getWidth() - 3 * MARGIN);
+        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), name, Numbers.percentNumber(row.kinetic()),
             Numbers.percentNumber(row.running())});
     }
 

@@ -32,7 +32,7 @@ final class StaircasePlot extends Canvas {
 
     private static final int GAP = 4;
     private static final int COLUMN_WIDTH = 16;
-    private static final int COLUMN_GAP = 16;
+    private static final int COLUMN_GAP = 20;
     private static final int LETTERS = 16;
     private static final int KEY_LINE = 20;
     private static final int LINES_PER_STEP = 2;
