@@ -60,7 +60,7 @@ final class MemberChecks {
     private void checkRepeated(Member member, EAttribute feature, List<Component> released) {
         if (released.size() != Set.copyOf(released).size()) {
             defects.warning("release-repeated", member, feature,
-                    "The " + feature.getName() + " of " + Names.describe(member) + " names a component twice.", "Remove the repetition.");
+                    "The " + Names.describe(feature) + " of " + Names.describe(member) + " name a component twice.", "Remove the repetition.");
         }
     }
 

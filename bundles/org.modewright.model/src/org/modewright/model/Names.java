@@ -9,6 +9,7 @@ import java.util.Set;
 import org.eclipse.emf.common.util.TreeIterator;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EStructuralFeature;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructurePackage;
@@ -33,6 +34,22 @@ public final class Names {
             Map.entry(StructurePackage.Literals.RIGID_LINK, "Link "),
             Map.entry(StructurePackage.Literals.MULTI_POINT_TIE, "Tie "),
             Map.entry(StructurePackage.Literals.LOAD_PATTERN, "Load "));
+
+    /** Features whose names in the file are too short for a sentence. */
+    private static final Map<EStructuralFeature, String> FEATURES = Map.ofEntries(
+            Map.entry(StructurePackage.Literals.MATERIAL__YOUNG, "Young's modulus"),
+            Map.entry(StructurePackage.Literals.MATERIAL__POISSON, "Poisson's ratio"),
+            Map.entry(StructurePackage.Literals.MATERIAL__SHEAR, "shear modulus"),
+            Map.entry(StructurePackage.Literals.FRAME_SECTION__IY, "second moment iy"),
+            Map.entry(StructurePackage.Literals.FRAME_SECTION__IZ, "second moment iz"),
+            Map.entry(StructurePackage.Literals.FRAME_SECTION__TORSION, "torsion constant"),
+            Map.entry(StructurePackage.Literals.MEMBER__START_FREE, "releases at the start"),
+            Map.entry(StructurePackage.Literals.MEMBER__END_FREE, "releases at the end"),
+            Map.entry(StructurePackage.Literals.MEMBER__START_RIGID, "rigid zone at the start"),
+            Map.entry(StructurePackage.Literals.MEMBER__END_RIGID, "rigid zone at the end"),
+            Map.entry(StructurePackage.Literals.ANALYSIS_SETTINGS__MODES, "number of modes"),
+            Map.entry(StructurePackage.Literals.ANALYSIS_SETTINGS__BELOW, "frequency limit"),
+            Map.entry(StructurePackage.Literals.AUDIT_SETTINGS__COINCIDENCE, "distance of coincident nodes"));
 
     private final Map<EClass, Set<String>> taken = new HashMap<>();
     private final Map<String, Integer> lastTried = new HashMap<>();
@@ -112,10 +129,19 @@ public final class Names {
         return owner == null ? "a " + kind : "the " + kind + " of " + describe(owner);
     }
 
+    /**
+     * @param feature a feature of an object of a model
+     * @return how sentences call it: "Young's modulus", "shear area y"
+     */
+    static String describe(EStructuralFeature feature) {
+        return FEATURES.getOrDefault(feature, words(feature.getName()));
+    }
+
     private static String kind(EClass kind) {
-        if (kind == StructurePackage.Literals.MULTI_POINT_TIE) {
-            return "tie";
-        }
-        return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
+        return kind == StructurePackage.Literals.MULTI_POINT_TIE ? "tie" : words(kind.getName());
+    }
+
+    private static String words(String camelCase) {
+        return camelCase.replaceAll("(?<=.)(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 }

@@ -83,7 +83,8 @@ final class NumberChecks {
     }
 
     private static String subject(EObject object, EAttribute attribute, double value) {
-        return "The " + attribute.getName() + " of " + Names.describe(object) + " is " + value;
+        String quantity = Names.describe(attribute);
+        return (Character.isUpperCase(quantity.charAt(0)) ? "" : "The ") + quantity + " of " + Names.describe(object) + " is " + value;
     }
 
     private static String positiveRemedy(EAttribute attribute) {

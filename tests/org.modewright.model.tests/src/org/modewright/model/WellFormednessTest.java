@@ -8,6 +8,7 @@ import static org.modewright.model.Severity.ERROR;
 import static org.modewright.model.Severity.INFO;
 import static org.modewright.model.Severity.WARNING;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
@@ -216,6 +217,18 @@ class WellFormednessTest {
         Set<String> covered = new TreeSet<>(cases().stream().map(Case::id).toList());
         covered.add("model-empty");
         assertEquals(new TreeSet<>(WellFormedness.checks()), covered);
+    }
+
+    @Test
+    void quantitiesAreCalledByTheirNames() {
+        StructuralModel model = Fixtures.sound();
+        model.getMaterials().get(0).setYoung(0);
+        model.getFrameSections().get(0).setShearAreaY(-1);
+        model.getMembers().get(0).setBendingYFactor(-2);
+        assertEquals(List.of("Young's modulus of material Steel is 0.0; it must be positive.",
+                "The shear area y of frame section Post is -1.0; it must not be negative.",
+                "The bending y factor of member M1 is -2.0; it must not be negative."),
+                WellFormedness.check(model).stream().map(Defect::text).sorted(Comparator.reverseOrder()).toList());
     }
 
     /** (10 kN - 110 kN) times the factor 0.3 over 9.80665 m/s2 is -3.059 t. */
