@@ -127,7 +127,8 @@ final class ModewrightActionBarAdvisor extends ActionBarAdvisor {
     }
 
     private CommandContributionItem command(String id, String label) {
-        CommandContributionItemParameter parameter = new CommandContributionItemParameter(window, id, id, CommandContributionItem.STYLE_PUSH);
+        CommandContributionItemParameter parameter = new CommandContributionItemParameter(window, id, id,
+                CommandContributionItem.STYLE_PUSH);
         parameter.label = label;
         return new CommandContributionItem(parameter);
     }

@@ -105,7 +105,8 @@ public final class AuditJob extends Job {
         } catch (CancelledException | OperationCanceledException cancelled) {
             return new Outcome(null, null, Status.CANCEL_STATUS);
         } catch (OutOfMemoryError exhausted) {
-            return failed("The run needs more memory than it was given. Ask for fewer modes, or start with a larger memory limit.", exhausted);
+            return failed("The run needs more memory than it was given. Ask for fewer modes, or start with a larger memory limit.",
+                    exhausted);
         } catch (RulePackException | IOException fault) {
             return failed(fault.getMessage(), null);
         } catch (RuntimeException fault) {

@@ -33,7 +33,8 @@ public final class ModelChecks {
     }
 
     private static Finding finding(Defect defect) {
-        return new Finding(defect.id(), Severity.valueOf(defect.severity().name()), objects(defect.object()), defect.text(), defect.remedy());
+        Severity severity = Severity.valueOf(defect.severity().name());
+        return new Finding(defect.id(), severity, objects(defect.object()), defect.text(), defect.remedy());
     }
 
     private static List<ObjectRef> objects(EObject object) {

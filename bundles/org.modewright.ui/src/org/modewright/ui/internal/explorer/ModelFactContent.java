@@ -55,7 +55,8 @@ public final class ModelFactContent implements ITreeContentProvider, RunRegistry
         if (facts == null || facts.stamp() != file.getModificationStamp()) {
             read(file);
         }
-        return facts == null ? new Object[] {new ModelFact(file, 0, Messages.Explorer_reading, Images.INFORMATION)} : facts.facts().toArray();
+        List<ModelFact> shown = facts == null ? List.of(new ModelFact(file, 0, Messages.Explorer_reading, Images.INFORMATION)) : facts.facts();
+        return shown.toArray();
     }
 
     @Override

@@ -86,7 +86,8 @@ final class PackagePreview extends Composite {
 
     private static List<Count> counts(StructuralModel model) {
         return StructurePackage.Literals.STRUCTURAL_MODEL.getEAllContainments().stream().filter(EReference::isMany)
-                .map(kind -> new Count(words(kind.getName()), ((List<?>) model.eGet(kind)).size())).filter(count -> count.number() > 0).toList();
+                .map(kind -> new Count(words(kind.getName()), ((List<?>) model.eGet(kind)).size()))
+                .filter(count -> count.number() > 0).toList();
     }
 
     /** "rigidFloors" as "Rigid floors". */
