@@ -30,20 +30,21 @@ need_maven() {
     [ ! -f "$mvn" ] || return 0
     version=$(mvn -B -version 2>/dev/null | sed -n 's/.*Apache Maven 3\.\([0-9]*\)\..*/\1/p')
     if [ -n "$version" ] && [ "$version" -ge $maven_minor_wanted ]; then
-        mvn=mvn
+        mvn=$(command -v mvn)
         return 0
     fi
+    mkdir -p "$work" "$cache.new.$$"
     # shellcheck disable=SC2086
-    (cd / && mvn -B -q ${MAVEN_ARGS:-} org.apache.maven.plugins:maven-dependency-plugin:3.8.1:unpack \
-        -Dartifact=org.apache.maven:apache-maven:$maven_version:zip:bin -DoutputDirectory="$cache.new.$$") >&2 \
-        || fail "Maven $maven_version could not be fetched with $(command -v mvn); the build needs 3.9 or newer."
+    (cd "$cache.new.$$" && mvn -B -q ${MAVEN_ARGS:-} org.apache.maven.plugins:maven-dependency-plugin:3.8.1:unpack \
+        -Dartifact=org.apache.maven:apache-maven:$maven_version:zip:bin -DoutputDirectory=.) >"$work/maven.log" 2>&1 \
+        || fail "Maven $maven_version could not be fetched with $(command -v mvn); the build needs 3.9 or newer. See $work/maven.log"
     mkdir -p "$cache"
     mv "$cache.new.$$/apache-maven-$maven_version" "$cache/" 2>/dev/null || [ -f "$mvn" ]
     rm -rf "$cache.new.$$"
 }
 
 run_maven() {
-    (cd "$root" && sh "$mvn" -B "$@")
+    (cd "$root" && "$mvn" -B "$@")
 }
 
 # Prints a hash of every file in the given files and folders of the repository that is not a product of the build.
