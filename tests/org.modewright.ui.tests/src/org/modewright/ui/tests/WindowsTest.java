@@ -44,4 +44,23 @@ class WindowsTest {
             workbench.ui().run(other::close);
         }
     }
+
+    @Test
+    void commandsFollowTheActiveWindow(Workbench workbench) {
+        workbench.openSample();
+        IWorkbenchWindow first = workbench.ask(() -> PlatformUI.getWorkbench().getActiveWorkbenchWindow());
+        workbench.ui().waitUntil("the run command to be enabled", () -> workbench.isEnabled(UiIds.RUN_COMMAND));
+        IWorkbenchWindow other = workbench.ask(() -> PlatformUI.getWorkbench().openWorkbenchWindow(UiIds.PERSPECTIVE,
+                ResourcesPlugin.getWorkspace().getRoot()));
+        try {
+            workbench.ui().run(() -> other.getShell().forceActive());
+            workbench.ui().waitUntil("the second window without a model", () -> PlatformUI.getWorkbench().getActiveWorkbenchWindow() == other
+                    && !workbench.isEnabled(UiIds.RUN_COMMAND));
+            workbench.ui().run(() -> first.getShell().forceActive());
+            workbench.ui().waitUntil("the first window with its model", () -> PlatformUI.getWorkbench().getActiveWorkbenchWindow() == first
+                    && workbench.isEnabled(UiIds.RUN_COMMAND));
+        } finally {
+            workbench.ui().run(other::close);
+        }
+    }
 }

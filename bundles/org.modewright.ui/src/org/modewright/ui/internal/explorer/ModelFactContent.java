@@ -55,8 +55,8 @@ public final class ModelFactContent implements ITreeContentProvider, RunRegistry
         if (facts == null || facts.stamp() != file.getModificationStamp()) {
             read(file);
         }
-        List<ModelFact> shown = facts == null ? List.of(new ModelFact(file, 0, Messages.Explorer_reading, Images.INFORMATION)) : facts.facts();
-        return shown.toArray();
+        List<ModelFact> reading = List.of(new ModelFact(file, 0, Messages.Explorer_reading, Images.INFORMATION));
+        return (facts == null ? reading : facts.facts()).toArray();
     }
 
     @Override

@@ -22,12 +22,12 @@ public final class SessionServiceFactory extends AbstractServiceFactory {
 
     private WindowAuditSession session(IWorkbenchWindow window) {
         if (sessions.isEmpty()) {
-            PlatformUI.getWorkbench().addWindowListener(new Closing());
+            PlatformUI.getWorkbench().addWindowListener(new Windows());
         }
         return sessions.computeIfAbsent(window, WindowAuditSession::new);
     }
 
-    private final class Closing implements IWindowListener {
+    private final class Windows implements IWindowListener {
 
         @Override
         public void windowClosed(IWorkbenchWindow window) {
@@ -42,17 +42,20 @@ public final class SessionServiceFactory extends AbstractServiceFactory {
 
         @Override
         public void windowActivated(IWorkbenchWindow window) {
-            // Only closing matters.
+            WindowAuditSession session = sessions.get(window);
+            if (session != null) {
+                session.updateCommands();
+            }
         }
 
         @Override
         public void windowDeactivated(IWorkbenchWindow window) {
-            // Only closing matters.
+            // Only activating and closing matter.
         }
 
         @Override
         public void windowOpened(IWorkbenchWindow window) {
-            // Only closing matters.
+            // Only activating and closing matter.
         }
     }
 }

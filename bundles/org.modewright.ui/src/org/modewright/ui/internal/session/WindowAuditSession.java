@@ -274,7 +274,8 @@ final class WindowAuditSession implements AuditSession {
         }
     }
 
-    private void updateCommands() {
+    /** Tells the commands what this window allows, if it is the active one. */
+    void updateCommands() {
         boolean active = window.getWorkbench().getActiveWorkbenchWindow() == window;
         ISourceProvider source = window.getService(ISourceProviderService.class).getSourceProvider("org.modewright.ui.canRun");
         if (active && source instanceof SessionSource session) {
