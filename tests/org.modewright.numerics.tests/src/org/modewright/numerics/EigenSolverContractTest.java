@@ -477,4 +477,62 @@ class EigenSolverContractTest {
         EigenProblem problem = new EigenProblem(Pencils.diagonal(2.0, 1.0), Pencils.diagonal(1.0, -1.0));
         assertThrows(IllegalArgumentException.class, () -> solver.open(problem, Progress.NONE));
     }
+
+    /**
+     * A lever of round-off makes a stiff spring resist a motion by 1e-34 of its stiffness: the matrix is positive definite, but the other
+     * eigenvalues must not drown beside that of the motion, and it counts as zero.
+     */
+    @ParameterizedTest
+    @MethodSource("solvers")
+    void aStiffnessOfRoundOffSpoilsNoOtherMode(EigenSolver solver) {
+        int n = 60;
+        double spring = 1e7;
+        double mass = 1000;
+        SymmetricMatrix.Builder k = SymmetricMatrix.builder(n + 1);
+        SymmetricMatrix.Builder m = SymmetricMatrix.builder(n + 1);
+        for (int i = 0; i < n; i++) {
+            k.add(i, i, i + 1 < n ? 2 * spring : spring);
+            m.add(i, i, mass);
+            if (i > 0) {
+                k.add(i, i - 1, -spring);
+            }
+        }
+        double stiff = 1e9;
+        double lever = 1e-17;
+        k.add(n - 1, n - 1, stiff).add(n, n - 1, stiff * lever).add(n, n, stiff * lever * lever);
+        m.add(n, n, 500);
+        EigenPairs pairs = solve(solver, new EigenProblem(k.build(), m.build()), EigenRequest.lowest(6));
+        assertEquals(6, pairs.count());
+        assertEquals(0.0, pairs.values()[0], 0.0);
+        // The springs in series, the last mass all but held: a spring of 1e9 beside one of 1e7 shifts the values by less than 1e-3.
+        for (int j = 1; j < 6; j++) {
+            double held = 4 * spring / mass * Math.pow(Math.sin(j * Math.PI / (2.0 * n)), 2);
+            assertEquals(held, pairs.values()[j], 1e-3 * held);
+        }
+    }
+
+    /** The same, but the round-off makes the matrix indefinite, as the sum of rounded products does. */
+    @ParameterizedTest
+    @MethodSource("solvers")
+    void aNegativeStiffnessOfRoundOffSpoilsNoOtherMode(EigenSolver solver) {
+        int n = 60;
+        SymmetricMatrix.Builder k = SymmetricMatrix.builder(n + 1);
+        SymmetricMatrix.Builder m = SymmetricMatrix.builder(n + 1);
+        for (int i = 0; i < n; i++) {
+            k.add(i, i, i + 1 < n ? 2e7 : 1e7);
+            m.add(i, i, 1000);
+            if (i > 0) {
+                k.add(i, i - 1, -1e7);
+            }
+        }
+        k.add(n, n - 1, 1e-8).add(n, n, 1e-25);
+        m.add(n, n, 500);
+        EigenPairs pairs = solve(solver, new EigenProblem(k.build(), m.build()), EigenRequest.lowest(6));
+        assertEquals(6, pairs.count());
+        assertEquals(0.0, pairs.values()[0], 1e-15);
+        for (int j = 1; j < 6; j++) {
+            double chain = 4e4 * Math.pow(Math.sin((2 * j - 1) * Math.PI / (2.0 * (2 * n + 1))), 2);
+            assertEquals(chain, pairs.values()[j], 1e-9 * chain);
+        }
+    }
 }

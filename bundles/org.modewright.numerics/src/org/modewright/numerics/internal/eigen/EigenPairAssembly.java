@@ -47,7 +47,7 @@ final class EigenPairAssembly {
      */
     private double[] cleanZeros(double[] values, double[][] vectors) {
         double[] cleaned = values.clone();
-        if (shifted.stiffnessZeros() == 0) {
+        if (!shifted.isNearlySingular()) {
             return cleaned;
         }
         for (int i = 0; i < cleaned.length; i++) {

@@ -5,6 +5,7 @@ import java.util.Arrays;
 import org.modewright.numerics.EigenPairs;
 import org.modewright.numerics.EigenRequest;
 import org.modewright.numerics.Progress;
+import org.modewright.numerics.SpectrumCertificate;
 
 /**
  * Block Lanczos on A = (K - &sigma;M)<sup>-1</sup>M. After convergence an inertia count just above the last value tells whether values
@@ -23,6 +24,7 @@ final class LanczosEigenSession extends CertifiedSession {
     private final LanczosBasis basis;
     private EigenPairs known;
     private double nextEstimate = Double.POSITIVE_INFINITY;
+    private int demanded;
 
     LanczosEigenSession(ShiftedProblem shifted, int rank) {
         super(shifted);
@@ -59,7 +61,17 @@ final class LanczosEigenSession extends CertifiedSession {
         return answer(Math.min(request.count(), limit), request.below());
     }
 
+    /** Never complete where the iteration ended with fewer pairs than were asked for. */
+    @Override
+    public SpectrumCertificate certify(EigenPairs pairs, Progress progress) {
+        SpectrumCertificate certificate = super.certify(pairs, progress);
+        boolean cutShort = known.count() < demanded && pairs.count() == known.count();
+        return cutShort ? new SpectrumCertificate(false, certificate.shift(), certificate.counted(), certificate.found(),
+                certificate.worstResidual(), certificate.worstOrthogonality()) : certificate;
+    }
+
     private void extend(int limit, Progress progress) {
+        demanded = Math.max(demanded, limit);
         int wanted = limit;
         for (int hunt = 0; ; ) {
             RitzPairs ritz = converge(wanted, limit, progress);

@@ -22,6 +22,11 @@ final class ShiftedProblem {
     private static final int SHIFT_ATTEMPTS = 60;
     private static final int NAMED_MOTIONS = 100;
     private static final int REMOVED_MOTIONS = 200;
+    /** Eigenvalues below this share of the largest ratio of the diagonals may be round-off of the stiffness. */
+    private static final double ROUND_OFF = 1e-15;
+    /** Flexibilities below this share of one before cannot be found beside it in double precision. */
+    private static final double GAP = 1e-11;
+    private static final int ROUND_OFF_MOTIONS = 20;
     private static final long SEED = 4711L;
 
     private final EigenProblem problem;
@@ -31,6 +36,7 @@ final class ShiftedProblem {
     private Factorisation factorisation;
     private int negativeInfinities;
     private int stiffnessZeros;
+    private boolean hasRoundOffMotions;
 
     private ShiftedProblem(EigenProblem problem, Progress progress) {
         this.problem = problem;
@@ -61,11 +67,13 @@ final class ShiftedProblem {
         if (inertia.negative() > 0) {
             negativeInfinities = countNegativeInfinities(progress);
         }
-        if (stiffnessZeros == 0 && inertia.negative() == negativeInfinities) {
+        boolean definite = stiffnessZeros == 0 && inertia.negative() == negativeInfinities;
+        double scale = scale(unshifted, progress);
+        if (definite && !hasRoundOffMotions) {
             factorisation = unshifted;
             return;
         }
-        shift = -scale(unshifted, progress);
+        shift = -scale;
         for (int attempt = 0; attempt < SHIFT_ATTEMPTS; attempt++) {
             factorisation = factorise(shift, progress);
             Inertia shifted = factorisation.inertia();
@@ -122,16 +130,45 @@ final class ShiftedProblem {
 
     /**
      * Estimate of the smallest eigenvalue that is not zero, by power iteration with the flexibility of the structure held at its zero
-     * pivots, on the M-orthogonal complement of the motions without stiffness: loads in equilibrium deform it as if it were free. At most
-     * the largest ratio of the diagonals, which is all there is where nothing deforms.
+     * pivots, on the M-orthogonal complement of the motions without stiffness: loads in equilibrium deform it as if it were free. Motions
+     * whose stiffness is nothing but round-off of the matrix, yet no zero pivot, count among those without: a shift as small as their
+     * eigenvalue would leave no digits to the others. At most the largest ratio of the diagonals, which is all there is where nothing
+     * deforms.
      */
     private double scale(Factorisation held, Progress progress) {
         // So many mechanisms are no structure to be tuned for; they would fill the memory.
         double[][] motions = stiffnessZeros > REMOVED_MOTIONS ? new double[0][]
                 : massOrthonormal(factoriser.nullVectors(held), progress);
-        double[] x = new Random(SEED).doubles(problem.order(), -1.0, 1.0).toArray();
+        double largest = largestDiagonalRatio();
+        double[] x = start();
+        double flexibility = softest(held, motions, x, progress);
+        double next = flexibility;
+        for (int found = 0; next * largest > 1.0 / ROUND_OFF && found < ROUND_OFF_MOTIONS; found++) {
+            double before = next;
+            motions = Arrays.copyOf(motions, motions.length + 1);
+            motions[motions.length - 1] = x;
+            x = start();
+            next = softest(held, motions, x, progress);
+            if (next < GAP * before) {
+                hasRoundOffMotions = true;
+                flexibility = next;
+            }
+        }
+        return flexibility * largest > 1.0 ? 1.0 / flexibility : largest;
+    }
+
+    private double[] start() {
+        return new Random(SEED).doubles(problem.order(), -1.0, 1.0).toArray();
+    }
+
+    /**
+     * The largest flexibility on the M-orthogonal complement of some motions.
+     *
+     * @param x where to start; afterwards the motion of that flexibility, of M-norm 1, or 0 if nothing moves
+     */
+    private double softest(Factorisation held, double[][] motions, double[] x, Progress progress) {
         double flexibility = 0.0;
-        for (int iteration = 0; iteration < SCALE_ITERATIONS; iteration++) {
+        for (int iteration = 0; iteration <= SCALE_ITERATIONS; iteration++) {
             progress.checkCancelled();
             removeMotions(x, motions);
             double norm = Math.sqrt(Math.max(0.0, problem.mass().quadratic(x)));
@@ -139,15 +176,17 @@ final class ShiftedProblem {
                 break;
             }
             VectorMath.scale(x, 1.0 / norm);
+            if (iteration == SCALE_ITERATIONS) {
+                break;
+            }
             double[] next = problem.mass().multiply(x);
             double[] massTimesX = next.clone();
             held.solve(next);
             removeMotions(next, motions);
             flexibility = Math.abs(VectorMath.dot(massTimesX, next));
-            x = next;
+            System.arraycopy(next, 0, x, 0, x.length);
         }
-        double largest = largestDiagonalRatio();
-        return flexibility * largest > 1.0 ? 1.0 / flexibility : largest;
+        return flexibility;
     }
 
     private double[][] massOrthonormal(double[][] motions, Progress progress) {
@@ -216,9 +255,9 @@ final class ShiftedProblem {
         return factorisation;
     }
 
-    /** Zero pivots of K: at most so many eigenvalues are zero. */
-    int stiffnessZeros() {
-        return stiffnessZeros;
+    /** Whether K is singular, or so nearly that some eigenvalues are but round-off beside the others. */
+    boolean isNearlySingular() {
+        return stiffnessZeros > 0 || hasRoundOffMotions;
     }
 
     /** W &larr; (K - &sigma;M)<sup>-1</sup> M V. */
