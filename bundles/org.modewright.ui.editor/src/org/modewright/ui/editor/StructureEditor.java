@@ -86,6 +86,7 @@ public final class StructureEditor extends MultiPageEditorPart
     private boolean changedOutside;
     private boolean gone;
     private boolean asking;
+    private boolean reloading;
 
     @Override
     public void init(IEditorSite site, IEditorInput input) throws PartInitException {
@@ -162,8 +163,11 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     protected void pageChange(int newPageIndex) {
+        if (reloading) {
+            return;
+        }
         super.pageChange(newPageIndex);
-        pages.shown(newPageIndex, session.selection().elementIds());
+        pages.shown(newPageIndex, selectedIds());
         if (actions != null) {
             actions.update();
         }
@@ -422,15 +426,22 @@ public final class StructureEditor extends MultiPageEditorPart
 
     private void reload() {
         int active = getActivePage();
-        while (getPageCount() > 0) {
-            removePage(0);
+        reloading = true;
+        try {
+            while (getPageCount() > 0) {
+                removePage(getPageCount() - 1);
+            }
+            pages.clear();
+            adapterFactory.dispose();
+            watch.contentKnown();
+            load();
+            createPages();
+        } finally {
+            reloading = false;
         }
-        pages.clear();
-        adapterFactory.dispose();
-        watch.contentKnown();
-        load();
-        createPages();
-        setActivePage(Math.min(Math.max(0, active), getPageCount() - 1));
+        int shown = Math.min(Math.max(0, active), getPageCount() - 1);
+        setActivePage(shown);
+        pages.shown(shown, selectedIds());
         firePropertyChange(PROP_DIRTY);
         if (model != null) {
             forgetWhatIsGone();

@@ -3,7 +3,7 @@ package org.modewright.ui.editor.commands;
 import org.modewright.ui.editor.Messages;
 
 /** Three numbers on one line. */
-final class Triple {
+public final class Triple {
 
     private Triple() {
     }
@@ -13,7 +13,7 @@ final class Triple {
      *
      * @throws IllegalArgumentException if the text is not three finite numbers
      */
-    static double[] parse(String text) {
+    public static double[] parse(String text) {
         String[] words = text.strip().split("[\\s,;]+");
         if (words.length != 3) {
             throw new IllegalArgumentException(Messages.Act_triple);
@@ -38,7 +38,7 @@ final class Triple {
     }
 
     /** The numbers as text. */
-    static String text(double x, double y, double z) {
+    public static String text(double x, double y, double z) {
         return word(x) + " " + word(y) + " " + word(z);
     }
 
@@ -47,7 +47,7 @@ final class Triple {
     }
 
     /** Why a text is not three numbers; null if it is. */
-    static String fault(String text) {
+    public static String fault(String text) {
         try {
             parse(text);
             return null;

@@ -75,11 +75,11 @@ final class ObjectTable {
 
     /** Shows other objects with other columns. */
     void show(List<Field> newFields, List<? extends EObject> newObjects) {
-        editing.close();
         boolean sameColumns = labels(newFields).equals(labels(fields));
         fields = newFields;
         objects = newObjects;
         if (!sameColumns) {
+            editing.close();
             sortedBy = -1;
             column = 0;
             buildColumns();

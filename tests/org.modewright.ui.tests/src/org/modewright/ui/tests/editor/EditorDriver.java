@@ -2,6 +2,7 @@ package org.modewright.ui.tests.editor;
 
 import java.io.ByteArrayInputStream;
 import java.util.List;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IProject;
@@ -19,6 +20,9 @@ import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Shell;
 import org.eclipse.swt.widgets.Table;
 import org.eclipse.swt.widgets.Text;
+import org.eclipse.swt.widgets.ToolBar;
+import org.eclipse.swt.widgets.ToolItem;
+import org.modewright.model.Ids;
 import org.modewright.model.ModelFile;
 import org.modewright.model.ModelFileException;
 import org.modewright.model.structure.StructuralModel;
@@ -50,7 +54,7 @@ final class EditorDriver {
 
     /** Puts a model into a file of a project of its own. */
     IFile file(String name, StructuralModel model) throws CoreException, ModelFileException {
-        org.modewright.model.Ids.assignMissing(model);
+        Ids.assignMissing(model);
         return file(name, ModelFile.bytes(model));
     }
 
@@ -133,6 +137,33 @@ final class EditorDriver {
         return null;
     }
 
+    /** The item of a name in a tool bar that is shown. */
+    ToolItem tool(String id) {
+        return ask(() -> {
+            ToolItem[] found = new ToolItem[1];
+            for (Shell shell : workbench.ui().display().getShells()) {
+                collectTool(shell, id, found);
+            }
+            return found[0];
+        });
+    }
+
+    private static void collectTool(Composite scope, String id, ToolItem[] found) {
+        if (scope.isDisposed() || !scope.isVisible()) {
+            return;
+        }
+        if (scope instanceof ToolBar bar) {
+            for (ToolItem item : bar.getItems()) {
+                found[0] = id.equals(item.getData(UiIds.WIDGET_ID)) ? item : found[0];
+            }
+        }
+        for (Control child : scope.getChildren()) {
+            if (child instanceof Composite composite) {
+                collectTool(composite, id, found);
+            }
+        }
+    }
+
     /** Double-clicks a cell. */
     void openCell(String table, int row, int column) {
         Table widget = find(Table.class, table);
@@ -202,6 +233,6 @@ final class EditorDriver {
     }
 
     void select(List<String> ids) {
-        run(() -> workbench.session().select(workbench.session().selection().withElements(new java.util.HashSet<>(ids)), this));
+        run(() -> workbench.session().select(workbench.session().selection().withElements(Set.copyOf(ids)), this));
     }
 }
