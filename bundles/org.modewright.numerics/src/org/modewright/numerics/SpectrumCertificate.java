@@ -5,8 +5,8 @@ package org.modewright.numerics;
  * pencil has eigenvalues below the shift. The shift lies in a gap above the last eigenvalue, so a cluster is never split.
  *
  * @param complete whether counted equals found and the pairs are eigenpairs at all: orthogonality at most 1e-8, residuals
- *        at most 1e-6 or, for nearly singular K, at most the round-off 32 &epsilon; || |K||&phi;| || of K&phi;; never if the iteration ended with fewer
- *        pairs than were asked for
+ *        at most 1e-6 or, for nearly singular K, at most the round-off 32 &epsilon; || |K||&phi;| || of K&phi;; never if the
+ *        iteration ended with fewer pairs than were asked for
  * @param shift where the count was taken, in the units of the eigenvalue
  * @param counted eigenvalues below the shift by inertia
  * @param found eigenvalues below the shift that were computed: the pairs, and the rest of the last pair's cluster
