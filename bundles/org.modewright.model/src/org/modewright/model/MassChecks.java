@@ -40,7 +40,7 @@ final class MassChecks {
         for (Node node : model.getNodes()) {
             Weight weight = weights.get(node);
             if (weight != null && weight.sum < -ROUND_OFF * weight.amount) {
-                lacks.computeIfAbsent(weight.lightest(), pattern -> new Lack()).add(node, weight.sum);
+                lacks.computeIfAbsent(weight.lightest(), pattern -> new Lack()).add(node, weight);
             }
         }
         lacks.forEach(this::report);
@@ -50,52 +50,66 @@ final class MassChecks {
         for (GravityLoad load : pattern.getLoads()) {
             double value = pattern.getMassFactor() * load.getValue();
             if (load instanceof NodeLoad onNode) {
-                add(onNode.getNode(), pattern, value);
+                add(onNode.getNode(), load, value);
             } else if (load instanceof MemberLoad onMember) {
-                addMemberLoad(onMember.getMember(), pattern, value);
+                addMemberLoad(onMember, value);
             }
         }
     }
 
-    private void addMemberLoad(Member member, LoadPattern pattern, double perLength) {
+    private void addMemberLoad(MemberLoad load, double perLength) {
+        Member member = load.getMember();
         if (member != null && member.getStart() != null && member.getEnd() != null) {
             double half = 0.5 * perLength * Geometry.distance(Geometry.position(member.getStart()), Geometry.position(member.getEnd()));
-            add(member.getStart(), pattern, half);
-            add(member.getEnd(), pattern, half);
+            add(member.getStart(), load, half);
+            add(member.getEnd(), load, half);
         }
     }
 
-    private void add(Node node, LoadPattern pattern, double force) {
+    private void add(Node node, GravityLoad load, double force) {
         if (node != null && force != 0) {
-            weights.computeIfAbsent(node, key -> new Weight()).add(pattern, force);
+            weights.computeIfAbsent(node, key -> new Weight()).add(load, force);
         }
     }
 
     private void report(LoadPattern pattern, Lack lack) {
         String others = lack.nodes == 1 ? "" : "; so it is with " + (lack.nodes - 1) + " more";
-        double mass = lack.worst / Units.gravity(model);
-        defects.error("mass-negative", pattern, StructurePackage.Literals.LOAD_PATTERN__LOADS,
+        double mass = lack.worst.sum / Units.gravity(model);
+        defects.error("mass-negative", lack.worst.lowestLoad(pattern), StructurePackage.Literals.GRAVITY_LOAD__VALUE,
                 ReferenceChecks.sentenceStart(pattern) + " gives " + Names.describe(lack.node) + " a negative mass, "
                         + new BigDecimal(mass).round(THREE_FIGURES).toPlainString() + " " + Units.of(model).symbol(Quantity.MASS) + others
                         + ".",
                 "Gravity loads count downwards positive: turn the sign of its loads, or set its mass factor to 0.");
     }
 
-    /** What the patterns put on one node, in the model's unit of force. */
+    /** What the loads put on one node, in the model's unit of force. */
     private static final class Weight {
 
-        private final Map<LoadPattern, Double> byPattern = new LinkedHashMap<>();
+        private final Map<GravityLoad, Double> byLoad = new LinkedHashMap<>();
         private double sum;
         private double amount;
 
-        void add(LoadPattern pattern, double force) {
-            byPattern.merge(pattern, force, Double::sum);
+        void add(GravityLoad load, double force) {
+            byLoad.merge(load, force, Double::sum);
             sum += force;
             amount += Math.abs(force);
         }
 
+        /** The pattern that takes most away. */
         LoadPattern lightest() {
-            return byPattern.entrySet().stream().min(Map.Entry.comparingByValue()).orElseThrow().getKey();
+            Map<LoadPattern, Double> byPattern = new LinkedHashMap<>();
+            byLoad.forEach((load, force) -> byPattern.merge((LoadPattern) load.eContainer(), force, Double::sum));
+            return lowest(byPattern);
+        }
+
+        GravityLoad lowestLoad(LoadPattern pattern) {
+            Map<GravityLoad, Double> loads = new LinkedHashMap<>(byLoad);
+            loads.keySet().removeIf(load -> load.eContainer() != pattern);
+            return lowest(loads);
+        }
+
+        private static <T> T lowest(Map<T, Double> forces) {
+            return forces.entrySet().stream().min(Map.Entry.comparingByValue()).orElseThrow().getKey();
         }
     }
 
@@ -103,14 +117,14 @@ final class MassChecks {
     private static final class Lack {
 
         private Node node;
-        private double worst;
+        private Weight worst;
         private int nodes;
 
-        void add(Node candidate, double force) {
+        void add(Node candidate, Weight weight) {
             nodes++;
-            if (node == null || force < worst) {
+            if (node == null || weight.sum < worst.sum) {
                 node = candidate;
-                worst = force;
+                worst = weight;
             }
         }
     }

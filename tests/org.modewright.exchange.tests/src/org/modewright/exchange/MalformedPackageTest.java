@@ -86,6 +86,7 @@ class MalformedPackageTest {
                 fault("gravity_loads.csv", "dead,member,M2", "dead,panel,P1", 2, "kind", "panel", "not yet supported"),
                 fault("gravity_loads.csv", "dead,member,M2", "dead,beam,M2", 2, "kind", "beam", "not known"),
                 fault("gravity_loads.csv", "dead,member,M2", "self,member,M2", 2, "pattern", "self", "own mass"),
+                fault("gravity_loads.csv", "N3,40", "N3,-4e9", 3, "value", "-4e9", "negative mass"),
                 fault("mass_rule.csv", "live,0.3", "live,-0.3", 4, "factor", "-0.3", "0 or more"),
                 fault("mass_rule.csv", "live,0.3", "dead,0.3", 4, "pattern", "dead", "already"),
                 fault("datapackage.json", "\"kN-m-t\"", "\"kN-m-kg\"", 0, "structure/units", "kN-m-kg", "N-mm-t"),

@@ -233,12 +233,12 @@ class WellFormednessTest {
 
     /** (10 kN - 110 kN) times the factor 0.3 over 9.80665 m/s2 is -3.059 t. */
     @Test
-    void aNegativeMassNamesPatternAndNode() {
+    void aNegativeMassNamesPatternNodeAndLoad() {
         StructuralModel model = Fixtures.sound();
         nodeLoad(model, -110);
         Defect defect = WellFormedness.check(model).get(0);
         assertEquals("Load pattern Live gives node N6 a negative mass, -3.06 t.", defect.text());
-        assertSame(model.getLoadPatterns().get(0), defect.object());
+        assertSame(model.getLoadPatterns().get(0).getLoads().get(0), defect.object());
     }
 
     /** What counts is the sum of all patterns: one may take away what another brings, and one without a factor takes nothing. */
