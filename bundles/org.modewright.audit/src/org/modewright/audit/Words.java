@@ -3,21 +3,10 @@ package org.modewright.audit;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Lists of names in sentences. */
+/** Lists of numbers in sentences. */
 public final class Words {
 
-    private static final int NAMED = 5;
-
     private Words() {
-    }
-
-    /** "A", "A and B", "A, B and C"; beyond five "A, B, C, D, E and 7 more". */
-    public static String list(List<String> words) {
-        int count = words.size();
-        if (count > NAMED) {
-            return String.join(", ", words.subList(0, NAMED)) + " and " + (count - NAMED) + " more";
-        }
-        return count < 2 ? String.join("", words) : String.join(", ", words.subList(0, count - 1)) + " and " + words.get(count - 1);
     }
 
     /** Ascending numbers with their runs joined: "3–8", "3, 5 and 7–9". */

@@ -5,7 +5,6 @@ import java.util.Collections;
 import java.util.List;
 
 import org.modewright.fem.internal.AssemblyParts;
-import org.modewright.fem.internal.LooseParts;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SymmetricMatrix;
 
@@ -185,10 +184,5 @@ public final class Assembly {
     /** The motions that were dropped because they have neither stiffness nor mass. */
     public List<DroppedMotion> dropped() {
         return parts.dropped();
-    }
-
-    /** The parts of the structure, nodes joined by elements or constraints, that nothing holds to the ground; nodes by index. */
-    public List<List<Integer>> freeParts() {
-        return LooseParts.of(snapshot);
     }
 }

@@ -8,6 +8,7 @@ import java.util.stream.IntStream;
 import org.modewright.fem.FloorTie;
 import org.modewright.fem.LinearTie;
 import org.modewright.fem.LinkTie;
+import org.modewright.fem.NodeSets;
 import org.modewright.fem.Snapshot;
 import org.modewright.fem.SpringElement;
 import org.modewright.fem.StructuralElement;
@@ -19,7 +20,7 @@ import org.modewright.fem.SupportCondition;
  */
 public final class Connectivity {
 
-    private final int[] leader;
+    private final NodeSets sets;
     private final boolean[] used;
     private final boolean[] grounded;
     private final List<int[]> parts;
@@ -27,7 +28,7 @@ public final class Connectivity {
 
     private Connectivity(Snapshot snapshot) {
         int count = snapshot.nodes().size();
-        leader = IntStream.range(0, count).toArray();
+        sets = new NodeSets(count);
         used = new boolean[count];
         grounded = new boolean[count];
         join(snapshot);
@@ -77,23 +78,14 @@ public final class Connectivity {
     private void unite(int... nodes) {
         for (int node : nodes) {
             used[node] = true;
-            leader[find(node)] = find(nodes[0]);
+            sets.join(nodes[0], node);
         }
-    }
-
-    private int find(int node) {
-        int root = node;
-        while (leader[root] != root) {
-            leader[root] = leader[leader[root]];
-            root = leader[root];
-        }
-        return root;
     }
 
     private List<int[]> collect() {
         Map<Integer, List<Integer>> byLeader = new LinkedHashMap<>();
-        for (int node = 0; node < leader.length; node++) {
-            byLeader.computeIfAbsent(find(node), key -> new ArrayList<>()).add(node);
+        for (int node = 0; node < used.length; node++) {
+            byLeader.computeIfAbsent(sets.find(node), key -> new ArrayList<>()).add(node);
         }
         List<int[]> collected = new ArrayList<>();
         for (List<Integer> members : byLeader.values()) {

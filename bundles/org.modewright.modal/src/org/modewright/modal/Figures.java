@@ -3,10 +3,14 @@ package org.modewright.modal;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.List;
 import java.util.Locale;
 
-/** Numbers as sentences show them, with a decimal point whatever the user's language. */
+/** Numbers and lists as sentences show them, with a decimal point whatever the user's language. */
 public final class Figures {
+
+    /** So many names are read before a list is taken for a number. */
+    static final int NAMED = 5;
 
     private Figures() {
     }
@@ -40,6 +44,15 @@ public final class Figures {
     /** A share as a percentage with one decimal, "96.2 %". */
     public static String percent(double share) {
         return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+    }
+
+    /** "A", "A and B", "A, B and C"; beyond five "A, B, C, D, E and 7 more". */
+    public static String list(List<String> words) {
+        int count = words.size();
+        if (count > NAMED) {
+            return String.join(", ", words.subList(0, NAMED)) + " and " + (count - NAMED) + " more";
+        }
+        return count < 2 ? String.join("", words) : String.join(", ", words.subList(0, count - 1)) + " and " + words.get(count - 1);
     }
 
     /** A number of things: "1 mode", "3 modes". */

@@ -10,8 +10,10 @@ import org.modewright.fem.NodePoint;
 import org.modewright.fem.Snapshot;
 import org.modewright.fem.SpringElement;
 import org.modewright.numerics.EigenPairs;
+import org.modewright.numerics.Factorisation;
 import org.modewright.numerics.Factorisers;
 import org.modewright.numerics.Progress;
+import org.modewright.numerics.SymmetricMatrix;
 
 /**
  * Negative stiffness in shapes that carry no mass. It shows in no mode, because such shapes have no finite eigenvalue; the inertia of K
@@ -35,9 +37,11 @@ final class HiddenBuckling {
         if (anyNegative || assembly.freeDofs() == 0 || !mayBeIndefinite(assembly.snapshot())) {
             return Optional.empty();
         }
-        int negative = Factorisers.sparse(assembly.stiffness(), progress).factorise(assembly.stiffness(), null, 0, progress).inertia()
-                .negative();
-        return negative > 0 ? Optional.of(instability(negative)) : Optional.empty();
+        SymmetricMatrix stiffness = assembly.stiffness();
+        try (Factorisation factors = Factorisers.sparse(stiffness, progress).factorise(stiffness, null, 0, progress)) {
+            int negative = factors.inertia().negative();
+            return negative > 0 ? Optional.of(instability(negative)) : Optional.empty();
+        }
     }
 
     private static boolean mayBeIndefinite(Snapshot snapshot) {

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.modewright.modal.Structures.filled;
 
 import java.util.Arrays;
 import java.util.EnumSet;
@@ -22,12 +23,6 @@ import org.modewright.numerics.SymmetricMatrix;
 class ModalRunTest {
 
     private static final CaptureTarget NINETY_X = new CaptureTarget(0.9, EnumSet.of(Direction.X));
-
-    private static double[] filled(int count, double value) {
-        double[] values = new double[count];
-        Arrays.fill(values, value);
-        return values;
-    }
 
     private static Structures building(int storeys) {
         return Structures.chain(filled(storeys, 1000), filled(storeys, 1e6));

@@ -3,6 +3,7 @@ package org.modewright.modal;
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.modewright.modal.Structures.filled;
 
 import java.util.Arrays;
 import org.junit.jupiter.api.Test;
@@ -15,12 +16,6 @@ class ShearBuildingTest {
 
     /** Round-off of a dense eigensolution of a well-conditioned pencil, with two orders in hand. */
     private static final double EXACT = 1e-11;
-
-    private static double[] filled(int count, double value) {
-        double[] values = new double[count];
-        Arrays.fill(values, value);
-        return values;
-    }
 
     private static double[] omegas(ModalResult result) {
         return result.modes().stream().mapToDouble(mode -> 2 * Math.PI * mode.frequency()).toArray();

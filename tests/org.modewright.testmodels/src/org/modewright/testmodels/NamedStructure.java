@@ -141,6 +141,13 @@ public abstract class NamedStructure<S extends NamedStructure<S>> {
         return self();
     }
 
+    /** An array of equal values, as of the masses of a uniform building. */
+    public static double[] filled(int count, double value) {
+        double[] values = new double[count];
+        Arrays.fill(values, value);
+        return values;
+    }
+
     public static void free(Member member, boolean atStart, Component... components) {
         Parts.free(member, atStart, components);
     }

@@ -6,10 +6,10 @@ import org.modewright.audit.AuditContext;
 import org.modewright.audit.Finding;
 import org.modewright.audit.FindingDetector;
 import org.modewright.audit.Severity;
-import org.modewright.audit.Words;
 import org.modewright.fem.DroppedMotion;
 import org.modewright.modal.Connectivity;
 import org.modewright.modal.Direction;
+import org.modewright.modal.Figures;
 
 /** Motions that have neither stiffness nor mass, at nodes that are used. */
 final class DroppedMotions implements FindingDetector {
@@ -36,8 +36,8 @@ final class DroppedMotions implements FindingDetector {
         String subject = indices.length == 1 ? "node " : indices.length + " nodes: ";
         return List.of(new Finding(ID, Severity.INFO, Refs.nodes(indices, context.snapshot().nodes()),
                 (count == 1 ? "One motion has" : count + " motions have") + " neither stiffness nor mass and "
-                        + (count == 1 ? "is" : "are") + " left out (" + Words.list(directions.stream().map(Direction::label).toList())
-                        + ") at " + subject + Words.list(Refs.names(indices, context.snapshot().nodes())) + ".",
+                        + (count == 1 ? "is" : "are") + " left out (" + Figures.list(directions.stream().map(Direction::label).toList())
+                        + ") at " + subject + Figures.list(Refs.names(indices, context.snapshot().nodes())) + ".",
                 "Nothing, if these are pin joints, which need not turn; otherwise connect the nodes in these directions."));
     }
 }

@@ -7,11 +7,11 @@ import java.util.Set;
 import org.modewright.audit.Finding;
 import org.modewright.audit.ObjectRef;
 import org.modewright.audit.Severity;
-import org.modewright.audit.Words;
 import org.modewright.fem.NodePoint;
 import org.modewright.fem.Snapshot;
 import org.modewright.fem.StructuralElement;
 import org.modewright.modal.Connectivity;
+import org.modewright.modal.Figures;
 
 /** Parts with elements that no support, spring to ground or other part holds. */
 public final class LooseParts {
@@ -50,7 +50,7 @@ public final class LooseParts {
         objects.addAll(Refs.nodes(nodes, points));
         boolean whole = nodes.length == points.size();
         String subject = (whole ? "The whole structure of " : "A part of ") + nodes.length + " nodes ("
-                + Words.list(Refs.names(nodes, points)) + ")";
+                + Figures.list(Refs.names(nodes, points)) + ")";
         return new Finding(ID, Severity.ERROR, objects, subject + " is not connected to any support, so it can float away in X, Y and Z"
                 + " and turn about each: its lowest modes lie at 0 Hz.", whole ? "Support the structure."
                         : "Join the part to the structure, support it, or delete it.");

@@ -63,7 +63,7 @@ final class MassAccount implements FindingDetector {
         if (!objects.isEmpty()) {
             findings.add(new Finding(ON_SUPPORTS, Severity.INFO, objects,
                     "Much of the mass sits on supports and takes no part in any mode: "
-                    + String.join(", ", shares) + ". The shares are of the mass that can move.",
+                    + String.join(", ", shares) + ". Captured shares leave this mass out.",
                     "Add the held mass to the base shear by hand where the code asks for it, or divide the lowest members."));
         }
     }

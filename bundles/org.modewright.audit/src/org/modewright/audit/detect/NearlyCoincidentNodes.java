@@ -10,12 +10,13 @@ import org.modewright.audit.Finding;
 import org.modewright.audit.Lengths;
 import org.modewright.audit.ObjectRef;
 import org.modewright.audit.Severity;
-import org.modewright.audit.Words;
 import org.modewright.fem.LinearTie;
 import org.modewright.fem.LinkTie;
 import org.modewright.fem.NodePoint;
+import org.modewright.fem.NodeSets;
 import org.modewright.fem.Snapshot;
 import org.modewright.fem.StructuralElement;
+import org.modewright.modal.Figures;
 
 /**
  * Nodes so near to each other that they were probably meant to be one, and that nothing joins. Joined are nodes that hang together through
@@ -61,11 +62,11 @@ public final class NearlyCoincidentNodes {
         if (!(limit > 0)) {
             return List.of();
         }
-        Sets joined = joined();
-        Sets near = new Sets(nodes.size());
+        NodeSets joined = joined();
+        NodeSets near = new NodeSets(nodes.size());
         for (int[] pair : neighbours()) {
             if (joined.find(pair[0]) != joined.find(pair[1])) {
-                near.unite(pair[0], pair[1]);
+                near.join(pair[0], pair[1]);
             }
         }
         Map<Integer, List<Integer>> clusters = new LinkedHashMap<>();
@@ -75,21 +76,21 @@ public final class NearlyCoincidentNodes {
         return clusters.values().stream().filter(cluster -> cluster.size() > 1).map(this::finding).toList();
     }
 
-    private Sets joined() {
-        Sets joined = new Sets(nodes.size());
+    private NodeSets joined() {
+        NodeSets joined = new NodeSets(nodes.size());
         for (StructuralElement element : snapshot.elements()) {
             int[] ends = element.nodes();
             for (int i = 1; i < ends.length; i++) {
                 if (distance(ends[0], ends[i]) <= 2 * limit) {
-                    joined.unite(ends[0], ends[i]);
+                    joined.join(ends[0], ends[i]);
                 }
             }
         }
         for (LinkTie link : snapshot.links()) {
-            joined.unite(link.from(), link.to());
+            joined.join(link.from(), link.to());
         }
         for (LinearTie tie : snapshot.ties()) {
-            IntStream.of(tie.nodes()).forEach(node -> joined.unite(tie.nodes()[0], node));
+            IntStream.of(tie.nodes()).forEach(node -> joined.join(tie.nodes()[0], node));
         }
         return joined;
     }
@@ -140,7 +141,7 @@ public final class NearlyCoincidentNodes {
                 largest = Math.max(largest, distance(a, b));
             }
         }
-        String names = Words.list(cluster.stream().map(node -> nodes.get(node).name()).toList());
+        String names = Figures.list(cluster.stream().map(node -> nodes.get(node).name()).toList());
         String place = largest == 0 ? "lie at the same place" : "are only " + new Lengths(snapshot).of(largest) + " apart";
         return new Finding(ID, Severity.WARNING, objects, "Nodes " + names + " " + place
                 + " and nothing joins them, so the structure has a gap there.",
@@ -155,28 +156,5 @@ public final class NearlyCoincidentNodes {
 
     private static double square(double value) {
         return value * value;
-    }
-
-    /** Disjoint sets of nodes. */
-    private static final class Sets {
-
-        private final int[] leader;
-
-        Sets(int count) {
-            leader = IntStream.range(0, count).toArray();
-        }
-
-        int find(int node) {
-            int root = node;
-            while (leader[root] != root) {
-                leader[root] = leader[leader[root]];
-                root = leader[root];
-            }
-            return root;
-        }
-
-        void unite(int a, int b) {
-            leader[find(b)] = find(a);
-        }
     }
 }

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.stream.IntStream;
 import org.modewright.audit.Finding;
 import org.modewright.audit.Severity;
-import org.modewright.audit.Words;
 import org.modewright.fem.NodePoint;
 import org.modewright.fem.Snapshot;
 import org.modewright.modal.Connectivity;
@@ -59,6 +58,6 @@ public final class UnusedNodes {
     }
 
     private static String subject(int[] nodes, List<NodePoint> points) {
-        return (nodes.length == 1 ? "node " : nodes.length + " nodes: ") + Words.list(Refs.names(nodes, points));
+        return (nodes.length == 1 ? "node " : nodes.length + " nodes: ") + Figures.list(Refs.names(nodes, points));
     }
 }

@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 
 import org.modewright.fem.NodePoint;
+import org.modewright.fem.NodeSets;
 
 /**
  * Makes the factors of translations and rotations in constraints comparable: within each set of nodes that constraints join, a

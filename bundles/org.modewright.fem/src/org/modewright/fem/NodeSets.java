@@ -1,16 +1,16 @@
-package org.modewright.fem.internal;
+package org.modewright.fem;
 
 /**
  * Disjoint sets of nodes.
  *
  * <p>Source: R. E. Tarjan, Journal of the ACM 22 (1975) 215-225.
  */
-final class NodeSets {
+public final class NodeSets {
 
     private final int[] parent;
 
     /** Every node by itself. */
-    NodeSets(int nodes) {
+    public NodeSets(int nodes) {
         parent = new int[nodes];
         for (int i = 0; i < nodes; i++) {
             parent[i] = i;
@@ -18,7 +18,7 @@ final class NodeSets {
     }
 
     /** The node that stands for the set of a node. */
-    int find(int node) {
+    public int find(int node) {
         int root = node;
         while (parent[root] != root) {
             parent[root] = parent[parent[root]];
@@ -28,7 +28,7 @@ final class NodeSets {
     }
 
     /** Joins the sets of two nodes; the lower representative stays. */
-    void join(int a, int b) {
+    public void join(int a, int b) {
         int first = find(a);
         int second = find(b);
         parent[Math.max(first, second)] = Math.min(first, second);
