@@ -9,8 +9,6 @@ import java.util.regex.Pattern;
  */
 public final class SpreadsheetText {
 
-    /** A decimal number with a decimal point, as the tables hold it. */
-    static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)?");
 
     private static final Pattern DANGEROUS = Pattern.compile("[=+\\-@\\s\\uFF1D\\uFF0B\\uFF0D\\uFF20].*", Pattern.DOTALL);
     private static final Pattern ESCAPED = Pattern.compile("'+[=+\\-@\\s\\uFF1D\\uFF0B\\uFF0D\\uFF20].*", Pattern.DOTALL);
@@ -20,7 +18,7 @@ public final class SpreadsheetText {
 
     /** The text with an apostrophe before it where a spreadsheet might run it. */
     public static String escape(String text) {
-        boolean runs = DANGEROUS.matcher(text).matches() && !NUMBER.matcher(text).matches();
+        boolean runs = DANGEROUS.matcher(text).matches() && !Numbers.isDecimal(text);
         return runs || ESCAPED.matcher(text).matches() ? "'" + text : text;
     }
 

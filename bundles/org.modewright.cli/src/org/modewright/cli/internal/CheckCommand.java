@@ -1,24 +1,17 @@
 package org.modewright.cli.internal;
 
 import java.io.IOException;
-import java.util.concurrent.Callable;
 
 import org.modewright.audit.AuditRequest;
 import org.modewright.audit.AuditResult;
 import org.modewright.audit.AuditRun;
 import org.modewright.cli.CommandContext;
-import org.modewright.cli.ExitStatus;
 import org.modewright.exchange.ResultFile;
 import org.modewright.exchange.ResultTables;
 import org.modewright.exchange.ShapesFile;
 
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** The main job: solves a model, judges its modes, names what is suspicious. */
 @Command(name = "check", sortOptions = false, header = {"Solves a model, audits its modes and prints the verdict.", ""},
@@ -26,39 +19,24 @@ import picocli.CommandLine.Spec;
         footer = {"", "MODEL is a model file (.modewright), a table package (its folder, .zip or datapackage.json), or sample:NAME.",
             "Exit status: 0 the audit passes; 1 it does not; 2 bad input or options; 3 the run could not be completed",
             "(unstable structure, incomplete modes, out of memory)."})
-public final class CheckCommand implements Callable<Integer> {
-
-    private final CommandContext context;
-
-    @Spec
-    private CommandSpec spec;
+public final class CheckCommand extends RunCommand {
 
     @Parameters(paramLabel = "MODEL", arity = "0..1", hideParamSyntax = true, description = "The model.")
     private String model;
 
-    @Mixin
-    private RunOptions run;
-
-    @Mixin
-    private OutputOptions output;
-
-    @Option(names = {"-h", "--help"}, usageHelp = true, description = "Shows this help.")
-    private boolean help;
-
     public CheckCommand(CommandContext context) {
-        this.context = context;
+        super(context);
     }
 
     @Override
-    public Integer call() throws Exception {
-        if (run.isListRules()) {
-            RuleList.print(context.out());
-            return ExitStatus.PASSED;
-        }
+    protected void checkArguments() {
         if (model == null) {
-            throw new ParameterException(spec.commandLine(), "Say which model: give MODEL.");
+            throw wrong("Say which model: give MODEL.");
         }
-        output.check();
+    }
+
+    @Override
+    protected int solve() throws IOException {
         Input input = Input.read(model);
         input.warn(context);
         AuditResult result = audit(input);
@@ -69,7 +47,7 @@ public final class CheckCommand implements Callable<Integer> {
 
     private AuditResult audit(Input input) {
         AuditRequest request = run.request(input.model());
-        try (ConsoleProgress progress = new ConsoleProgress(context, run.isQuiet())) {
+        try (ConsoleProgress progress = progress()) {
             AuditResult result = AuditRun.standard().run(input.model(), request, progress);
             return new AuditResult(result.modal().withSeconds("read", input.seconds()), result.verdicts(), result.findings(),
                     result.status(), result.summary());

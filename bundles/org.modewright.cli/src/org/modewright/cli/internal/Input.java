@@ -4,9 +4,6 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.file.Path;
-import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
-import java.util.HexFormat;
 import java.util.List;
 import java.util.stream.Collectors;
 
@@ -17,6 +14,7 @@ import org.modewright.exchange.MatrixMarket;
 import org.modewright.exchange.ModelFacts;
 import org.modewright.exchange.ModelSource;
 import org.modewright.model.ModelFile;
+import org.modewright.model.Snapshots;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.samples.Sample;
 import org.modewright.samples.Samples;
@@ -61,15 +59,7 @@ record Input(StructuralModel model, List<String> warnings, String file, String s
         try (InputStream stream = sample.open()) {
             byte[] bytes = stream.readAllBytes();
             StructuralModel model = ModelFile.load(new ByteArrayInputStream(bytes), sample.fileName());
-            return new Input(model, List.of(), argument, HexFormat.of().formatHex(sha256(bytes)), since(start));
-        }
-    }
-
-    private static byte[] sha256(byte[] bytes) {
-        try {
-            return MessageDigest.getInstance("SHA-256").digest(bytes);
-        } catch (NoSuchAlgorithmException e) {
-            throw new IllegalStateException("Every Java platform has SHA-256.", e);
+            return new Input(model, List.of(), argument, Snapshots.sha256(bytes), since(start));
         }
     }
 

@@ -4,7 +4,6 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
-import java.util.concurrent.Callable;
 
 import org.modewright.audit.AuditRequest;
 import org.modewright.audit.RulePacks;
@@ -25,12 +24,7 @@ import org.modewright.modal.ModalRun;
 import org.modewright.numerics.SymmetricMatrix;
 
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
-import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
-import picocli.CommandLine.Spec;
 
 /** Modes and certificate, of a model or of a pair of matrices. */
 @Command(name = "solve", sortOptions = false, header = {"Solves a model, or a pair of matrices, and prints modes and certificate.", ""},
@@ -39,43 +33,28 @@ import picocli.CommandLine.Spec;
             "K.mtx M.mtx is a pair of MatrixMarket files (coordinate, real, symmetric); without --modes its first 50 modes.",
             "The rigid-body modes of a free structure stand at 0 Hz.",
             "Exit status: 0 done; 2 bad input or options; 3 the run could not be completed."})
-public final class SolveCommand implements Callable<Integer> {
+public final class SolveCommand extends RunCommand {
 
     private static final int MODES_OF_A_PAIR = 50;
     private static final double NANO = 1e-9;
-
-    private final CommandContext context;
-
-    @Spec
-    private CommandSpec spec;
 
     @Parameters(paramLabel = "MODEL, or K.mtx M.mtx", arity = "0..2", hideParamSyntax = true,
             description = "The model, or the stiffness and the mass matrix.")
     private List<String> arguments = List.of();
 
-    @Mixin
-    private RunOptions run;
-
-    @Mixin
-    private OutputOptions output;
-
-    @Option(names = {"-h", "--help"}, usageHelp = true, description = "Shows this help.")
-    private boolean help;
-
     public SolveCommand(CommandContext context) {
-        this.context = context;
+        super(context);
     }
 
     @Override
-    public Integer call() throws Exception {
-        if (run.isListRules()) {
-            RuleList.print(context.out());
-            return ExitStatus.PASSED;
-        }
+    protected void checkArguments() {
         if (arguments.isEmpty()) {
-            throw new ParameterException(spec.commandLine(), "Say which model: give MODEL, or K.mtx M.mtx.");
+            throw wrong("Say which model: give MODEL, or K.mtx M.mtx.");
         }
-        output.check();
+    }
+
+    @Override
+    protected int solve() throws IOException {
         return isPair() ? solvePair() : solveModel();
     }
 
@@ -85,7 +64,7 @@ public final class SolveCommand implements Callable<Integer> {
             return true;
         }
         if (matrices > 0 || arguments.size() > 1) {
-            throw new ParameterException(spec.commandLine(), "Give one MODEL, or the two matrices K.mtx M.mtx.");
+            throw wrong("Give one MODEL, or the two matrices K.mtx M.mtx.");
         }
         return false;
     }
@@ -112,7 +91,7 @@ public final class SolveCommand implements Callable<Integer> {
         double required = RulePacks.builtIn().get(request.rulePack()).capturedMass().required();
         ModalRequest modal = new ModalRequest(request.modes(), request.belowHz(), new CaptureTarget(required, request.directions()),
                 ModalRequest.DEFAULT_LIMIT, request.threads());
-        try (ConsoleProgress progress = new ConsoleProgress(context, run.isQuiet())) {
+        try (ConsoleProgress progress = progress()) {
             long start = System.nanoTime();
             Assembly assembly = Assembly.of(Snapshot.of(input.model()), progress);
             double assembling = (System.nanoTime() - start) * NANO;
@@ -122,7 +101,7 @@ public final class SolveCommand implements Callable<Integer> {
 
     private int solvePair() throws IOException {
         if (run.isJudging() || output.shapes() != null || output.isAllElements()) {
-            throw new ParameterException(spec.commandLine(), "A pair of matrices has no directions, nodes and elements: "
+            throw wrong("A pair of matrices has no directions, nodes and elements: "
                     + "--rules, --directions, --shapes and --all-elements need a model.");
         }
         long start = System.nanoTime();
@@ -133,7 +112,7 @@ public final class SolveCommand implements Callable<Integer> {
         ModalRequest request = new ModalRequest(modes, run.below(), null, ModalRequest.DEFAULT_LIMIT, run.threads());
         start = System.nanoTime();
         MatrixRun.Result result;
-        try (ConsoleProgress progress = new ConsoleProgress(context, run.isQuiet())) {
+        try (ConsoleProgress progress = progress()) {
             result = MatrixRun.run(stiffness, mass, request, progress);
         }
         Map<String, Double> seconds = Map.of("read", reading, "eigen", (System.nanoTime() - start) * NANO);
