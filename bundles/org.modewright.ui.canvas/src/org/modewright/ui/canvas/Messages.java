@@ -29,6 +29,7 @@ final class Messages extends NLS {
     public static String Shape_colourStrain;
     public static String Shape_colourKinetic;
     public static String Shape_save;
+    public static String Shape_fileName;
     public static String Shape_saveFilter;
     public static String Shape_saveFailed;
     public static String Shape_copy;

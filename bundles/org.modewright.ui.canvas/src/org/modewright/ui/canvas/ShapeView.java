@@ -1,6 +1,5 @@
 package org.modewright.ui.canvas;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Objects;
 import java.util.Set;
@@ -11,20 +10,14 @@ import org.eclipse.jface.action.IMenuManager;
 import org.eclipse.jface.action.IToolBarManager;
 import org.eclipse.jface.action.MenuManager;
 import org.eclipse.jface.action.Separator;
-import org.eclipse.jface.dialogs.MessageDialog;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
-import org.eclipse.swt.SWTException;
 import org.eclipse.swt.custom.StackLayout;
-import org.eclipse.swt.dnd.Clipboard;
-import org.eclipse.swt.dnd.ImageTransfer;
-import org.eclipse.swt.dnd.Transfer;
 import org.eclipse.swt.layout.GridData;
 import org.eclipse.swt.layout.GridLayout;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Event;
-import org.eclipse.swt.widgets.FileDialog;
 import org.eclipse.ui.IActionBars;
 import org.eclipse.ui.IMemento;
 import org.eclipse.ui.IViewSite;
@@ -35,9 +28,6 @@ import org.modewright.modal.Dominance.Energy;
 import org.modewright.modal.ModalResult;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.render.ColourRamp;
-import org.modewright.render.Deformation;
-import org.modewright.render.ModeAnimator;
-import org.modewright.ui.AnimationPreferences;
 import org.modewright.ui.AuditSelection;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
@@ -50,9 +40,8 @@ import org.modewright.ui.widgets.SessionPage;
 /** What does a mode do? A sentence, then the structure moving in it with its rest position behind, coloured by energy on request. */
 public final class ShapeView extends ViewPart {
 
-    private static final int FRAME_MILLISECONDS = 16;
-    private static final double STEP = 1.0 / 24;
     private static final String COLOUR_KEY = "colour";
+    private static final String NOT_IN_FILE_NAMES = "[\\\\/:*?\"<>|]";
 
     private final ColourRamp ramp = ColourRamp.energy();
     private AuditSession session;
@@ -64,18 +53,15 @@ public final class ShapeView extends ViewPart {
     private EmptyState noMode;
     private StructureCanvas canvas;
     private EnergyLegend legend;
-    private ShapeControls controls;
+    private ShapePlayer player;
+    private PictureActions pictures;
     private IAction playAction;
     private Energy colouring = Energy.STRAIN;
     private StructuralModel drawnModel;
     private IFile drawnFile;
     private ModalResult shownResult;
     private int shownMode = -1;
-    private Deformation deformation;
-    private ModeAnimator animator;
-    private boolean playing = AnimationPreferences.plays();
-    private boolean ticking;
-    private long lastTick;
+    private boolean shapeShown;
 
     @Override
     public void init(IViewSite site, IMemento saved) throws PartInitException {
@@ -122,7 +108,8 @@ public final class ShapeView extends ViewPart {
         canvas.addListener(SWT.KeyDown, this::key);
         legend = new EnergyLegend(canvas, ramp);
         canvas.overlayWith(legend::paint);
-        controls = new ShapeControls(moving, this::controlsMoved);
+        player = new ShapePlayer(canvas, moving, this::showPlaying);
+        pictures = new PictureActions(getSite().getShell(), canvas, legend);
     }
 
     private static GridLayout plain() {
@@ -149,12 +136,12 @@ public final class ShapeView extends ViewPart {
 
     /** Whether the shape plays. */
     public boolean isPlaying() {
-        return playing && animator != null;
+        return player.isPlaying();
     }
 
     /** Phase of the movement, rad; 0 without a shape. */
     public double phase() {
-        return animator == null ? 0 : animator.phase();
+        return player.phase();
     }
 
     private void contributeActions() {
@@ -162,9 +149,9 @@ public final class ShapeView extends ViewPart {
         IToolBarManager tools = bars.getToolBarManager();
         IAction previous = ViewActions.command(Messages.Shape_previous, Images.PREVIOUS, () -> moveMode(-1));
         IAction next = ViewActions.command(Messages.Shape_next, Images.NEXT, () -> moveMode(1));
-        playAction = ViewActions.command(Messages.Shape_pause, Images.PAUSE, this::togglePlaying);
-        IAction back = ViewActions.command(Messages.Shape_stepBack, Images.STEP_BACK, () -> step(-STEP));
-        IAction forward = ViewActions.command(Messages.Shape_stepForward, Images.STEP_FORWARD, () -> step(STEP));
+        playAction = ViewActions.command(Messages.Shape_play, Images.PLAY, player::toggle);
+        IAction back = ViewActions.command(Messages.Shape_stepBack, Images.STEP_BACK, player::stepBack);
+        IAction forward = ViewActions.command(Messages.Shape_stepForward, Images.STEP_FORWARD, player::stepForward);
         tools.add(previous);
         tools.add(playAction);
         tools.add(next);
@@ -243,7 +230,7 @@ public final class ShapeView extends ViewPart {
         int mode = session.selection().mode();
         if (mode < 0 || mode >= result.modes().size()) {
             showNoMode(result);
-        } else if (result != shownResult || mode != shownMode || deformation == null) {
+        } else if (result != shownResult || mode != shownMode || !shapeShown) {
             showMode(result, mode);
         }
         canvas.select(session.selection().elementIds());
@@ -252,8 +239,8 @@ public final class ShapeView extends ViewPart {
     private void stopShape() {
         shownResult = null;
         shownMode = -1;
-        deformation = null;
-        animator = null;
+        shapeShown = false;
+        player.show(null);
     }
 
     private void drawModel() {
@@ -262,7 +249,7 @@ public final class ShapeView extends ViewPart {
             drawnModel = model;
             canvas.show(StructureDrawing.of(model), Objects.equals(drawnFile, session.modelFile()));
             drawnFile = session.modelFile();
-            deformation = null;
+            shapeShown = false;
         }
     }
 
@@ -283,13 +270,10 @@ public final class ShapeView extends ViewPart {
         shownResult = result;
         shownMode = mode;
         sentence.show(SentenceBar.Sign.INFORMATION, ShapeSentence.of(result, mode));
-        deformation = canvas.drawing().deformation(result, mode);
-        animator = new ModeAnimator(canvas.drawing().scene().bounds().diagonal(), deformation.largest());
-        controlsMoved();
+        shapeShown = true;
         colour();
         top(moving);
-        setPlaying(playing);
-        canvas.shape(deformation, animator.factor());
+        player.show(canvas.drawing().deformation(result, mode));
     }
 
     private void colour() {
@@ -316,82 +300,11 @@ public final class ShapeView extends ViewPart {
         }
     }
 
-    private void togglePlaying() {
-        setPlaying(!playing);
-    }
-
-    private void setPlaying(boolean value) {
-        playing = value;
-        playAction.setImageDescriptor(Images.descriptor(value ? Images.PAUSE : Images.PLAY));
-        playAction.setToolTipText(value ? Messages.Shape_pause : Messages.Shape_play);
-        if (animator == null) {
-            return;
-        }
-        if (value) {
-            animator.play();
-            startTicking();
-        } else {
-            animator.pause();
-        }
-    }
-
-    private void step(double cycles) {
-        if (animator != null) {
-            setPlaying(false);
-            animator.step(cycles);
-            present();
-        }
-    }
-
-    private void controlsMoved() {
-        if (animator == null) {
-            return;
-        }
-        animator.amplitude(controls.amplitude());
-        animator.speed(controls.speed());
-        if (controls.isPhaseHeld()) {
-            setPlaying(false);
-            animator.phase(controls.phase());
-        }
-        present();
-    }
-
-    private void present() {
-        canvas.shape(deformation, animator.factor());
-        controls.showPhase(animator.phase());
-    }
-
-    /** One chain of timers runs while something plays in sight; it ends by itself. */
-    private void startTicking() {
-        if (!ticking) {
-            ticking = true;
-            lastTick = System.nanoTime();
-            canvas.getDisplay().timerExec(FRAME_MILLISECONDS, this::tick);
-        }
-    }
-
-    private void tick() {
-        ticking = false;
-        if (canvas.isDisposed() || animator == null || !animator.playing()) {
-            return;
-        }
-        long now = System.nanoTime();
-        if (canvas.isVisible()) {
-            animator.advance((now - lastTick) / 1e9);
-            present();
-            canvas.update();
-        }
-        lastTick = now;
-        ticking = true;
-        int spent = (int) ((System.nanoTime() - now) / 1_000_000);
-        canvas.getDisplay().timerExec(canvas.isVisible() ? Math.max(1, FRAME_MILLISECONDS - spent) : 250, this::tick);
-    }
-
     private void key(Event event) {
         switch (event.character) {
-            case ' ' -> togglePlaying();
-            case '.' -> step(STEP);
-            case ',' -> step(-STEP);
+            case ' ' -> player.toggle();
+            case '.' -> player.stepForward();
+            case ',' -> player.stepBack();
             case 'n', 'N' -> moveMode(1);
             case 'p', 'P' -> moveMode(-1);
             default -> {
@@ -400,41 +313,31 @@ public final class ShapeView extends ViewPart {
         }
     }
 
+    private boolean showsShape() {
+        return canvas.hasScene() && shownMode >= 0;
+    }
+
     private void savePicture() {
-        if (!canvas.hasScene() || shownMode < 0) {
-            return;
-        }
-        FileDialog dialog = new FileDialog(getSite().getShell(), SWT.SAVE);
-        dialog.setFilterExtensions(new String[] {"*.png"});
-        dialog.setFilterNames(new String[] {Messages.Shape_saveFilter});
-        dialog.setFileName(shownResult.modelName() + " mode " + (shownMode + 1) + ".png");
-        dialog.setOverwrite(true);
-        String chosen = dialog.open();
-        if (chosen != null) {
-            savePicture(Path.of(chosen));
+        if (showsShape()) {
+            String name = NLS.bind(Messages.Shape_fileName, shownResult.modelName(), shownResult.modes().get(shownMode).number());
+            pictures.save(name.replaceAll(NOT_IN_FILE_NAMES, "-"));
         }
     }
 
     /** Writes the present picture as PNG; what goes wrong is told in a dialogue. */
     public void savePicture(Path file) {
-        try {
-            StillPicture.write(StillPicture.of(canvas, legend), file);
-        } catch (IOException | SWTException failure) {
-            MessageDialog.openError(getSite().getShell(), Messages.Shape_save,
-                    NLS.bind(Messages.Shape_saveFailed, file, failure.getMessage()));
-        }
+        pictures.save(file);
     }
 
     private void copyPicture() {
-        if (!canvas.hasScene() || shownMode < 0) {
-            return;
+        if (showsShape()) {
+            pictures.copy();
         }
-        Clipboard clipboard = new Clipboard(canvas.getDisplay());
-        try {
-            clipboard.setContents(new Object[] {StillPicture.of(canvas, legend)}, new Transfer[] {ImageTransfer.getInstance()});
-        } finally {
-            clipboard.dispose();
-        }
+    }
+
+    private void showPlaying(boolean plays) {
+        playAction.setImageDescriptor(Images.descriptor(plays ? Images.PAUSE : Images.PLAY));
+        playAction.setToolTipText(plays ? Messages.Shape_pause : Messages.Shape_play);
     }
 
     /** What is picked here is selected everywhere. */

@@ -9,12 +9,10 @@ import org.eclipse.swt.accessibility.AccessibleAdapter;
 import org.eclipse.swt.accessibility.AccessibleEvent;
 import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.GC;
-import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.graphics.RGB;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.widgets.Canvas;
 import org.eclipse.swt.widgets.Composite;
-import org.eclipse.swt.widgets.Event;
 import org.modewright.model.structure.Identified;
 import org.modewright.render.Camera;
 import org.modewright.render.Deformation;
@@ -47,50 +45,35 @@ public final class StructureCanvas extends Canvas {
         void opened(String id);
     }
 
-    private static final int DRAG_THRESHOLD = 4;
     private static final double PICK_TOLERANCE = 6;
-    private static final double ORBIT_STEP = Math.toRadians(5);
-    private static final int MOVE_STEP = 24;
-    private static final double ZOOM_STEP = 1.15;
     private static final int TURN_MILLISECONDS = 250;
     private static final int TURN_FRAME = 16;
-
-    private enum Drag { NONE, PRESSED, ORBIT, MOVE, RECTANGLE }
 
     private final SceneRenderer renderer = new SceneRenderer();
     private final RenderOptions options = new RenderOptions().strips(2);
     private final Raster raster = new Raster(1, 1);
     private final RasterImage image;
-    private final Handler handler;
     private StructureDrawing drawing;
     private Camera camera;
     private Deformation deformation;
     private double factor;
     private Function<Identified, String> describer = object -> null;
     private Consumer<GC> overlay = gc -> { };
-    private Drag drag = Drag.NONE;
-    private boolean dragAdds;
-    private Point pressed;
-    private Point last;
+    private Rectangle rubberBand;
     private String hovered;
     private StandardView currentView = StandardView.AXONOMETRIC;
     private boolean fitted;
+    private Runnable turning;
     private long frames;
 
     public StructureCanvas(Composite parent, Handler handler) {
         super(parent, SWT.NO_BACKGROUND | SWT.DOUBLE_BUFFERED);
-        this.handler = handler;
         image = new RasterImage(getDisplay());
         setData(UiIds.WIDGET_ID, "canvas");
         addListener(SWT.Paint, event -> paint(event.gc));
         addListener(SWT.Resize, event -> resized());
-        addListener(SWT.MouseDown, this::mouseDown);
-        addListener(SWT.MouseMove, this::mouseMove);
-        addListener(SWT.MouseUp, this::mouseUp);
-        addListener(SWT.MouseDoubleClick, this::mouseDoubleClick);
-        addListener(SWT.MouseExit, event -> hover(null));
-        addListener(SWT.MouseVerticalWheel, this::wheel);
-        addListener(SWT.KeyDown, this::keyDown);
+        new CanvasMouse(this, handler).listen();
+        addListener(SWT.KeyDown, new CanvasKeys(this, handler)::press);
         addListener(SWT.Traverse, event -> event.doit = event.detail == SWT.TRAVERSE_TAB_NEXT || event.detail == SWT.TRAVERSE_TAB_PREVIOUS);
         addListener(SWT.FocusIn, event -> redraw());
         addListener(SWT.FocusOut, event -> redraw());
@@ -196,7 +179,7 @@ public final class StructureCanvas extends Canvas {
         Runnable step = new Runnable() {
             @Override
             public void run() {
-                if (isDisposed()) {
+                if (isDisposed() || turning != this) {
                     return;
                 }
                 double done = Math.min(1, (System.nanoTime() - start) / 1e6 / TURN_MILLISECONDS);
@@ -207,6 +190,7 @@ public final class StructureCanvas extends Canvas {
                 }
             }
         };
+        turning = step;
         step.run();
     }
 
@@ -238,7 +222,7 @@ public final class StructureCanvas extends Canvas {
         frames++;
         image.draw(gc, raster, area);
         overlay.accept(gc);
-        paintRectangle(gc);
+        paintRubberBand(gc);
         if (isFocusControl()) {
             gc.setForeground(ThemeColours.link(this));
             gc.drawRectangle(0, 0, area.width - 1, area.height - 1);
@@ -248,6 +232,7 @@ public final class StructureCanvas extends Canvas {
     /** Everything is brought into sight once there is room, and never again of its own accord. */
     private void placeCamera() {
         if (!fitted || camera == null) {
+            turning = null;
             camera = Camera.standard(currentView, drawing.scene().bounds(), raster.width(), raster.height()).withPerspective(Camera.MILD)
                     .fit(drawing.scene().bounds(), raster.width(), raster.height());
             fitted = true;
@@ -264,94 +249,87 @@ public final class StructureCanvas extends Canvas {
         return 0xFF000000 | rgb.red << 16 | rgb.green << 8 | rgb.blue;
     }
 
-    private void paintRectangle(GC gc) {
-        if (drag == Drag.RECTANGLE) {
+    private void paintRubberBand(GC gc) {
+        if (rubberBand != null) {
             gc.setForeground(ThemeColours.selection(this));
             gc.setLineStyle(SWT.LINE_DASH);
-            gc.drawRectangle(Math.min(pressed.x, last.x), Math.min(pressed.y, last.y), Math.abs(last.x - pressed.x), Math.abs(last.y - pressed.y));
+            gc.drawRectangle(rubberBand);
             gc.setLineStyle(SWT.LINE_SOLID);
         }
     }
 
-    private void mouseDown(Event event) {
-        setFocus();
-        if (event.button == 1 || event.button == 2) {
-            drag = event.button == 2 ? Drag.MOVE : Drag.PRESSED;
-            dragAdds = (event.stateMask & SWT.MOD1) != 0;
-            pressed = new Point(event.x, event.y);
-            last = pressed;
-        }
-    }
-
-    private void mouseMove(Event event) {
-        if (drag == Drag.NONE) {
-            hover(pickAt(event.x, event.y));
-            return;
-        }
-        if (drag == Drag.PRESSED) {
-            if (Math.abs(event.x - pressed.x) + Math.abs(event.y - pressed.y) < DRAG_THRESHOLD) {
-                return;
-            }
-            drag = (event.stateMask & SWT.SHIFT) != 0 ? Drag.MOVE : dragAdds ? Drag.RECTANGLE : Drag.ORBIT;
-            hover(null);
-        }
-        dragTo(event);
-        last = new Point(event.x, event.y);
+    /** Draws a rectangle over the structure; null: none. */
+    void rubberBand(Rectangle band) {
+        rubberBand = band;
         redraw();
     }
 
-    private void dragTo(Event event) {
-        if (camera == null) {
-            return;
-        }
-        double dx = (event.x - last.x) * scale();
-        double dy = (event.y - last.y) * scale();
-        if (drag == Drag.ORBIT) {
-            camera = camera.orbitPixels(dx, dy);
-        } else if (drag == Drag.MOVE) {
-            camera = camera.pan(dx, dy, raster.width(), raster.height());
-        }
+    /** Whether there is something that a camera looks at. */
+    boolean isLooking() {
+        return camera != null && hasScene();
     }
 
-    private void mouseUp(Event event) {
-        Drag ended = drag;
-        drag = Drag.NONE;
-        if (ended == Drag.PRESSED && event.button == 1) {
-            pickOne(event.x, event.y);
-        } else if (ended == Drag.RECTANGLE) {
-            pickRectangle(event);
-        }
-    }
-
-    private void pickOne(int x, int y) {
-        Pick pick = pickAt(x, y);
-        String id = drawing == null ? null : drawing.id(pick);
-        handler.picked(id == null ? Set.of() : Set.of(id), dragAdds);
-    }
-
-    private void pickRectangle(Event event) {
-        double scale = scale();
-        double x0 = Math.min(pressed.x, event.x) * scale;
-        double y0 = Math.min(pressed.y, event.y) * scale;
-        double x1 = Math.max(pressed.x, event.x) * scale;
-        double y1 = Math.max(pressed.y, event.y) * scale;
-        boolean crossing = event.x < pressed.x;
-        Set<String> ids = drawing.ids(renderer.pickRectangle(PrimitiveKind.MEMBER, x0, y0, x1, y1, crossing),
-                renderer.pickRectangle(PrimitiveKind.MARKER, x0, y0, x1, y1, crossing));
-        handler.picked(ids, true);
+    /** Looks otherwise at once; a turn under way ends. */
+    private void look(Camera other) {
+        turning = null;
+        camera = other;
         redraw();
     }
 
-    private void mouseDoubleClick(Event event) {
-        String id = drawing == null ? null : drawing.id(pickAt(event.x, event.y));
-        if (id != null && event.button == 1) {
-            handler.opened(id);
-        }
+    /** Turns round the structure by radians. */
+    void orbit(double azimuth, double elevation) {
+        look(camera.orbit(azimuth, elevation));
+    }
+
+    /** Turns round the structure as a drag by so many points does. */
+    void orbitBy(int dx, int dy) {
+        look(camera.orbitPixels(dx * scale(), dy * scale()));
+    }
+
+    /** Moves the picture by points. */
+    void moveBy(int dx, int dy) {
+        look(camera.pan(dx * scale(), dy * scale(), raster.width(), raster.height()));
+    }
+
+    /** Comes nearer by a factor above 1, with a place of the canvas staying where it is. */
+    void zoom(double factor, int x, int y) {
+        look(camera.zoomAt(factor, x * scale(), y * scale(), raster.width(), raster.height()));
+    }
+
+    /** Comes nearer by a factor above 1, with the middle staying where it is. */
+    void zoom(double factor) {
+        Rectangle area = getClientArea();
+        zoom(factor, area.width / 2, area.height / 2);
+    }
+
+    /** Id of the object at a point of the canvas; null if there is none. */
+    public String idAt(int x, int y) {
+        return drawing == null ? null : drawing.id(pickAt(x, y));
     }
 
     private Pick pickAt(int x, int y) {
         double scale = scale();
         return hasScene() && frames > 0 ? renderer.pick(x * scale, y * scale, PICK_TOLERANCE * scale) : null;
+    }
+
+    /** Ids of the objects in a rectangle of the canvas. */
+    Set<String> idsIn(Rectangle band, boolean crossing) {
+        double scale = scale();
+        double x0 = band.x * scale;
+        double y0 = band.y * scale;
+        double x1 = (band.x + band.width) * scale;
+        double y1 = (band.y + band.height) * scale;
+        return drawing.ids(renderer.pickRectangle(PrimitiveKind.MEMBER, x0, y0, x1, y1, crossing),
+                renderer.pickRectangle(PrimitiveKind.MARKER, x0, y0, x1, y1, crossing));
+    }
+
+    /** Outlines what the pointer is over and describes it. */
+    void hover(int x, int y) {
+        hover(pickAt(x, y));
+    }
+
+    void hoverNothing() {
+        hover(null);
     }
 
     private void hover(Pick pick) {
@@ -366,72 +344,5 @@ public final class StructureCanvas extends Canvas {
         drawing.mark(Mark.HOVERED, id == null ? Set.of() : Set.of(id));
         setToolTipText(id == null ? null : describer.apply(drawing.object(pick)));
         redraw();
-    }
-
-    private void wheel(Event event) {
-        if (camera != null && hasScene()) {
-            zoom(Math.pow(ZOOM_STEP, event.count / 3.0), event.x * scale(), event.y * scale());
-            event.doit = false;
-        }
-    }
-
-    private void zoom(double by, double x, double y) {
-        camera = camera.zoomAt(by, x, y, raster.width(), raster.height());
-        redraw();
-    }
-
-    private void keyDown(Event event) {
-        if (camera == null || !hasScene()) {
-            return;
-        }
-        if (!navigate(event) && !act(event)) {
-            return;
-        }
-        event.doit = false;
-    }
-
-    private boolean navigate(Event event) {
-        int x = event.keyCode == SWT.ARROW_LEFT ? -1 : event.keyCode == SWT.ARROW_RIGHT ? 1 : 0;
-        int y = event.keyCode == SWT.ARROW_UP ? -1 : event.keyCode == SWT.ARROW_DOWN ? 1 : 0;
-        if (x == 0 && y == 0) {
-            return false;
-        }
-        if ((event.stateMask & SWT.SHIFT) != 0) {
-            camera = camera.pan(x * MOVE_STEP, y * MOVE_STEP, raster.width(), raster.height());
-        } else {
-            camera = camera.orbit(-x * ORBIT_STEP, y * ORBIT_STEP);
-        }
-        redraw();
-        return true;
-    }
-
-    private boolean act(Event event) {
-        double middleX = raster.width() / 2.0;
-        double middleY = raster.height() / 2.0;
-        switch (event.keyCode) {
-            case SWT.HOME -> fit();
-            case SWT.ESC -> handler.picked(Set.of(), false);
-            case SWT.KEYPAD_ADD -> zoom(ZOOM_STEP, middleX, middleY);
-            case SWT.KEYPAD_SUBTRACT -> zoom(1 / ZOOM_STEP, middleX, middleY);
-            default -> {
-                return actOn(event.character, middleX, middleY);
-            }
-        }
-        return true;
-    }
-
-    private boolean actOn(char character, double middleX, double middleY) {
-        switch (character) {
-            case '+', '=' -> zoom(ZOOM_STEP, middleX, middleY);
-            case '-' -> zoom(1 / ZOOM_STEP, middleX, middleY);
-            case '0' -> view(StandardView.AXONOMETRIC);
-            case '1' -> view(StandardView.ALONG_PLUS_Y);
-            case '2' -> view(StandardView.ALONG_MINUS_X);
-            case '3' -> view(StandardView.PLAN);
-            default -> {
-                return false;
-            }
-        }
-        return true;
     }
 }

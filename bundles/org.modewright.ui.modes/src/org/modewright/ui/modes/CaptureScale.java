@@ -1,9 +1,24 @@
 package org.modewright.ui.modes;
 
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
 import org.modewright.modal.ModalResult;
+import org.modewright.ui.widgets.Numbers;
 
 /** Where a mode stands along the axis of the staircase: by its number or by its period on a logarithmic scale, long periods first. */
 public final class CaptureScale {
+
+    private static final int MOST_TICKS = 12;
+
+    /**
+     * A place along the axis with what is written there.
+     *
+     * @param position 0 to 1
+     * @param text a number or a period in seconds
+     */
+    public record Tick(double position, String text) {
+    }
 
     private final ModalResult result;
     private final boolean byPeriod;
@@ -13,8 +28,8 @@ public final class CaptureScale {
     public CaptureScale(ModalResult result, boolean byPeriod) {
         this.result = result;
         double[] periods = result.modes().stream().mapToDouble(mode -> mode.period()).filter(Double::isFinite).toArray();
-        longest = periods.length == 0 ? 1 : java.util.Arrays.stream(periods).max().getAsDouble();
-        shortest = periods.length == 0 ? 1 : java.util.Arrays.stream(periods).min().getAsDouble();
+        longest = periods.length == 0 ? 1 : Arrays.stream(periods).max().getAsDouble();
+        shortest = periods.length == 0 ? 1 : Arrays.stream(periods).min().getAsDouble();
         this.byPeriod = byPeriod && shortest < longest;
     }
 
@@ -55,5 +70,42 @@ public final class CaptureScale {
             }
         }
         return best;
+    }
+
+    /** What stands along the axis: a few round numbers or periods, in order. */
+    public List<Tick> ticks() {
+        return byPeriod ? periodTicks() : numberTicks();
+    }
+
+    private List<Tick> numberTicks() {
+        int count = result.modes().size();
+        int step = roundStep(count);
+        List<Tick> ticks = new ArrayList<>();
+        for (int number = step; number <= count; number += step) {
+            ticks.add(new Tick(position(number - 1), Integer.toString(number)));
+        }
+        return ticks;
+    }
+
+    private static int roundStep(int count) {
+        for (int step : new int[] {1, 2, 5, 10, 20, 50, 100}) {
+            if (count / step <= MOST_TICKS) {
+                return step;
+            }
+        }
+        return 200;
+    }
+
+    private List<Tick> periodTicks() {
+        List<Tick> ticks = new ArrayList<>();
+        for (int power = 3; power >= -5; power--) {
+            for (int lead : new int[] {5, 2, 1}) {
+                double period = lead * Math.pow(10, power);
+                if (period <= longest && period >= shortest) {
+                    ticks.add(new Tick(positionOf(period), Numbers.significant(period, 1)));
+                }
+            }
+        }
+        return ticks;
     }
 }

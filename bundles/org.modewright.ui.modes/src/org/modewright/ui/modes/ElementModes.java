@@ -29,7 +29,6 @@ final class ElementModes {
 
     private static final int WORDS = 4;
     private static final int LEAST_WORDS = 80;
-    private static final int MARGIN = 12;
     private static final int INDENT = 8;
 
     private final Composite body;
@@ -73,6 +72,7 @@ final class ElementModes {
         column(SWT.RIGHT, Messages.Dominance_strainShort, 76);
         column(SWT.RIGHT, Messages.Dominance_kineticShort, 80);
         column(SWT.LEFT, Messages.Column_character, LEAST_WORDS);
+        TextFit.install(table, index -> index == WORDS);
         table.addListener(SWT.Resize, event -> fitWords());
         table.addListener(SWT.MouseMove, this::explain);
         table.addListener(SWT.Selection, event -> pick(whenPicked));
@@ -109,12 +109,10 @@ final class ElementModes {
         double share = least.getSelection() / 1000.0;
         shares = new Dominance(result).modesOf(elementIds, share);
         sentence = DominanceSentence.modesOf(result, elementIds, share, shares);
-        int words = table.getColumn(WORDS).getWidth() - MARGIN;
         for (ModeShare row : shares) {
             Mode mode = result.modes().get(row.mode());
             new TableItem(table, SWT.NONE).setText(new String[] {Integer.toString(mode.number()), Numbers.significant(mode.period()),
-                Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()),
-                TextFit.shortened(table, mode.character().text(), words)});
+                Numbers.percentNumber(row.strain()), Numbers.percentNumber(row.kinetic()), mode.character().text()});
         }
     }
 
@@ -127,7 +125,6 @@ final class ElementModes {
         int width = Math.max(LEAST_WORDS, room);
         if (width != table.getColumn(WORDS).getWidth()) {
             table.getColumn(WORDS).setWidth(width);
-            refresh();
         }
     }
 

@@ -45,6 +45,7 @@ final class ModesTable {
         table.setData(UiIds.WIDGET_ID, "modes.table");
         table.addListener(SWT.SetData, this::fill);
         table.addListener(SWT.PaintItem, this::paintBar);
+        TextFit.install(table, index -> table.getColumn(index).getData() == ModeColumn.CHARACTER);
         table.addListener(SWT.Selection, event -> notifySelection(whenSelected));
         table.addListener(SWT.MouseMove, this::explain);
         table.addListener(SWT.Resize, event -> fitWords());
@@ -154,9 +155,6 @@ final class ModesTable {
         widget.setMoveable(true);
         widget.setWidth(widthOf(column));
         widget.addListener(SWT.Selection, event -> sortBy(column));
-        if (!column.isNumeric()) {
-            widget.addListener(SWT.Resize, event -> table.clearAll());
-        }
     }
 
     /** Wide enough for the header in the platform's font, with room for the sign of the sorted column. */
@@ -183,7 +181,6 @@ final class ModesTable {
         int width = Math.max(ModeColumn.CHARACTER.width(), room);
         if (words != null && width != words.getWidth()) {
             words.setWidth(width);
-            table.clearAll();
         }
     }
 
@@ -239,8 +236,7 @@ final class ModesTable {
         TableColumn[] columns = table.getColumns();
         for (int i = 0; i < columns.length; i++) {
             ModeColumn column = (ModeColumn) columns[i].getData();
-            String text = column.text(rows, order[row]);
-            item.setText(i, column.isNumeric() ? text : TextFit.shortened(table, text, columns[i].getWidth() - 3 * CELL_MARGIN));
+            item.setText(i, column.text(rows, order[row]));
         }
     }
 

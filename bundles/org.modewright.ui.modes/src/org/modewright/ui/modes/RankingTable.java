@@ -54,6 +54,7 @@ final class RankingTable {
         table.addListener(SWT.SetData, this::fill);
         table.addListener(SWT.EraseItem, this::erase);
         table.addListener(SWT.PaintItem, this::paint);
+        TextFit.install(table, index -> index == NAME);
         table.addListener(SWT.Resize, event -> fitColumns());
         table.addListener(SWT.Selection, event -> notifySelection(whenSelected));
         table.addListener(SWT.DefaultSelection, event -> open((TableItem) event.item, whenOpened));
@@ -111,10 +112,7 @@ final class RankingTable {
         int side = Math.max(LEAST_SIDE, (room - running) * 30 / 100);
         int name = Math.max(LEAST_NAME, room - 2 * side - running);
         setWidth(STRAIN, side);
-        if (table.getColumn(NAME).getWidth() != name) {
-            table.getColumn(NAME).setWidth(name);
-            table.clearAll();
-        }
+        setWidth(NAME, name);
         setWidth(KINETIC, side);
         setWidth(RUNNING, running);
     }
@@ -137,8 +135,7 @@ final class RankingTable {
             return;
         }
         DominanceRow row = rows.get(event.index);
-        String name = TextFit.shortened(table, label(row), table.getColumn(NAME).getWidth() - 3 * MARGIN);
-        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), name, Numbers.percentNumber(row.kinetic()),
+        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), label(row), Numbers.percentNumber(row.kinetic()),
             Numbers.percentNumber(row.running())});
     }
 

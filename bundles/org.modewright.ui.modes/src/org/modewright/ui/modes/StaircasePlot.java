@@ -31,17 +31,15 @@ import org.modewright.ui.widgets.ThemeColours;
 final class StaircasePlot extends Canvas {
 
     private static final int GAP = 4;
-    private static final int COLUMN_WIDTH = 16;
-    private static final int COLUMN_GAP = 20;
     private static final int LETTERS = 16;
     private static final int KEY_LINE = 20;
     private static final int LINES_PER_STEP = 2;
     private static final int OPAQUE = 255;
     private static final int VEILED = 200;
-    private static final int HATCH = 5;
     private static final int MARK = 8;
 
     private final IntConsumer whenPicked;
+    private final CaptureColumns columns = new CaptureColumns(this, LETTERS);
     private AuditResult audit;
     private CaptureScale scale;
     private boolean byPeriod;
@@ -87,7 +85,7 @@ final class StaircasePlot extends Canvas {
         Rectangle client = getClientArea();
         int line = gc.getFontMetrics().getHeight();
         int left = gc.textExtent("100").x + 3 * GAP;
-        int right = LETTERS + 3 * (COLUMN_WIDTH + COLUMN_GAP) + GAP;
+        int right = LETTERS + columns.width() + GAP;
         int top = line + 3 * GAP;
         return new Rectangle(left, top, Math.max(10, client.width - left - right), Math.max(10, client.height - top - 2 * line - 3 * GAP));
     }
@@ -108,7 +106,7 @@ final class StaircasePlot extends Canvas {
         }
         paintReached(gc, area);
         paintLetters(gc, area);
-        paintColumns(gc, area);
+        columns.paint(gc, area, modal());
     }
 
     /** The translations that have mass, those not judged first, so that judged lines lie on top. */
@@ -145,59 +143,20 @@ final class StaircasePlot extends Canvas {
     private void paintTicks(GC gc, Rectangle area) {
         int y = area.y + area.height;
         int end = area.x - 1000;
-        for (Tick tick : ticks()) {
-            int x = x(area, tick.position);
-            int half = gc.textExtent(tick.text).x / 2;
+        for (CaptureScale.Tick tick : scale.ticks()) {
+            int x = x(area, tick.position());
+            int half = gc.textExtent(tick.text()).x / 2;
             if (x - half < end + 2 * GAP || x + half > area.x + area.width + half) {
                 continue;
             }
             gc.setForeground(ThemeColours.rule(this));
             gc.drawLine(x, y, x, y + GAP);
             gc.setForeground(ThemeColours.secondaryText(this));
-            gc.drawText(tick.text, x - half, y + GAP, true);
+            gc.drawText(tick.text(), x - half, y + GAP, true);
             end = x + half;
         }
         String axis = scale.isByPeriod() ? Messages.Capture_axisPeriod : Messages.Capture_axisNumber;
         gc.drawText(axis, area.x + area.width - gc.textExtent(axis).x, y + GAP + gc.getFontMetrics().getHeight(), true);
-    }
-
-    private record Tick(double position, String text) {
-    }
-
-    private List<Tick> ticks() {
-        return scale.isByPeriod() ? periodTicks() : numberTicks();
-    }
-
-    private List<Tick> numberTicks() {
-        int count = modal().modes().size();
-        int step = niceStep(count);
-        List<Tick> ticks = new ArrayList<>();
-        for (int number = step == 1 ? 1 : step; number <= count; number += step) {
-            ticks.add(new Tick(scale.position(number - 1), Integer.toString(number)));
-        }
-        return ticks;
-    }
-
-    private static int niceStep(int count) {
-        for (int step : new int[] {1, 2, 5, 10, 20, 50, 100}) {
-            if (count / step <= 12) {
-                return step;
-            }
-        }
-        return 200;
-    }
-
-    private List<Tick> periodTicks() {
-        List<Tick> ticks = new ArrayList<>();
-        for (int power = 3; power >= -5; power--) {
-            for (int lead : new int[] {5, 2, 1}) {
-                double period = lead * Math.pow(10, power);
-                if (period <= scale.longest() && period >= scale.shortest()) {
-                    ticks.add(new Tick(scale.positionOf(period), Numbers.significant(period, 1)));
-                }
-            }
-        }
-        return ticks;
     }
 
     private void paintSelected(GC gc, Rectangle area) {
@@ -311,46 +270,6 @@ final class StaircasePlot extends Canvas {
             gc.setForeground(DirectionColours.of(upwards.get(i)));
             gc.drawText(upwards.get(i).name(), area.x + area.width + GAP, tops[i] + shift, true);
         }
-    }
-
-    private void paintColumns(GC gc, Rectangle area) {
-        int x = area.x + area.width + LETTERS + COLUMN_GAP / 2;
-        for (Direction direction : List.of(Direction.X, Direction.Y, Direction.Z)) {
-            paintColumn(gc, new Rectangle(x, area.y, COLUMN_WIDTH, area.height), direction);
-            x += COLUMN_WIDTH + COLUMN_GAP;
-        }
-    }
-
-    private void paintColumn(GC gc, Rectangle column, Direction direction) {
-        boolean massive = modal().hasMass(direction);
-        double captured = massive ? Math.max(0, Math.min(1, modal().capture(direction))) : 0;
-        int top = y(column, captured);
-        gc.setBackground(DirectionColours.of(direction));
-        gc.fillRectangle(column.x, top, column.width, column.y + column.height - top);
-        gc.setForeground(DirectionColours.of(direction));
-        gc.setLineWidth(1);
-        if (massive) {
-            hatch(gc, new Rectangle(column.x, column.y, column.width, top - column.y));
-            gc.drawRectangle(column);
-        }
-        gc.setForeground(getForeground());
-        String name = direction.name();
-        int below = column.y + column.height + GAP;
-        gc.drawText(name, column.x + (column.width - gc.textExtent(name).x) / 2, below, true);
-        String value = massive ? Numbers.percentNumber(captured) : "–";
-        gc.setForeground(ThemeColours.secondaryText(this));
-        gc.drawText(value, column.x + (column.width - gc.textExtent(value).x) / 2, below + gc.getFontMetrics().getHeight(), true);
-    }
-
-    private static void hatch(GC gc, Rectangle box) {
-        if (box.height <= 0) {
-            return;
-        }
-        gc.setClipping(box);
-        for (int offset = -box.height; offset < box.width; offset += HATCH) {
-            gc.drawLine(box.x + offset, box.y + box.height, box.x + offset + box.height, box.y);
-        }
-        gc.setClipping((Rectangle) null);
     }
 
     private int x(Rectangle area, double position) {

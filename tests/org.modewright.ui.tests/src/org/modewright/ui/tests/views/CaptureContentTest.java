@@ -94,6 +94,19 @@ class CaptureContentTest {
     }
 
     @Test
+    void ticksAreRoundAndFew() {
+        assertEquals(List.of("1", "2", "3"), new CaptureScale(result(), false).ticks().stream().map(CaptureScale.Tick::text).toList());
+        assertEquals(List.of("1", "0.5", "0.2", "0.1"), new CaptureScale(result(), true).ticks().stream().map(CaptureScale.Tick::text).toList());
+        SmallResults many = new SmallResults();
+        for (int mode = 1; mode <= 96; mode++) {
+            many.mode(mode, 0.01, 0.01);
+        }
+        List<CaptureScale.Tick> ticks = new CaptureScale(many.build(), false).ticks();
+        assertEquals(List.of("10", "20", "30", "40", "50", "60", "70", "80", "90"), ticks.stream().map(CaptureScale.Tick::text).toList());
+        assertEquals(10.0 / 96, ticks.get(0).position(), ROUND_OFF);
+    }
+
+    @Test
     void theLedgerListsWhatMovesWhatIsHeldAndWhatIsMissed() {
         List<MassRow> rows = MassRow.of(result());
         assertEquals(List.of("Can move", "self", "dead", "Captured by 3 modes", "Missing", "On supports", "self", "dead"),

@@ -17,6 +17,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.dnd.Clipboard;
 import org.eclipse.swt.dnd.TextTransfer;
 import org.eclipse.swt.graphics.ImageData;
+import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.extension.ExtendWith;
@@ -65,6 +66,15 @@ class ResultViewsTest {
         workbench.view(UiIds.CAPTURE_VIEW).chooseTab("capture.tabs", 0);
         workbench.view(UiIds.DOMINANCE_VIEW).chooseTab("dominance.tabs", 0);
         workbench.view(UiIds.DOMINANCE_VIEW).chooseMenu(RollUp.ELEMENT.name());
+    }
+
+    @AfterEach
+    void leaveTheViewsAsTheyWere() {
+        forgetEarlierChoices();
+        ShapeView shape = (ShapeView) workbench.view(UiIds.SHAPE_VIEW).part();
+        if (workbench.ask(() -> shape.canvas().isVisible() && !shape.isPlaying())) {
+            workbench.view(UiIds.SHAPE_VIEW).press("canvas", ' ', ' ');
+        }
     }
 
     private int selectedMode() {
