@@ -45,7 +45,11 @@ final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
         IWorkbenchWindow window = getWindowConfigurer().getWindow();
         new WindowTitle(getWindowConfigurer()).follow();
         IWorkbenchPage page = window.getActivePage();
-        if (page == null || page.getEditorReferences().length > 0) {
+        if (page == null) {
+            return;
+        }
+        if (page.getEditorReferences().length > 0) {
+            activateEditor(page);
             return;
         }
         try {
@@ -53,5 +57,14 @@ final class ModewrightWindowAdvisor extends WorkbenchWindowAdvisor {
         } catch (CommandException failure) {
             ILog.of(ModewrightWindowAdvisor.class).error("The start page could not be opened.", failure);
         }
+    }
+
+    /** An editor that is restored but not active leaves the outline empty. */
+    private static void activateEditor(IWorkbenchPage page) {
+        page.getWorkbenchWindow().getShell().getDisplay().asyncExec(() -> {
+            if (page.getActiveEditor() != null) {
+                page.activate(page.getActiveEditor());
+            }
+        });
     }
 }

@@ -80,7 +80,7 @@ final class EditorActions {
     }
 
     private void rename() {
-        if (!TextKeys.apply(display()) && !editor.selected().isEmpty()) {
+        if (!TextKeys.apply(display()) && editor.getEditingDomain() != null) {
             editor.activePage().rename();
         }
     }

@@ -24,7 +24,7 @@ import org.modewright.ui.widgets.ThemeColours;
 abstract class FieldControl {
 
     private static final int NARROW = 60;
-    private static final int WIDEST_LABEL = 100;
+    private static final int WIDEST_LABEL = 112;
     private static final int EXPLAINED = 120;
 
     /**

@@ -60,7 +60,7 @@ public final class LoadsPage implements EditorPage {
         patterns = new ObjectTable(left, context, "loads.patterns", this::patternsSelected);
         fill(patterns.table());
         masses = new MassTable(section(top), context);
-        top.setWeights(50, 50);
+        top.setWeights(40, 60);
         Composite below = section(rows);
         loadsTitle = label(below, "");
         loadsTitle.setData(UiIds.WIDGET_ID, "loads.title");
@@ -73,7 +73,7 @@ public final class LoadsPage implements EditorPage {
                 () -> context.delete(loads().selected()));
         loads = new ObjectTable(below, context, "loads.loads", this::loadsSelected);
         fill(loads.table());
-        rows.setWeights(46, 54);
+        rows.setWeights(50, 50);
         form = new PropertyForm(parts, context, Messages.Form_nothingInLoads);
         sum = new MassSum(rows.getDisplay(), masses::show);
         rows.addListener(SWT.Dispose, event -> sum.cancel());
@@ -130,7 +130,7 @@ public final class LoadsPage implements EditorPage {
         modelChanged();
         patterns.select(List.of(created));
         patternsSelected(List.of(created));
-        patterns.rename();
+        patterns.editName();
     }
 
     private <T> T selectedOr(Class<T> kind, List<T> all) {
@@ -252,7 +252,7 @@ public final class LoadsPage implements EditorPage {
 
     @Override
     public void rename() {
-        patterns.rename();
+        focused().editCell();
     }
 
     @Override

@@ -24,8 +24,9 @@ import org.modewright.ui.widgets.Numbers;
 final class MassTable {
 
     private static final String AXES = "XYZ";
-    private static final int SOURCE_WIDTH = 88;
+    private static final int SOURCE_WIDTH = 84;
     private static final int MASS_WIDTH = 64;
+    private static final int FACTOR_WIDTH = 184;
 
     private final EditorContext context;
     private final Label title;
@@ -36,9 +37,11 @@ final class MassTable {
         this.context = context;
         title = new Label(parent, SWT.NONE);
         title.setData(UiIds.WIDGET_ID, "loads.massNote");
-        title.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false, 2, 1));
+        title.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
         Composite factor = new Composite(parent, SWT.NONE);
-        factor.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false, 2, 1));
+        GridData beside = new GridData(SWT.FILL, SWT.CENTER, false, false);
+        beside.widthHint = FACTOR_WIDTH;
+        factor.setLayoutData(beside);
         GridLayout layout = new GridLayout(2, false);
         layout.marginWidth = 0;
         layout.marginHeight = 0;

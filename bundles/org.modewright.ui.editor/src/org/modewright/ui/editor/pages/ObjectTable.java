@@ -321,21 +321,27 @@ final class ObjectTable {
     }
 
     private void key(Event event) {
-        int row = table.getSelectionIndex();
-        if (row < 0 || event.stateMask != 0) {
-            return;
-        }
-        if (event.keyCode == SWT.F2 || event.keyCode == SWT.CR || event.keyCode == SWT.KEYPAD_CR) {
-            edit(row, column, false);
+        boolean opens = event.keyCode == SWT.F2 || event.keyCode == SWT.CR || event.keyCode == SWT.KEYPAD_CR;
+        if (opens && event.stateMask == 0) {
+            editCell();
             event.doit = false;
         }
     }
 
-    /** Edits the names of the first selected row. */
-    void rename() {
-        if (table.getSelectionIndex() >= 0) {
-            edit(table.getSelectionIndex(), 0, false);
+    /** Edits the name of the first selected row. */
+    void editName() {
+        column = 0;
+        editCell();
+    }
+
+    /** Edits the cell of the first selected row in the column last pointed at, or the next one that can be edited. */
+    void editCell() {
+        int row = table.getSelectionIndex();
+        int at = column;
+        while (at < fields.size() && !fields.get(at).isEditable()) {
+            at++;
         }
+        edit(row, at, false);
     }
 
     private void edit(int row, int at, boolean byMouse) {

@@ -188,7 +188,7 @@ public final class TablesPage implements EditorPage {
         context.execute(context.commands().create(created));
         modelChanged();
         selectHere(Set.of(created.getId()));
-        table.rename();
+        table.editName();
     }
 
     private void duplicate() {
@@ -303,7 +303,7 @@ public final class TablesPage implements EditorPage {
 
     @Override
     public void rename() {
-        table.rename();
+        table.editCell();
     }
 
     @Override
