@@ -9,7 +9,7 @@ public final class Messages extends NLS {
     public static String Page_tables;
     public static String Page_loads;
     public static String Page_analysis;
-    public static String Error_title;
+    public static String Error_noFile;
     public static String Error_reload;
     public static String Save_failed;
     public static String Undo;
@@ -101,6 +101,8 @@ public final class Messages extends NLS {
     public static String Analysis_directions;
     public static String Find;
     public static String Error_page;
+    public static String Error_file;
+    public static String Error_place;
 
     static {
         NLS.initializeMessages("org.modewright.ui.editor.messages", Messages.class);

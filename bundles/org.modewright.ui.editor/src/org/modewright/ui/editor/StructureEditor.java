@@ -91,7 +91,7 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     public void init(IEditorSite site, IEditorInput input) throws PartInitException {
         if (!(input instanceof IFileEditorInput)) {
-            throw new PartInitException(Messages.Error_title);
+            throw new PartInitException(Messages.Error_noFile);
         }
         super.init(site, input);
         setPartName(input.getName());

@@ -1,6 +1,8 @@
 package org.modewright.ui.editor.pages;
 
+import java.nio.file.Path;
 import java.util.Set;
+import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.modewright.model.ModelFileException;
@@ -15,7 +17,13 @@ public final class ErrorPage implements EditorPage {
 
     public ErrorPage(Composite parent, ModelFileException failure, Runnable again) {
         body = new EmptyState(parent);
-        body.show(failure.getMessage(), Messages.Error_reload, again);
+        body.show(text(failure), Messages.Error_reload, again);
+    }
+
+    private static String text(ModelFileException failure) {
+        String name = Path.of(failure.file()).getFileName().toString();
+        String place = failure.line() > 0 ? NLS.bind(Messages.Error_place, failure.line(), failure.column()) + " " : "";
+        return NLS.bind(Messages.Error_file, name) + "\n\n" + place + failure.reason() + "\n\n" + failure.remedy();
     }
 
     @Override

@@ -1,8 +1,10 @@
 package org.modewright.ui.editor.pages;
 
 import java.util.Set;
+import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
+import org.eclipse.swt.widgets.Event;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.Member;
 import org.modewright.model.structure.NodalMass;
@@ -28,7 +30,17 @@ public final class SpaceTab implements EditorPage {
         parts = new SideBySide(parent, "space", true);
         space = new SpacePage(parts.main(), context.session(), context::model);
         form = new PropertyForm(parts, context, Messages.Form_nothingInSpace);
+        space.canvas().addListener(SWT.MouseDown, this::pressed);
         context.offerMenu(space.canvas());
+    }
+
+    /** The context menu is about what the pointer is on, unless that belongs to what is selected anyway. */
+    private void pressed(Event event) {
+        String id = event.button == 3 ? space.canvas().idAt(event.x, event.y) : null;
+        if (id != null && !context.session().selection().elementIds().contains(id)) {
+            context.select(Set.of(id), this);
+            form.select(Set.of(id));
+        }
     }
 
     /** The drawing. */

@@ -45,6 +45,7 @@ final class WindowAuditSession implements AuditSession {
 
     private Target target = Target.NONE;
     private StructuralModel loaded;
+    private boolean readFromFile;
     private StoredRun run;
     private String problem;
     private AuditSelection selection = AuditSelection.NONE;
@@ -200,8 +201,18 @@ final class WindowAuditSession implements AuditSession {
             target.editor().addModelListener(edited);
             new RecentModels().opened(target.file());
         }
-        reader.read(target.file(), target.editor() == null);
+        readFile();
         follow();
+    }
+
+    private void readFile() {
+        readFromFile = isHeldByNoEditor();
+        reader.read(target.file(), readFromFile);
+    }
+
+    /** An editor that cannot read its file holds no model either; then the reader finds out why. */
+    private boolean isHeldByNoEditor() {
+        return target.editor() == null || target.editor().getLiveModel() == null;
     }
 
     /** A saved model that has been run before is run again, if the user wants that; defects are for the markers to tell. */
@@ -225,6 +236,9 @@ final class WindowAuditSession implements AuditSession {
 
     private void modelEdited() {
         changes.fire(Change.MODEL);
+        if (readFromFile || isHeldByNoEditor()) {
+            readFile();
+        }
         if (run != null) {
             freshness.edited();
             changes.fire(Change.RESULT);
