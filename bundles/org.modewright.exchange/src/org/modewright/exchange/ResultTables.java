@@ -157,7 +157,7 @@ public final class ResultTables {
     }
 
     private static TableText mass(MassLedger ledger) {
-        TableText table = new TableText(List.of("source", "direction", "movable (kg)", "on supports (kg)"));
+        TableText table = new TableText(List.of("origin", "direction", "movable (kg)", "on supports (kg)"));
         for (MassSource source : ledger.sources()) {
             for (int i = 0; i < TRANSLATIONS.size(); i++) {
                 table.text(source.name()).text(TRANSLATIONS.get(i).word()).number(source.movable()[i]).number(source.onSupports()[i]).end();

@@ -9,6 +9,7 @@ import org.modewright.numerics.EigenRequest;
 import org.modewright.numerics.EigenSession;
 import org.modewright.numerics.EigenSolvers;
 import org.modewright.numerics.Factorisation;
+import org.modewright.numerics.Factoriser;
 import org.modewright.numerics.Factorisers;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SpectrumCertificate;
@@ -119,7 +120,8 @@ final class Spectrum implements AutoCloseable {
 
     /** That there is no mode below the limit asked for is counted too. */
     private Certificate noneBelowTheLimit(Progress progress) {
-        try (Factorisation factors = Factorisers.sparse(problem, progress).factorise(problem.stiffness(), problem.mass(), below, progress)) {
+        Factoriser factoriser = Factorisers.sparse(problem, progress);
+        try (Factorisation factors = factoriser.factorise(problem.stiffness(), problem.mass(), below, progress)) {
             int counted = factors.inertia().negative();
             return new Certificate(counted == 0, frequency(below), counted, 0, 0, 0);
         }

@@ -6,17 +6,19 @@ import java.util.function.ToDoubleFunction;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.Vector;
 
-/** Lengths and planes, in the length unit of the model. */
-final class Geometry {
+/** Points and arms of a structure as arrays of three, in the length unit of the model. */
+public final class Geometry {
 
     private Geometry() {
     }
 
-    static double[] position(Node node) {
+    /** Where a node is. */
+    public static double[] position(Node node) {
         return new double[] {node.getX(), node.getY(), node.getZ()};
     }
 
-    static double[] end(Node node, Vector offset) {
+    /** The end of a member at a node; the offset may be null. */
+    public static double[] end(Node node, Vector offset) {
         double[] p = position(node);
         return offset == null ? p : new double[] {p[0] + offset.getX(), p[1] + offset.getY(), p[2] + offset.getZ()};
     }
@@ -26,23 +28,24 @@ final class Geometry {
         return Math.max(Math.abs(p[0]), Math.max(Math.abs(p[1]), Math.abs(p[2])));
     }
 
-    static double distance(double[] a, double[] b) {
+    public static double distance(double[] a, double[] b) {
         return norm(minus(a, b));
     }
 
-    static double[] minus(double[] a, double[] b) {
+    /** From b to a. */
+    public static double[] minus(double[] a, double[] b) {
         return new double[] {a[0] - b[0], a[1] - b[1], a[2] - b[2]};
     }
 
-    static double[] cross(double[] a, double[] b) {
+    public static double[] cross(double[] a, double[] b) {
         return new double[] {a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]};
     }
 
-    static double dot(double[] a, double[] b) {
+    public static double dot(double[] a, double[] b) {
         return a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
     }
 
-    static double norm(double[] a) {
+    public static double norm(double[] a) {
         return Math.sqrt(dot(a, a));
     }
 

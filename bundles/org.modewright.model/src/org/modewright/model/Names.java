@@ -35,18 +35,24 @@ public final class Names {
             Map.entry(StructurePackage.Literals.MULTI_POINT_TIE, "Tie "),
             Map.entry(StructurePackage.Literals.LOAD_PATTERN, "Load "));
 
-    /** Features whose names in the file are too short for a sentence. */
+    /** Features whose names in the file are no words for a sentence. */
     private static final Map<EStructuralFeature, String> FEATURES = Map.ofEntries(
-            Map.entry(StructurePackage.Literals.MATERIAL__YOUNG, "Young's modulus"),
+            Map.entry(StructurePackage.Literals.MATERIAL__YOUNG, "modulus of elasticity"),
             Map.entry(StructurePackage.Literals.MATERIAL__POISSON, "Poisson's ratio"),
             Map.entry(StructurePackage.Literals.MATERIAL__SHEAR, "shear modulus"),
-            Map.entry(StructurePackage.Literals.FRAME_SECTION__IY, "second moment iy"),
-            Map.entry(StructurePackage.Literals.FRAME_SECTION__IZ, "second moment iz"),
+            Map.entry(StructurePackage.Literals.FRAME_SECTION__IY, "second moment Iy"),
+            Map.entry(StructurePackage.Literals.FRAME_SECTION__IZ, "second moment Iz"),
             Map.entry(StructurePackage.Literals.FRAME_SECTION__TORSION, "torsion constant"),
             Map.entry(StructurePackage.Literals.MEMBER__START_FREE, "releases at the start"),
             Map.entry(StructurePackage.Literals.MEMBER__END_FREE, "releases at the end"),
             Map.entry(StructurePackage.Literals.MEMBER__START_RIGID, "rigid zone at the start"),
             Map.entry(StructurePackage.Literals.MEMBER__END_RIGID, "rigid zone at the end"),
+            Map.entry(StructurePackage.Literals.MEMBER__AXIAL_FACTOR, "factor of EA"),
+            Map.entry(StructurePackage.Literals.MEMBER__SHEAR_YFACTOR, "factor of shear area y"),
+            Map.entry(StructurePackage.Literals.MEMBER__SHEAR_ZFACTOR, "factor of shear area z"),
+            Map.entry(StructurePackage.Literals.MEMBER__TORSION_FACTOR, "factor of GJ"),
+            Map.entry(StructurePackage.Literals.MEMBER__BENDING_YFACTOR, "factor of E Iy"),
+            Map.entry(StructurePackage.Literals.MEMBER__BENDING_ZFACTOR, "factor of E Iz"),
             Map.entry(StructurePackage.Literals.ANALYSIS_SETTINGS__MODES, "number of modes"),
             Map.entry(StructurePackage.Literals.ANALYSIS_SETTINGS__BELOW, "frequency limit"),
             Map.entry(StructurePackage.Literals.AUDIT_SETTINGS__COINCIDENCE, "distance of coincident nodes"));
@@ -131,13 +137,17 @@ public final class Names {
 
     /**
      * @param feature a feature of an object of a model
-     * @return how sentences call it: "Young's modulus", "shear area y"
+     * @return how sentences call it: "modulus of elasticity", "shear area y"
      */
     static String describe(EStructuralFeature feature) {
         return FEATURES.getOrDefault(feature, words(feature.getName()));
     }
 
-    private static String kind(EClass kind) {
+    /**
+     * @param kind class of an object of a model
+     * @return how sentences call it: "member", "frame section", "tie"
+     */
+    public static String kind(EClass kind) {
         return kind == StructurePackage.Literals.MULTI_POINT_TIE ? "tie" : words(kind.getName());
     }
 

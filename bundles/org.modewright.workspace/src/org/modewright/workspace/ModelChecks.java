@@ -2,7 +2,6 @@ package org.modewright.workspace;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import org.eclipse.emf.ecore.EObject;
 import org.modewright.audit.AuditRequest;
 import org.modewright.audit.Finding;
@@ -11,6 +10,7 @@ import org.modewright.audit.ObjectRef;
 import org.modewright.audit.Severity;
 import org.modewright.fem.Snapshot;
 import org.modewright.model.Defect;
+import org.modewright.model.Names;
 import org.modewright.model.WellFormedness;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.StructuralModel;
@@ -41,13 +41,9 @@ public final class ModelChecks {
         for (EObject part = object; part != null; part = part.eContainer()) {
             if (part instanceof Identified identified && identified.getId() != null) {
                 String name = identified.getName() == null ? identified.getId() : identified.getName();
-                return List.of(new ObjectRef(kind(part), identified.getId(), name));
+                return List.of(new ObjectRef(Names.kind(part.eClass()), identified.getId(), name));
             }
         }
         return List.of();
-    }
-
-    private static String kind(EObject object) {
-        return object.eClass().getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 }

@@ -209,7 +209,7 @@ class ResultFileTest {
         assertEquals("D2-1; K1", table("findings.csv").stream().filter(row -> row.get("finding").equals("nodes-not-joined")).findFirst()
                 .orElseThrow().get("objects"));
         assertEquals(2, table("verdicts.csv").size());
-        double movable = table("mass.csv").stream().filter(row -> !row.get("source").equals("all") && row.get("direction").equals("x"))
+        double movable = table("mass.csv").stream().filter(row -> !row.get("origin").equals("all") && row.get("direction").equals("x"))
                 .mapToDouble(row -> Double.parseDouble(row.get("movable (kg)"))).sum();
         // five sources of some 1e5 kg: rounding far below a milligram
         assertEquals(demo.modal().mass().movable()[0], movable, 1e-6);

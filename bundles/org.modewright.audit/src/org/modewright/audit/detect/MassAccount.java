@@ -73,8 +73,8 @@ final class MassAccount implements FindingDetector {
         if (Math.abs(balance) > context.thresholds().massBalance()) {
             findings.add(new Finding(BALANCE, Severity.ERROR, List.of(), "The mass given and the mass in the matrices differ by "
                     + Figures.significant(100 * Math.abs(balance), 2) + " %, so some of it was lost or counted twice.",
-                    "Compare the masses by source with your own sums; look at ties and links that stretch when the structure moves as a"
-                            + " rigid body."));
+                    "Compare the lines of the mass table with your own sums; look at ties and links that stretch when the structure moves"
+                            + " as a rigid body."));
         }
     }
 }

@@ -1,6 +1,7 @@
 package org.modewright.exchange.internal.tables;
 
 import org.modewright.exchange.internal.tables.Row.Range;
+import org.modewright.model.Geometry;
 import org.modewright.model.structure.FrameSection;
 import org.modewright.model.structure.Material;
 import org.modewright.model.structure.Member;
@@ -76,7 +77,7 @@ final class ElementTables {
         if (start == null || end == null) {
             return;
         }
-        double length = distance(start, end);
+        double length = Geometry.distance(Geometry.position(start), Geometry.position(end));
         if (start == end || length == 0) {
             row.problem("end", start == end ? "the member ends at the node at which it starts"
                     : "the member has no length; its nodes coincide");
@@ -84,10 +85,6 @@ final class ElementTables {
             row.problem(member.getStartRigid() > 0 ? "start_rigid" : "end_rigid",
                     "the rigid end zones take up the whole member; its length is " + length);
         }
-    }
-
-    private static double distance(Node a, Node b) {
-        return Math.hypot(Math.hypot(a.getX() - b.getX(), a.getY() - b.getY()), a.getZ() - b.getZ());
     }
 
     void spring(Row row) {

@@ -5,6 +5,7 @@ import java.util.List;
 import org.eclipse.emf.common.command.Command;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 import org.eclipse.emf.edit.domain.EditingDomain;
+import org.modewright.model.Geometry;
 import org.modewright.model.Ids;
 import org.modewright.model.Names;
 import org.modewright.model.structure.LoadPattern;
@@ -13,7 +14,6 @@ import org.modewright.model.structure.MemberLoad;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructurePackage;
-import org.modewright.model.structure.Vector;
 
 /** Splits a member in two at a node. */
 final class MemberSplit {
@@ -38,29 +38,16 @@ final class MemberSplit {
         if (member.getStart() == null || member.getEnd() == null) {
             throw new IllegalArgumentException(Texts.get("splitNoEnds", Names.describe(member)));
         }
-        double[] start = end(member.getStart(), member.getStartOffset());
-        double[] axis = minus(end(member.getEnd(), member.getEndOffset()), start);
-        double[] toNode = minus(new double[] {at.getX(), at.getY(), at.getZ()}, start);
-        double length = Math.sqrt(dot(axis, axis));
-        double along = dot(toNode, axis) / length;
-        double off = Math.sqrt(Math.max(0, dot(toNode, toNode) - along * along));
+        double[] start = Geometry.end(member.getStart(), member.getStartOffset());
+        double[] axis = Geometry.minus(Geometry.end(member.getEnd(), member.getEndOffset()), start);
+        double[] toNode = Geometry.minus(Geometry.position(at), start);
+        double length = Geometry.norm(axis);
+        double along = Geometry.dot(toNode, axis) / length;
+        double off = Math.sqrt(Math.max(0, Geometry.dot(toNode, toNode) - along * along));
         boolean between = along > member.getStartRigid() && length - along > member.getEndRigid() && off <= ON_AXIS * length;
         if (at == member.getStart() || at == member.getEnd() || !between) {
             throw new IllegalArgumentException(Texts.get("splitNotBetween", Names.describe(at), Names.describe(member)));
         }
-    }
-
-    private static double[] end(Node node, Vector offset) {
-        return offset == null ? new double[] {node.getX(), node.getY(), node.getZ()}
-                : new double[] {node.getX() + offset.getX(), node.getY() + offset.getY(), node.getZ() + offset.getZ()};
-    }
-
-    private static double[] minus(double[] a, double[] b) {
-        return new double[] {a[0] - b[0], a[1] - b[1], a[2] - b[2]};
-    }
-
-    private static double dot(double[] a, double[] b) {
-        return a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
     }
 
     Command command() {
