@@ -98,9 +98,14 @@ public final class AuditJob extends Job {
 
     private Outcome compute(IProgressMonitor monitor) {
         try {
+            RulePacks packs = rulePacks();
+            if (packs.all().stream().noneMatch(pack -> pack.id().equals(request.rulePack()))) {
+                return failed("There is no rule pack \"" + request.rulePack() + "\". Choose another one in the model's settings, or name "
+                        + "the folder that holds it in the preferences.", null);
+            }
             MonitorProgress progress = new MonitorProgress(monitor, getName());
             String hash = Snapshots.sha256(copy);
-            AuditResult result = new AuditRun(rulePacks(), List.of()).run(snapshot, request, progress);
+            AuditResult result = new AuditRun(packs, List.of()).run(snapshot, request, progress);
             return new Outcome(new StoredRun(result, hash, Instant.now()), null, Status.OK_STATUS);
         } catch (CancelledException | OperationCanceledException cancelled) {
             return new Outcome(null, null, Status.CANCEL_STATUS);

@@ -103,6 +103,18 @@ class AuditJobTest {
     }
 
     @Test
+    void aRulePackThatIsNotThereIsNoFaultOfTheProgram() throws Exception {
+        StructuralModel model = TemporaryProject.cantilever();
+        model.getAudit().setRulePack("house-rules");
+        IFile file = project.write("mast.modewright", model);
+        AuditJob.of(file, model, registry).schedule();
+        assertTrue(ends.ended.await(60, TimeUnit.SECONDS));
+        assertEquals("There is no rule pack \"house-rules\". Choose another one in the model's settings, or name the folder that holds it"
+                + " in the preferences.", ends.problem);
+        assertEquals(List.of(), ends.runs);
+    }
+
+    @Test
     void findingsOfTheRunBecomeMarkersAndThoseOfTheModelAreNotRepeated() throws Exception {
         StructuralModel model = TemporaryProject.cantilever();
         model.getMembers().remove(2);
