@@ -4,7 +4,7 @@ package org.modewright.numerics;
  * Eigenpairs, ascending. The arrays are shared, not copied.
  *
  * @param values &lambda;<sub>i</sub>, ascending; where K is singular or nearly so, exactly 0 if |&lambda;| is below the round-off of K
- *        and of the shift &sigma; that the solution went through, |&lambda;| &le; 16 &epsilon; (|&phi;|<sup>T</sup>|K||&phi;| + |&sigma;|)
+ *        and of the shift &sigma; that the solution went through, |&lambda;| &le; 64 &epsilon; (|&phi;|<sup>T</sup>|K||&phi;| + |&sigma;|)
  *        with &epsilon; = 2<sup>-52</sup>
  * @param vectors vectors[i] = &phi;<sub>i</sub> of length n with &phi;<sub>i</sub><sup>T</sup>M&phi;<sub>j</sub> = &delta;<sub>ij</sub>,
  *        its largest component positive

@@ -535,4 +535,31 @@ class EigenSolverContractTest {
             assertEquals(chain, pairs.values()[j], 1e-9 * chain);
         }
     }
+
+    /** Motions without stiffness beside a buckled one: the estimate of the lowest elastic value is the negative one, and no shift. */
+    @ParameterizedTest
+    @MethodSource("solvers")
+    void aBuckledMotionAmongFreeOnesSpoilsNoOtherMode(EigenSolver solver) {
+        int n = 40;
+        SymmetricMatrix.Builder k = SymmetricMatrix.builder(n + 3);
+        SymmetricMatrix.Builder m = SymmetricMatrix.builder(n + 3);
+        for (int i = 0; i < n + 3; i++) {
+            m.add(i, i, 1000);
+        }
+        for (int i = 0; i < n; i++) {
+            k.add(i, i, i + 1 < n ? 2e7 : 1e7);
+            if (i > 0) {
+                k.add(i, i - 1, -1e7);
+            }
+        }
+        k.add(n, n, -400);
+        EigenPairs pairs = solve(solver, new EigenProblem(k.build(), m.build()), EigenRequest.lowest(9));
+        assertEquals(-0.4, pairs.values()[0], 1e-12);
+        assertEquals(0.0, pairs.values()[1], 0.0);
+        assertEquals(0.0, pairs.values()[2], 0.0);
+        for (int j = 3; j < 9; j++) {
+            double chain = 4e4 * Math.pow(Math.sin((2 * j - 5) * Math.PI / (2.0 * (2 * n + 1))), 2);
+            assertEquals(chain, pairs.values()[j], 1e-9 * chain);
+        }
+    }
 }

@@ -9,7 +9,6 @@ import org.modewright.numerics.Progress;
 /** Makes the answer of a solver from purified vectors: measures residuals and bounds errors. */
 final class EigenPairAssembly {
 
-    private static final double ROUND_OFF = 16.0 * Math.ulp(1.0);
     /** Values below this share of the shift are taken from the Rayleigh quotient. */
     private static final double NEAR_ZERO = 1e-3;
     private static final int PANEL = 8;
@@ -53,21 +52,13 @@ final class EigenPairAssembly {
         for (int i = 0; i < cleaned.length; i++) {
             if (Math.abs(cleaned[i]) <= NEAR_ZERO * Math.abs(shifted.shift())) {
                 double quotient = problem.stiffness().quadratic(vectors[i]);
-                double roundOff = ROUND_OFF * (energyOfSizes(vectors[i]) + Math.abs(shifted.shift()));
+                double sizes = EigenPairChecks.energyOfSizes(problem.stiffness(), vectors[i]);
+                double roundOff = EigenPairChecks.ENERGY_ROUND_OFF * (sizes + Math.abs(shifted.shift()));
                 cleaned[i] = Math.abs(quotient) <= roundOff ? 0.0 : quotient;
             }
         }
         Arrays.sort(cleaned);
         return cleaned;
-    }
-
-    private double energyOfSizes(double[] vector) {
-        double[] size = EigenPairChecks.absoluteProduct(problem.stiffness(), vector);
-        double energy = 0.0;
-        for (int k = 0; k < size.length; k++) {
-            energy += Math.abs(vector[k]) * size[k];
-        }
-        return energy;
     }
 
     private static void orient(double[] vector) {

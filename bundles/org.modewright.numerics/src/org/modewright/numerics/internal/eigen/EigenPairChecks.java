@@ -8,6 +8,9 @@ import org.modewright.numerics.SymmetricMatrix;
 /** Measures of how well vectors and values solve an eigenproblem. */
 final class EigenPairChecks {
 
+    /** Share of |x|<sup>T</sup>|K||x| that x<sup>T</sup>Kx may be by the rounding of a K that was summed from products. */
+    static final double ENERGY_ROUND_OFF = 64.0 * Math.ulp(1.0);
+
     private EigenPairChecks() {
     }
 
@@ -51,6 +54,16 @@ final class EigenPairChecks {
             }
         }
         return y;
+    }
+
+    /** |x|<sup>T</sup>|K||x|. */
+    static double energyOfSizes(SymmetricMatrix matrix, double[] x) {
+        double[] size = absoluteProduct(matrix, x);
+        double energy = 0.0;
+        for (int k = 0; k < size.length; k++) {
+            energy += Math.abs(x[k]) * size[k];
+        }
+        return energy;
     }
 
     /** Largest |&phi;<sub>i</sub><sup>T</sup>M&phi;<sub>j</sub> - &delta;<sub>ij</sub>|; 0 without vectors. */

@@ -23,10 +23,10 @@ final class ShiftedProblem {
     private static final int NAMED_MOTIONS = 100;
     private static final int REMOVED_MOTIONS = 200;
     /** Eigenvalues below this share of the largest ratio of the diagonals may be round-off of the stiffness. */
-    private static final double ROUND_OFF = 1e-15;
-    /** Flexibilities below this share of one before cannot be found beside it in double precision. */
-    private static final double GAP = 1e-11;
-    private static final int ROUND_OFF_MOTIONS = 20;
+    private static final double TINY = 1e-15;
+    /** Share of a flexibility below which the next one is that of another kind of motion: a thousandth of its period. */
+    private static final double GAP = 1e-6;
+    private static final int ROUND_OFF_MOTIONS = 10;
     private static final long SEED = 4711L;
 
     private final EigenProblem problem;
@@ -73,7 +73,8 @@ final class ShiftedProblem {
             factorisation = unshifted;
             return;
         }
-        shift = -scale;
+        // The estimate may be the size of a negative eigenvalue, which a shift must not meet.
+        shift = -1.5 * scale;
         for (int attempt = 0; attempt < SHIFT_ATTEMPTS; attempt++) {
             factorisation = factorise(shift, progress);
             Inertia shifted = factorisation.inertia();
@@ -143,7 +144,7 @@ final class ShiftedProblem {
         double[] x = start();
         double flexibility = softest(held, motions, x, progress);
         double next = flexibility;
-        for (int found = 0; next * largest > 1.0 / ROUND_OFF && found < ROUND_OFF_MOTIONS; found++) {
+        for (int found = 0; (next * largest > 1.0 / TINY || isRoundOff(x)) && found < ROUND_OFF_MOTIONS; found++) {
             double before = next;
             motions = Arrays.copyOf(motions, motions.length + 1);
             motions[motions.length - 1] = x;
@@ -155,6 +156,11 @@ final class ShiftedProblem {
             }
         }
         return flexibility * largest > 1.0 ? 1.0 / flexibility : largest;
+    }
+
+    private boolean isRoundOff(double[] x) {
+        double energy = Math.abs(problem.stiffness().quadratic(x));
+        return energy <= EigenPairChecks.ENERGY_ROUND_OFF * EigenPairChecks.energyOfSizes(problem.stiffness(), x);
     }
 
     private double[] start() {
