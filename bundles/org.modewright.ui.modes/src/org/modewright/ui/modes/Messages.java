@@ -45,6 +45,7 @@ final class Messages extends NLS {
     public static String Modes_carryAll;
     public static String Modes_local;
     public static String Modes_incomplete;
+    public static String Capture_accessibleName;
     public static String Capture_overNumber;
     public static String Capture_overPeriod;
     public static String Capture_axisNumber;

@@ -39,7 +39,7 @@ final class ModesTable {
     private boolean descending;
     private int[] order = new int[0];
 
-    ModesTable(Composite parent, IntConsumer whenSelected) {
+    ModesTable(Composite parent, IntConsumer whenSelected, Runnable whenOpened) {
         table = new Table(parent, SWT.VIRTUAL | SWT.MULTI | SWT.FULL_SELECTION | SWT.BORDER);
         table.setHeaderVisible(true);
         table.setData(UiIds.WIDGET_ID, "modes.table");
@@ -47,6 +47,7 @@ final class ModesTable {
         table.addListener(SWT.PaintItem, this::paintBar);
         TextFit.install(table, index -> table.getColumn(index).getData() == ModeColumn.CHARACTER);
         table.addListener(SWT.Selection, event -> notifySelection(whenSelected));
+        table.addListener(SWT.DefaultSelection, event -> whenOpened.run());
         table.addListener(SWT.MouseMove, this::explain);
         table.addListener(SWT.Resize, event -> fitWords());
         for (ModeColumn column : ModeColumn.values()) {

@@ -2,6 +2,7 @@ package org.modewright.ui.modes;
 
 import java.util.Set;
 import java.util.stream.Collectors;
+import org.eclipse.core.runtime.ILog;
 import org.eclipse.jface.action.Action;
 import org.eclipse.jface.action.IAction;
 import org.eclipse.jface.action.IMenuManager;
@@ -21,6 +22,7 @@ import org.modewright.audit.AuditResult;
 import org.modewright.ui.AuditSelection;
 import org.modewright.ui.AuditSession;
 import org.modewright.ui.AuditSession.Change;
+import org.modewright.ui.UiIds;
 import org.modewright.ui.widgets.Images;
 import org.modewright.ui.widgets.SentenceBar;
 import org.modewright.ui.widgets.SessionPage;
@@ -58,7 +60,7 @@ public final class ModesView extends ViewPart {
         sentence = new SentenceBar(content);
         sentence.setLayoutData(new GridData(SWT.FILL, SWT.TOP, true, false));
         filterBar = new FilterBar(content, this::filterChosen);
-        table = new ModesTable(content, this::modeSelected);
+        table = new ModesTable(content, this::modeSelected, this::showShape);
         table.control().setLayoutData(new GridData(SWT.FILL, SWT.FILL, true, true));
         restoreColumns();
         contributeActions();
@@ -195,6 +197,15 @@ public final class ModesView extends ViewPart {
     private void filterChosen(ModeFilter filter) {
         table.setFilter(filter);
         filterBar.showCount(table.shownCount(), rows == null ? 0 : rows.count());
+    }
+
+    /** A double click or Enter on a mode goes to its shape. */
+    private void showShape() {
+        try {
+            getSite().getPage().showView(UiIds.SHAPE_VIEW);
+        } catch (PartInitException failure) {
+            ILog.of(ModesView.class).error(failure.getMessage(), failure);
+        }
     }
 
     private void modeSelected(int mode) {

@@ -9,6 +9,8 @@ import java.util.function.IntConsumer;
 import java.util.stream.Collectors;
 import org.eclipse.osgi.util.NLS;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.accessibility.AccessibleAdapter;
+import org.eclipse.swt.accessibility.AccessibleEvent;
 import org.eclipse.swt.graphics.GC;
 import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.graphics.Rectangle;
@@ -53,6 +55,14 @@ final class StaircasePlot extends Canvas {
         addListener(SWT.MouseMove, this::explain);
         addListener(SWT.MouseDown, this::pick);
         addListener(SWT.KeyDown, this::key);
+        addListener(SWT.FocusIn, event -> redraw());
+        addListener(SWT.FocusOut, event -> redraw());
+        getAccessible().addAccessibleListener(new AccessibleAdapter() {
+            @Override
+            public void getName(AccessibleEvent event) {
+                event.result = Messages.Capture_accessibleName;
+            }
+        });
         addListener(SWT.Traverse, event -> event.doit = event.detail != SWT.TRAVERSE_ARROW_NEXT && event.detail != SWT.TRAVERSE_ARROW_PREVIOUS);
     }
 
@@ -107,6 +117,10 @@ final class StaircasePlot extends Canvas {
         paintReached(gc, area);
         paintLetters(gc, area);
         columns.paint(gc, area, modal());
+        if (isFocusControl()) {
+            gc.setForeground(ThemeColours.link(this));
+            gc.drawRectangle(0, 0, getClientArea().width - 1, getClientArea().height - 1);
+        }
     }
 
     /** The translations that have mass, those not judged first, so that judged lines lie on top. */
