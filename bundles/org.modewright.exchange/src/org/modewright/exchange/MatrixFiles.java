@@ -7,14 +7,13 @@ import java.util.List;
 import org.modewright.exchange.internal.AtomicOutput;
 import org.modewright.exchange.internal.tables.TableText;
 import org.modewright.fem.Assembly;
+import org.modewright.fem.Components;
 
 /**
  * The matrices of a model as files: {@code NAME.K.mtx} and {@code NAME.M.mtx} over the free degrees of freedom, and {@code NAME.dofs.csv}
  * with the node and the component of each row. Everything in SI: N/m, N, N m; kg, kg m, kg m2.
  */
 public final class MatrixFiles {
-
-    private static final List<String> COMPONENTS = List.of("ux", "uy", "uz", "rx", "ry", "rz");
 
     private MatrixFiles() {
     }
@@ -42,7 +41,7 @@ public final class MatrixFiles {
         TableText table = new TableText(List.of("row", "node", "component"));
         for (int row = 0; row < assembly.freeDofs(); row++) {
             table.number(row + 1).text(assembly.snapshot().nodes().get(assembly.nodeOf(row)).name())
-                    .text(COMPONENTS.get(assembly.componentOf(row))).end();
+                    .text(Components.inFiles(assembly.componentOf(row))).end();
         }
         return table;
     }

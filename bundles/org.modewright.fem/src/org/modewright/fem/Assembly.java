@@ -121,27 +121,6 @@ public final class Assembly {
     }
 
     /**
-     * The share of the kinetic energy of each node: &phi;<sub>i</sub> &middot; (M&phi;)<sub>i</sub> with M before constraints, scaled
-     * to the sum 1; all zero where nothing with mass moves.
-     *
-     * @param free values of the free degrees of freedom
-     * @return length number of nodes
-     */
-    public double[] nodalKineticShares(double[] free) {
-        double[] products = kineticProducts(free);
-        double[] shares = new double[snapshot.nodes().size()];
-        double sum = 0.0;
-        for (int i = 0; i < products.length; i++) {
-            shares[i / Components.COUNT] += products[i];
-            sum += products[i];
-        }
-        for (int node = 0; node < shares.length; node++) {
-            shares[node] = sum == 0.0 ? 0.0 : shares[node] / sum;
-        }
-        return shares;
-    }
-
-    /**
      * &phi;<sub>j</sub> (M&phi;)<sub>j</sub> of every component j of every node, with M before constraints; their sum is
      * &phi;<sup>T</sup>M&phi;.
      *

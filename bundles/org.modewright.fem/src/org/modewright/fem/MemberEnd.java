@@ -13,14 +13,4 @@ public record MemberEnd(boolean[] released, double rigidLength, double[] offset)
     public static MemberEnd joined() {
         return new MemberEnd(new boolean[6], 0.0, new double[3]);
     }
-
-    /** Whether any component is released. */
-    public boolean hasRelease() {
-        for (boolean free : released) {
-            if (free) {
-                return true;
-            }
-        }
-        return false;
-    }
 }

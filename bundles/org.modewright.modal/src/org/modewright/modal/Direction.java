@@ -34,18 +34,4 @@ public enum Direction {
     public boolean isTranslation() {
         return ordinal() < 3;
     }
-
-    /**
-     * The direction of a file's word.
-     *
-     * @throws IllegalArgumentException if there is no such direction; the message lists them
-     */
-    public static Direction ofWord(String word) {
-        for (Direction direction : values()) {
-            if (direction.word.equalsIgnoreCase(word)) {
-                return direction;
-            }
-        }
-        throw new IllegalArgumentException("There is no direction \"" + word + "\"; directions are x, y, z, rx, ry and rz.");
-    }
 }

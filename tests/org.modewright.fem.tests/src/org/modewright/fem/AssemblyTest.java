@@ -62,7 +62,6 @@ class AssemblyTest {
         assertEquals(strain, Arrays.stream(assembly.strainEnergies(nodal)).sum(), 1e-11 * strain);
         assertEquals(kinetic, Arrays.stream(assembly.kineticEnergies(nodal)).sum(), 1e-11 * kinetic);
         assertEquals(kinetic, Arrays.stream(assembly.kineticProducts(free)).sum(), 1e-11 * kinetic);
-        assertEquals(1.0, Arrays.stream(assembly.nodalKineticShares(free)).sum(), 1e-12);
         assertEquals(assembly.carriers().size(), assembly.strainEnergies(nodal).length);
     }
 

@@ -41,6 +41,11 @@ record ElementTransformation(int[] unknowns, double[] rows) {
         return Arrays.stream(found, 0, count).sorted().distinct().toArray();
     }
 
+    /** The same with the absolute values of the factors. */
+    ElementTransformation sizes() {
+        return new ElementTransformation(unknowns, PackedMatrix.absolute(rows));
+    }
+
     /** A T by rows, A the packed matrix of the element. */
     double[] times(double[] packed) {
         int count = unknowns.length;

@@ -7,9 +7,13 @@ import org.modewright.numerics.SymmetricMatrix;
 
 /**
  * Sums T<sup>T</sup>kT and T<sup>T</sup>mT element by element over the free unknowns. An element whose components are all free or held
- * goes in as it is; one with tied components is transformed by its own rows of T.
+ * goes in as it is; one with tied components is transformed by its own rows of T. An entry that is nothing but the round-off of terms
+ * that cancel is zero: a motion that ties leave to a pin alone has no stiffness, not 1e-16 of its member's.
  */
 public final class MatrixAssembler {
+
+    /** What is left of terms that cancel to this share of their sizes is the rounding of an element's own matrix. */
+    private static final double ROUND_OFF = 64.0 * Math.ulp(1.0);
 
     private final Transformation transformation;
     private final SymmetricMatrix.Builder stiffness;
@@ -97,13 +101,17 @@ public final class MatrixAssembler {
         int[] unknowns = own.unknowns();
         int count = unknowns.length;
         double[] product = own.times(packed);
+        double[] sizes = own.sizes().times(PackedMatrix.absolute(packed));
         for (int a = 0; a < count; a++) {
             for (int b = 0; b <= a; b++) {
                 double value = 0.0;
+                double size = 0.0;
                 for (int i = 0; i < places.length; i++) {
-                    value += own.rows()[i * count + a] * product[i * count + b];
+                    double factor = own.rows()[i * count + a];
+                    value += factor * product[i * count + b];
+                    size += Math.abs(factor) * sizes[i * count + b];
                 }
-                if (value != 0.0) {
+                if (Math.abs(value) > ROUND_OFF * size) {
                     builder.add(unknowns[a], unknowns[b], value);
                 }
             }

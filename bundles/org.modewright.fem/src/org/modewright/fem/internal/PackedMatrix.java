@@ -1,5 +1,7 @@
 package org.modewright.fem.internal;
 
+import java.util.Arrays;
+
 /** Operations on small symmetric matrices, full by rows or packed as their lower triangle by rows. */
 final class PackedMatrix {
 
@@ -16,6 +18,11 @@ final class PackedMatrix {
             }
         }
         return packed;
+    }
+
+    /** The absolute values. */
+    static double[] absolute(double[] packed) {
+        return Arrays.stream(packed).map(Math::abs).toArray();
     }
 
     /**

@@ -145,9 +145,4 @@ public final class SparseFactoriser implements Factoriser {
     public long factorEntries() {
         return symbolic.factorEntries();
     }
-
-    /** Degrees of freedom in the order of elimination. */
-    public int[] eliminationOrder() {
-        return symbolic.degreeOfFreedom().clone();
-    }
 }

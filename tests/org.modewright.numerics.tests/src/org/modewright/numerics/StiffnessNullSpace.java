@@ -5,7 +5,7 @@ package org.modewright.numerics;
  * if its energy cannot be told from the round-off of K, by the rule of {@link PencilReduction}; a near mechanism with a stiffness of a
  * billionth of its neighbours' is none.
  */
-public final class StiffnessNullSpace {
+final class StiffnessNullSpace {
 
     private final Factoriser factoriser;
     private final Factorisation factorisation;
