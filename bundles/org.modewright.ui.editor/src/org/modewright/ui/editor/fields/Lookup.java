@@ -1,7 +1,10 @@
 package org.modewright.ui.editor.fields;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.osgi.util.NLS;
@@ -11,7 +14,13 @@ import org.modewright.model.structure.StructuralModel;
 /** Finds objects of the model by the names that the user types. */
 final class Lookup {
 
-    private Lookup() {
+    private final StructuralModel model;
+    private final Map<EClass, Map<String, Identified>> remembered;
+
+    /** @param remembers whether names are gathered once, for as long as nothing is edited */
+    Lookup(StructuralModel model, boolean remembers) {
+        this.model = model;
+        remembered = remembers ? new HashMap<>() : null;
     }
 
     /** All objects of a kind, in the model's order. */
@@ -32,14 +41,28 @@ final class Lookup {
      *
      * @throws IllegalArgumentException if there is none
      */
-    static Identified named(StructuralModel model, EClass kind, String name) {
+    Identified named(EClass kind, String name) {
         String wanted = name.strip();
-        return all(model, kind).stream().filter(object -> wanted.equals(object.getName())).findFirst()
-                .orElseThrow(() -> new IllegalArgumentException(NLS.bind(FieldMessages.noSuchObject, word(kind), wanted)));
+        Identified found = remembered == null ? search(kind, wanted)
+                : remembered.computeIfAbsent(kind, this::byName).get(wanted);
+        if (found == null) {
+            throw new IllegalArgumentException(NLS.bind(FieldMessages.noSuchObject, word(kind), wanted));
+        }
+        return found;
+    }
+
+    private Identified search(EClass kind, String name) {
+        return all(model, kind).stream().filter(object -> name.equals(object.getName())).findFirst().orElse(null);
+    }
+
+    private Map<String, Identified> byName(EClass kind) {
+        Map<String, Identified> names = new HashMap<>();
+        all(model, kind).forEach(object -> names.putIfAbsent(object.getName(), object));
+        return names;
     }
 
     /** A kind as sentences say it. */
     static String word(EClass kind) {
-        return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(java.util.Locale.ROOT);
+        return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 }

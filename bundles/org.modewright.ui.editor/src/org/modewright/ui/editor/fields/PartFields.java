@@ -111,7 +111,7 @@ final class PartFields {
         Object parse(String text) {
             List<Identified> nodes = new ArrayList<>();
             for (String name : pieces(text, ",")) {
-                nodes.add(Lookup.named(context().model(), StructurePackage.Literals.NODE, name));
+                nodes.add(context().lookup().named(StructurePackage.Literals.NODE, name));
             }
             return nodes.stream().distinct().toList();
         }
@@ -152,7 +152,7 @@ final class PartFields {
             TieTerm term = StructureFactory.eINSTANCE.createTieTerm();
             term.setFactor(NumberField.number(words[0]));
             term.setComponent(SimpleFields.component(words[1]));
-            term.setNode((Node) Lookup.named(context().model(), StructurePackage.Literals.NODE, words[2]));
+            term.setNode((Node) context().lookup().named(StructurePackage.Literals.NODE, words[2]));
             return term;
         }
     }

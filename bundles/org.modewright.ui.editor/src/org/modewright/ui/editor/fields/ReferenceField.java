@@ -52,6 +52,6 @@ final class ReferenceField extends FeatureField {
             }
             return null;
         }
-        return Lookup.named(context().model(), kind, text);
+        return context().lookup().named(kind, text);
     }
 }

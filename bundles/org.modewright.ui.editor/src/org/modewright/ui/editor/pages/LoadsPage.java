@@ -41,6 +41,7 @@ public final class LoadsPage implements EditorPage {
     private final ObjectTable loads;
     private final ToolItem addNodeLoad;
     private final ToolItem addMemberLoad;
+    private final ToolItem duplicateLoad;
     private final ToolItem deleteLoad;
     private final PropertyForm form;
     private final MassTable masses;
@@ -69,6 +70,7 @@ public final class LoadsPage implements EditorPage {
                 () -> addLoad(nodeLoad()));
         addMemberLoad = loadTools.add(Images.descriptor(Images.ADD), Messages.Loads_onMember, Messages.Loads_addMemberLoad,
                 "loads.addMemberLoad", () -> addLoad(memberLoad()));
+        duplicateLoad = loadTools.add(Tools.image("duplicate"), Messages.Tables_duplicate, "loads.duplicateLoad", this::duplicateLoads);
         deleteLoad = loadTools.add(Images.descriptor(Images.DELETE), Messages.Loads_delete, "loads.deleteLoad",
                 () -> context.delete(loads().selected()));
         loads = new ObjectTable(below, context, "loads.loads", this::loadsSelected);
@@ -157,6 +159,15 @@ public final class LoadsPage implements EditorPage {
         loads.table().setFocus();
     }
 
+    private void duplicateLoads() {
+        int before = pattern().getLoads().size();
+        context.execute(context.commands().duplicate(loads.selected(), 0, 0, 0));
+        modelChanged();
+        List<GravityLoad> copies = List.copyOf(pattern().getLoads().subList(before, pattern().getLoads().size()));
+        loads.select(copies);
+        loadsSelected(List.copyOf(copies));
+    }
+
     private void patternsSelected(List<EObject> chosen) {
         Set<String> ids = new LinkedHashSet<>();
         chosen.forEach(object -> ids.add(((LoadPattern) object).getId()));
@@ -189,6 +200,7 @@ public final class LoadsPage implements EditorPage {
         addNodeLoad.setEnabled(one && !context.model().getNodes().isEmpty());
         addMemberLoad.setEnabled(one && !context.model().getMembers().isEmpty());
         deletePattern.setEnabled(!patterns.selected().isEmpty());
+        duplicateLoad.setEnabled(!loads.selected().isEmpty());
         deleteLoad.setEnabled(!loads.selected().isEmpty());
     }
 

@@ -241,6 +241,9 @@ final class ObjectTable {
 
     @SuppressWarnings("unchecked")
     private static Comparator<EObject> order(Field field) {
+        if (!field.isNumber()) {
+            return Comparator.comparing(field::text, new NaturalOrder());
+        }
         return Comparator.comparing(object -> (Comparable<Object>) field.sortKey(object));
     }
 

@@ -29,9 +29,9 @@ public final class RowPaste {
 
     /** @param list the list of the model that gets the rows */
     public RowPaste(FieldContext context, EReference list) {
-        this.context = context;
+        this.context = context.forMany();
         this.list = list;
-        fields = Fields.of(context, list.getEReferenceType(), null);
+        fields = Fields.of(this.context, list.getEReferenceType(), null);
     }
 
     /**

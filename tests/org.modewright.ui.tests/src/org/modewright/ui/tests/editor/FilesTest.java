@@ -16,6 +16,7 @@ import org.eclipse.core.resources.IMarker;
 import org.eclipse.core.resources.IResource;
 import org.eclipse.core.runtime.NullProgressMonitor;
 import org.eclipse.swt.custom.CLabel;
+import org.eclipse.swt.widgets.Text;
 import org.eclipse.ui.IWorkbenchPage;
 import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.ide.IDE;
@@ -175,5 +176,53 @@ class FilesTest {
         assertTrue(driver.ask(() -> driver.find(CLabel.class, "editor.checks").getText()).startsWith("1 error"));
         workbench.execute(EditorDriver.UNDO);
         driver.until("no defect", () -> editor.checks().all().isEmpty());
+    }
+
+    @Test
+    void aSaveOverAnUnseenChangeIsAskedFor(Workbench workbench) throws Exception {
+        open(workbench);
+        rename("mine");
+        Path path = file.getLocation().toFile().toPath();
+        StructuralModel other = ModelFile.load(path);
+        other.getNodes().get(0).setName("theirs, and the workspace does not know yet");
+        ModelFile.save(other, path);
+        workbench.ui().later(() -> editor.doSave(new NullProgressMonitor()));
+        DialogObject question = workbench.dialog(Messages.Changed_title);
+        question.press(Messages.Changed_overwrite);
+        question.waitUntilClosed();
+        driver.until("the save", () -> !editor.isDirty());
+        assertEquals("mine", ModelFile.load(path).getNodes().get(0).getName());
+        assertEquals("mine", firstName());
+    }
+
+    @Test
+    void theEditorFollowsItsFile(Workbench workbench) throws Exception {
+        open(workbench);
+        rename("mine");
+        file.move(file.getProject().getFile("other.modewright").getFullPath(), true, new NullProgressMonitor());
+        driver.until("the new name", () -> "other.modewright".equals(editor.getTitle()));
+        assertEquals("mine", firstName(), "what was not saved is still there");
+        driver.run(() -> editor.doSave(new NullProgressMonitor()));
+        IFile moved = driver.ask(editor::getModelFile);
+        assertEquals("mine", ModelFile.load(moved.getLocation().toFile().toPath()).getNodes().get(0).getName());
+        assertFalse(file.exists());
+    }
+
+    @Test
+    void saveAsGoesOnWithTheNewFile(Workbench workbench) throws Exception {
+        open(workbench);
+        rename("mine");
+        workbench.ui().later(editor::doSaveAs);
+        DialogObject dialog = workbench.dialog("Save As");
+        driver.run(() -> {
+            Text name = (Text) workbench.ui().display().getFocusControl();
+            name.setText("copy");
+        });
+        dialog.press("OK");
+        dialog.waitUntilClosed();
+        driver.until("the new file", () -> "copy.modewright".equals(editor.getTitle()));
+        assertFalse(driver.ask(editor::isDirty));
+        assertEquals("N0", ModelFile.load(file.getLocation().toFile().toPath()).getNodes().get(0).getName(), "the first file stays as it was");
+        driver.until("the session to be about the new file", () -> editor.getModelFile().equals(workbench.session().modelFile()));
     }
 }
