@@ -436,4 +436,38 @@ class ConstraintTest {
                 "entries " + assembly.stiffness().entries());
         assertEquals(0, assembly.dropped().size());
     }
+
+    /**
+     * A held floor leaves its nodes the motion along its normal, and a strut in its plane with hinges at both ends resists none of it: the
+     * terms of the strut's matrix cancel, and what their rounding leaves must not pass for a stiffness.
+     */
+    @Test
+    void whatCancelsUnderTiesIsNoStiffness() {
+        Random random = new Random(17);
+        for (int trial = 0; trial < 50; trial++) {
+            double[] e = unit(new double[] {random.nextGaussian(), random.nextGaussian(), random.nextGaussian()});
+            double[] f = unit(new double[] {e[1], -e[0], 0});
+            TestStructure structure = new TestStructure();
+            Node[] nodes = new Node[4];
+            for (int k = 0; k < 4; k++) {
+                double p = 5 * random.nextGaussian();
+                double q = 5 * random.nextGaussian();
+                nodes[k] = structure.node(p * e[0] + q * f[0], p * e[1] + q * f[1], p * e[2] + q * f[2]);
+            }
+            structure.floor(nodes[0], nodes[1], nodes[2]);
+            structure.hold(nodes[0], TestStructure.ALL);
+            structure.hold(nodes[3], TestStructure.ALL);
+            TestStructure.release(structure.member(nodes[1], nodes[3], structure.section(0.01, 1e-4, 1e-4, 1e-4, 0, 0),
+                    structure.material(2e11, 0.3, 7850)), "ry rz", "rx ry rz");
+            Assembly assembly = structure.assemble();
+            for (double stiffness : assembly.stiffness().diagonal()) {
+                assertEquals(0.0, stiffness, 0.0, "trial " + trial);
+            }
+        }
+    }
+
+    private static double[] unit(double[] vector) {
+        double length = Math.sqrt(Arrays.stream(vector).map(component -> component * component).sum());
+        return Arrays.stream(vector).map(component -> component / length).toArray();
+    }
 }
