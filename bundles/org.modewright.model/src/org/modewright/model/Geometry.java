@@ -28,6 +28,7 @@ public final class Geometry {
         return Math.max(Math.abs(p[0]), Math.max(Math.abs(p[1]), Math.abs(p[2])));
     }
 
+    /** |a - b|. */
     public static double distance(double[] a, double[] b) {
         return norm(minus(a, b));
     }
@@ -37,14 +38,17 @@ public final class Geometry {
         return new double[] {a[0] - b[0], a[1] - b[1], a[2] - b[2]};
     }
 
+    /** a &times; b. */
     public static double[] cross(double[] a, double[] b) {
         return new double[] {a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]};
     }
 
+    /** a &middot; b. */
     public static double dot(double[] a, double[] b) {
         return a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
     }
 
+    /** |a|. */
     public static double norm(double[] a) {
         return Math.sqrt(dot(a, a));
     }

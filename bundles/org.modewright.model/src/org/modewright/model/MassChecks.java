@@ -4,24 +4,26 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 
 import org.modewright.model.structure.GravityLoad;
 import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.Member;
 import org.modewright.model.structure.MemberLoad;
+import org.modewright.model.structure.NodalMass;
 import org.modewright.model.structure.Node;
 import org.modewright.model.structure.NodeLoad;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructurePackage;
 
 /**
- * Load patterns that take mass away from nodes. The loads of all patterns together must give no node a negative mass: only then is the
- * mass matrix positive semidefinite whatever the elements weigh, as every eigenvalue method needs it.
+ * Load patterns that take more mass away from a node than it has: its share of the members' own mass, the masses given there and the loads
+ * of all patterns together. No motion of such a node has a positive kinetic energy.
  */
 final class MassChecks {
 
-    /** Below this share of what a node carries, up and down, the sum counts as zero: it is round-off. */
+    /** Below this share of all that goes into a node's sum, up and down, the sum counts as zero: it is round-off. */
     private static final double ROUND_OFF = 1e-12;
     private static final MathContext THREE_FIGURES = new MathContext(3);
 
@@ -36,14 +38,44 @@ final class MassChecks {
 
     void run() {
         model.getLoadPatterns().forEach(this::addPattern);
+        weights.values().removeIf(weight -> weight.ofLoads() >= 0);
+        if (weights.isEmpty()) {
+            return;
+        }
+        model.getMembers().forEach(this::addOwnMass);
+        model.getMasses().forEach(this::addNodalMass);
         Map<LoadPattern, Lack> lacks = new LinkedHashMap<>();
         for (Node node : model.getNodes()) {
             Weight weight = weights.get(node);
-            if (weight != null && weight.sum < -ROUND_OFF * weight.amount) {
+            if (weight != null && weight.isNegative()) {
                 lacks.computeIfAbsent(weight.lightest(), pattern -> new Lack()).add(node, weight);
             }
         }
         lacks.forEach(this::report);
+    }
+
+    private void addOwnMass(Member member) {
+        if (member.getStart() == null || member.getEnd() == null || member.getSection() == null || member.getMaterial() == null) {
+            return;
+        }
+        double length = Geometry.distance(Geometry.end(member.getStart(), member.getStartOffset()),
+                Geometry.end(member.getEnd(), member.getEndOffset()));
+        double half = 0.5 * model.getSelfMassFactor() * member.getMaterial().getDensity() * member.getSection().getArea() * length;
+        for (Node node : List.of(member.getStart(), member.getEnd())) {
+            addMass(node, half, half, half);
+        }
+    }
+
+    private void addNodalMass(NodalMass mass) {
+        addMass(mass.getNode(), mass.getUx(), mass.getUy(), mass.getUz());
+    }
+
+    private void addMass(Node node, double x, double y, double z) {
+        Weight weight = weights.get(node);
+        if (weight != null) {
+            double gravity = Units.gravity(model);
+            weight.addMass(gravity * x, gravity * y, gravity * z);
+        }
     }
 
     private void addPattern(LoadPattern pattern) {
@@ -74,7 +106,7 @@ final class MassChecks {
 
     private void report(LoadPattern pattern, Lack lack) {
         String others = lack.nodes == 1 ? "" : "; so it is with " + (lack.nodes - 1) + " more";
-        double mass = lack.worst.sum / Units.gravity(model);
+        double mass = lack.worst.sum() / Units.gravity(model);
         defects.error("mass-negative", lack.worst.lowestLoad(pattern), StructurePackage.Literals.GRAVITY_LOAD__VALUE,
                 ReferenceChecks.sentenceStart(pattern) + " gives " + Names.describe(lack.node) + " a negative mass, "
                         + new BigDecimal(mass).round(THREE_FIGURES).toPlainString() + " " + Units.of(model).symbol(Quantity.MASS) + others
@@ -82,17 +114,38 @@ final class MassChecks {
                 "Gravity loads count downwards positive: turn the sign of its loads, or set its mass factor to 0.");
     }
 
-    /** What the loads put on one node, in the model's unit of force. */
+    /** What bears on one node, in the model's unit of force. */
     private static final class Weight {
 
         private final Map<GravityLoad, Double> byLoad = new LinkedHashMap<>();
-        private double sum;
-        private double amount;
+        private final double[] ofMasses = new double[3];
 
         void add(GravityLoad load, double force) {
             byLoad.merge(load, force, Double::sum);
-            sum += force;
-            amount += Math.abs(force);
+        }
+
+        void addMass(double x, double y, double z) {
+            ofMasses[0] += x;
+            ofMasses[1] += y;
+            ofMasses[2] += z;
+        }
+
+        double ofLoads() {
+            return byLoad.values().stream().mapToDouble(Double::doubleValue).sum();
+        }
+
+        /** The sum in the direction that has the least mass. */
+        double sum() {
+            return ofLoads() + leastOfMasses();
+        }
+
+        boolean isNegative() {
+            double amount = byLoad.values().stream().mapToDouble(Math::abs).sum() + leastOfMasses();
+            return sum() < -ROUND_OFF * amount;
+        }
+
+        private double leastOfMasses() {
+            return Math.min(ofMasses[0], Math.min(ofMasses[1], ofMasses[2]));
         }
 
         /** The pattern that takes most away. */
@@ -122,7 +175,7 @@ final class MassChecks {
 
         void add(Node candidate, Weight weight) {
             nodes++;
-            if (node == null || weight.sum < worst.sum) {
+            if (node == null || weight.sum() < worst.sum()) {
                 node = candidate;
                 worst = weight;
             }

@@ -265,6 +265,6 @@ class LedgerTest {
         TestStructure.load(s.pattern("buoyancy", 1), node, -9806.65);
         ModelDefectsException refusal = assertThrows(ModelDefectsException.class, s::snapshot);
         assertEquals(List.of("mass-negative"), refusal.defects().stream().map(Defect::id).toList());
-        assertTrue(refusal.getMessage().contains("buoyancy") && refusal.getMessage().contains("-1000 kg"), refusal.getMessage());
+        assertTrue(refusal.getMessage().contains("buoyancy") && refusal.getMessage().contains("-500 kg"), refusal.getMessage());
     }
 }

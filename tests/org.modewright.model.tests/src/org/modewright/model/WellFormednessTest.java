@@ -26,6 +26,7 @@ import org.modewright.model.structure.LoadPattern;
 import org.modewright.model.structure.Member;
 import org.modewright.model.structure.MemberLoad;
 import org.modewright.model.structure.Node;
+import org.modewright.model.structure.NodeLoad;
 import org.modewright.model.structure.RigidFloor;
 import org.modewright.model.structure.RigidLink;
 import org.modewright.model.structure.Spring;
@@ -176,10 +177,16 @@ class WellFormednessTest {
                         m -> m.getTies().get(0).getTerms().get(1).setNode(m.getNodes().get(8))));
     }
 
-    /** The beam's 5 kN/m over 4 m put 10 kN on each of its nodes, so 10 kN is what a node load may take away again. */
+    /**
+     * The beam's 5 kN/m over 4 m put 10 kN on each of its nodes, so 10 kN is what a node load may take away again; with a factor of 0.3.
+     * The node's share of its members' own mass is 7.85 t/m3 times 0.01 m2 times (3 + 4 + 4) m / 2 = 0.43175 t, which is 4.2340 kN or
+     * 14.113 kN before the factor; the tank of 2 t at the next node is 65.378 kN before it.
+     */
     private static Stream<Case> masses() {
         return Stream.of(
-                error("mass-negative", "node load", m -> nodeLoad(m, -10.001), m -> nodeLoad(m, -10)),
+                error("mass-negative", "node load", m -> nodeLoad(m, 0, 5, -10.001), m -> nodeLoad(m, 0, 5, -10)),
+                error("mass-negative", "node load against own mass", m -> nodeLoad(m, 1, 5, -24.12), m -> nodeLoad(m, 1, 5, -24.11)),
+                error("mass-negative", "node load against a nodal mass", m -> nodeLoad(m, 0, 6, -65.38), m -> nodeLoad(m, 0, 6, -65.37)),
                 error("mass-negative", "line load", m -> lineLoad(m, -1e-9), m -> lineLoad(m, 0)));
     }
 
@@ -237,7 +244,7 @@ class WellFormednessTest {
     @Test
     void aNegativeMassNamesPatternNodeAndLoad() {
         StructuralModel model = Fixtures.sound();
-        nodeLoad(model, -110);
+        nodeLoad(model, 0, 5, -110);
         Defect defect = WellFormedness.check(model).get(0);
         assertEquals("Load pattern Live gives node N6 a negative mass, -3.06 t.", defect.text());
         assertSame(model.getLoadPatterns().get(0).getLoads().get(0), defect.object());
@@ -247,6 +254,7 @@ class WellFormednessTest {
     @Test
     void patternsMayTakeAwayWhatOthersBring() {
         StructuralModel model = Fixtures.sound();
+        model.setSelfMassFactor(0);
         LoadPattern opening = StructureFactory.eINSTANCE.createLoadPattern();
         opening.setName("Opening");
         opening.setMassFactor(0.3);
@@ -274,11 +282,15 @@ class WellFormednessTest {
         return m.getLoadPatterns().get(0).getLoads().get(0);
     }
 
-    private static void nodeLoad(StructuralModel m, double force) {
-        m.getLoadPatterns().get(0).getLoads().get(0).setValue(force);
+    private static void nodeLoad(StructuralModel m, double selfMassFactor, int node, double force) {
+        m.setSelfMassFactor(selfMassFactor);
+        NodeLoad load = (NodeLoad) m.getLoadPatterns().get(0).getLoads().get(0);
+        load.setNode(m.getNodes().get(node));
+        load.setValue(force);
     }
 
     private static void lineLoad(StructuralModel m, double forcePerLength) {
+        m.setSelfMassFactor(0);
         m.getLoadPatterns().get(0).getLoads().get(1).setValue(forcePerLength);
     }
 
