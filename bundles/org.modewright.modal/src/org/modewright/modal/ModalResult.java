@@ -86,14 +86,17 @@ public final class ModalResult {
         return modelName;
     }
 
+    /** Number of nodes of the model. */
     public int nodeCount() {
         return nodes.size();
     }
 
+    /** Number of frame members and bars. */
     public int memberCount() {
         return memberCount;
     }
 
+    /** Number of panels. */
     public int panelCount() {
         return panelCount;
     }
@@ -103,6 +106,7 @@ public final class ModalResult {
         return freeDofs;
     }
 
+    /** The nodes, in the order of the shapes. */
     public List<NodePoint> nodes() {
         return nodes;
     }
@@ -112,6 +116,7 @@ public final class ModalResult {
         return carriers;
     }
 
+    /** Where the mass is, kg. */
     public MassLedger mass() {
         return mass;
     }
@@ -121,6 +126,7 @@ public final class ModalResult {
         return planCoupling;
     }
 
+    /** The proof that no mode is missing, or what keeps it from being one. */
     public Certificate certificate() {
         return certificate;
     }

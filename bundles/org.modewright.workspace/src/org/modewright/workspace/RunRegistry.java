@@ -50,10 +50,12 @@ public final class RunRegistry {
         this.store = store;
     }
 
+    /** Tells a listener of the runs from now on. */
     public void addListener(Listener listener) {
         listeners.add(listener);
     }
 
+    /** Tells a listener no longer. */
     public void removeListener(Listener listener) {
         listeners.remove(listener);
     }
