@@ -205,7 +205,7 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
         TreeItem item = (TreeItem) event.item;
         TreeItem parent = item.getParentItem();
         if (parent == null) {
-            if (event.index < categories.size()) {
+            if (event.index >= 0 && event.index < categories.size()) {
                 label(item, event.index);
             }
             return;
@@ -249,7 +249,7 @@ public final class StructureOutline extends Page implements IContentOutlinePage 
             return null;
         }
         List<?> objects = categories.get(category).objects();
-        return index < objects.size() ? objects.get(index) : null;
+        return index >= 0 && index < objects.size() ? objects.get(index) : null;
     }
 
     private Identified object(TreeItem item) {

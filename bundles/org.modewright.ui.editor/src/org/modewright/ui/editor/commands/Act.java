@@ -190,6 +190,8 @@ enum Act {
         List<Object> choices = new ArrayList<>(editor.model().getGroups());
         choices.add(Messages.Act_noGroup);
         dialog.setElements(choices.toArray());
+        Group now = elements.get(0).getGroup();
+        dialog.setInitialSelections(now == null ? Messages.Act_noGroup : now);
         if (dialog.open() == Window.OK && dialog.getFirstResult() != null) {
             Group group = dialog.getFirstResult() instanceof Group chosen ? chosen : null;
             editor.execute(editor.commands().assignGroup(elements, group));

@@ -78,7 +78,7 @@ public final class LoadsPage implements EditorPage {
         rows.setWeights(50, 50);
         form = new PropertyForm(parts, context, Messages.Form_nothingInLoads);
         sum = new MassSum(rows.getDisplay(), masses::show);
-        rows.addListener(SWT.Dispose, event -> sum.cancel());
+        rows.addListener(SWT.Dispose, event -> sum.stop());
         modelChanged();
     }
 

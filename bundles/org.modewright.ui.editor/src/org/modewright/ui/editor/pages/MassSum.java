@@ -23,6 +23,7 @@ final class MassSum {
     private final Display display;
     private final Consumer<MassLedger> whenSummed;
     private boolean scheduled;
+    private boolean stopped;
     private SumJob job;
 
     /** @param whenSummed gets the masses on the user interface's thread; null where the model cannot be computed */
@@ -40,6 +41,9 @@ final class MassSum {
 
     private void start(StructuralModel model) {
         scheduled = false;
+        if (stopped) {
+            return;
+        }
         cancel();
         try {
             job = new SumJob(Snapshot.of(model));
@@ -49,7 +53,13 @@ final class MassSum {
         }
     }
 
-    void cancel() {
+    /** Sums no more. */
+    void stop() {
+        stopped = true;
+        cancel();
+    }
+
+    private void cancel() {
         if (job != null) {
             job.cancel();
             job = null;

@@ -254,8 +254,9 @@ final class ObjectTable {
         return field.shown(object);
     }
 
+    /** The platform asks for items while columns are made, when there is no row to fill. */
     private void fill(Event event) {
-        if (event.index >= rows.length) {
+        if (event.index < 0 || event.index >= rows.length) {
             return;
         }
         EObject object = rows[event.index];

@@ -107,11 +107,16 @@ final class SideBySide {
         @Override
         protected void layout(Composite composite, boolean flushCache) {
             Rectangle area = composite.getClientArea();
+            if (area.isEmpty()) {
+                return;
+            }
             int beside = side.getVisible() ? Math.min(width, Math.max(0, area.width / 2)) : 0;
             int rest = Math.max(0, area.width - beside - FoldBar.WIDTH);
             main.setBounds(area.x, area.y, rest, area.height);
             bar.setBounds(area.x + rest, area.y, FoldBar.WIDTH, area.height);
-            side.setBounds(area.x + rest + FoldBar.WIDTH, area.y, beside, area.height);
+            if (beside > 0) {
+                side.setBounds(area.x + rest + FoldBar.WIDTH, area.y, beside, area.height);
+            }
         }
     }
 }

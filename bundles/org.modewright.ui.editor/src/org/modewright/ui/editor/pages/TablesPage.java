@@ -40,6 +40,7 @@ import org.modewright.ui.widgets.ThemeColours;
 public final class TablesPage implements EditorPage {
 
     private static final int NARROW = 400;
+    private static final int KINDS = 100;
 
     private final EditorContext context;
     private final SideBySide parts;
@@ -106,8 +107,11 @@ public final class TablesPage implements EditorPage {
         GridLayout layout = (GridLayout) bar.getLayout();
         int columns = bar.getSize().x < NARROW ? 2 : 3;
         if (layout.numColumns != columns) {
+            boolean narrow = columns == 2;
             layout.numColumns = columns;
-            ((GridData) filter.getLayoutData()).horizontalSpan = columns == 2 ? 2 : 1;
+            ((GridData) filter.getLayoutData()).horizontalSpan = narrow ? 2 : 1;
+            ((GridData) kinds.getLayoutData()).widthHint = narrow ? KINDS : SWT.DEFAULT;
+            ((GridData) kinds.getLayoutData()).grabExcessHorizontalSpace = narrow;
             filter.requestLayout();
         }
     }
@@ -117,7 +121,8 @@ public final class TablesPage implements EditorPage {
         combo.setVisibleItemCount(lists.size());
         combo.setToolTipText(Messages.Tables_kinds);
         combo.setData(UiIds.WIDGET_ID, "tables.kinds");
-        combo.addListener(SWT.Selection, event -> show(lists.get(combo.getSelectionIndex())));
+        combo.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, false, false));
+        combo.addListener(SWT.Selection, event -> showKind(lists.get(combo.getSelectionIndex())));
         return combo;
     }
 
@@ -151,6 +156,12 @@ public final class TablesPage implements EditorPage {
         sayWhatIsMissing();
         table.select(context.session().selection().elementIds());
         enable();
+    }
+
+    /** What is selected and does not stand in the table is not kept, so that no command works on what is out of sight. */
+    private void showKind(EReference newList) {
+        show(newList);
+        rowsSelected(table.selected());
     }
 
     private void nameKinds() {
@@ -299,6 +310,11 @@ public final class TablesPage implements EditorPage {
     public void showProperties() {
         parts.open(true);
         form.setFocus();
+    }
+
+    @Override
+    public List<? extends EObject> toDelete() {
+        return table.selected();
     }
 
     @Override

@@ -11,6 +11,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.List;
 import java.util.Set;
 import org.eclipse.swt.SWT;
+import org.eclipse.swt.widgets.Combo;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Table;
@@ -192,6 +193,40 @@ class EditingTest {
         workbench.execute(EditorDriver.UNDO);
         assertEquals(8, driver.ask(() -> model.getNodes().size()));
         assertEquals(6, driver.ask(() -> node(1).getX()));
+    }
+
+    @Test
+    void anotherKindOfTableKeepsNothingSelectedOutOfSight(Workbench workbench) throws Exception {
+        open(workbench);
+        driver.showTables();
+        driver.selectRows(EditorDriver.TABLE, 0);
+        workbench.editor().choose("tables.kinds", "Supports (4)");
+        assertEquals(4, workbench.editor().table(EditorDriver.TABLE).rowCount());
+        assertEquals("✓", workbench.editor().table(EditorDriver.TABLE).text(0, "Holds ux"));
+        driver.until("an empty selection", () -> workbench.session().selection().elementIds().isEmpty());
+        activate();
+        workbench.execute(EditorDriver.DELETE);
+        assertFalse(driver.ask(editor::isDirty));
+    }
+
+    @Test
+    void everyKindOfTableTakesANewRow(Workbench workbench) throws Exception {
+        open(workbench);
+        driver.showTables();
+        Combo kinds = driver.find(Combo.class, "tables.kinds");
+        for (int kind = 0; kind < driver.ask(kinds::getItemCount); kind++) {
+            int index = kind;
+            driver.run(() -> {
+                kinds.select(index);
+                kinds.notifyListeners(SWT.Selection, new Event());
+            });
+            int rows = workbench.editor().table(EditorDriver.TABLE).rowCount();
+            clickTool("tables.add");
+            assertEquals(rows + 1, workbench.editor().table(EditorDriver.TABLE).rowCount(), () -> driver.ask(kinds::getText));
+            driver.traverse(driver.find(Text.class, EditorDriver.CELL), SWT.TRAVERSE_ESCAPE);
+            clickTool("tables.duplicate");
+            assertTrue(workbench.editor().table(EditorDriver.TABLE).rowCount() >= rows + 2, () -> driver.ask(kinds::getText));
+        }
     }
 
     @Test
