@@ -26,8 +26,35 @@ final class RasterImage {
         this.device = device;
     }
 
-    /** Draws the raster so that it fills an area, whatever the zoom of the screen. */
-    void draw(GC gc, Raster raster, Rectangle area) {
+    /**
+     * Draws the raster so that it fills an area, whatever the zoom of the screen.
+     *
+     * @param area the canvas
+     * @param damaged the part of it that is to be drawn; where pixels are points nothing else is copied
+     */
+    void draw(GC gc, Raster raster, Rectangle area, Rectangle damaged) {
+        Rectangle part = area.intersection(damaged);
+        if (raster.width() == area.width && raster.height() == area.height && !part.isEmpty()) {
+            drawPart(gc, raster, part);
+        } else {
+            drawWhole(gc, raster, area);
+        }
+    }
+
+    private void drawPart(GC gc, Raster raster, Rectangle part) {
+        prepare(part.width, part.height);
+        for (int row = 0; row < part.height; row++) {
+            pixels.put(row * part.width, raster.colour(), (part.y + row) * raster.width() + part.x, part.width);
+        }
+        Image image = new Image(device, data);
+        try {
+            gc.drawImage(image, part.x, part.y);
+        } finally {
+            image.dispose();
+        }
+    }
+
+    private void drawWhole(GC gc, Raster raster, Rectangle area) {
         ImageData copy = copy(raster);
         ImageDataProvider provider = zoom -> zoom == 100 && copy.width != area.width ? copy.scaledTo(area.width, area.height) : copy;
         Image image = new Image(device, provider);
@@ -41,11 +68,15 @@ final class RasterImage {
 
     /** The raster as image data, valid until the next call. */
     ImageData copy(Raster raster) {
-        if (data == null || data.width != raster.width() || data.height != raster.height()) {
-            data = new ImageData(raster.width(), raster.height(), 32, LITTLE_ENDIAN);
-            pixels = ByteBuffer.wrap(data.data).order(ByteOrder.LITTLE_ENDIAN).asIntBuffer();
-        }
+        prepare(raster.width(), raster.height());
         pixels.put(0, raster.colour(), 0, raster.width() * raster.height());
         return data;
+    }
+
+    private void prepare(int width, int height) {
+        if (data == null || data.width != width || data.height != height) {
+            data = new ImageData(width, height, 32, LITTLE_ENDIAN);
+            pixels = ByteBuffer.wrap(data.data).order(ByteOrder.LITTLE_ENDIAN).asIntBuffer();
+        }
     }
 }

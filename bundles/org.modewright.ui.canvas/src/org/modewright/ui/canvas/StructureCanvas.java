@@ -19,6 +19,7 @@ import org.modewright.render.Deformation;
 import org.modewright.render.Mark;
 import org.modewright.render.Pick;
 import org.modewright.render.PrimitiveKind;
+import org.modewright.render.Projection;
 import org.modewright.render.Raster;
 import org.modewright.render.RenderOptions;
 import org.modewright.render.SceneRenderer;
@@ -64,13 +65,14 @@ public final class StructureCanvas extends Canvas {
     private StandardView currentView = StandardView.AXONOMETRIC;
     private boolean fitted;
     private Runnable turning;
+    private final TouchedArea touched = new TouchedArea();
     private long frames;
 
     public StructureCanvas(Composite parent, Handler handler) {
         super(parent, SWT.NO_BACKGROUND | SWT.DOUBLE_BUFFERED);
         image = new RasterImage(getDisplay());
         setData(UiIds.WIDGET_ID, "canvas");
-        addListener(SWT.Paint, event -> paint(event.gc));
+        addListener(SWT.Paint, event -> paint(event.gc, event.getBounds()));
         addListener(SWT.Resize, event -> resized());
         new CanvasMouse(this, handler).listen();
         addListener(SWT.KeyDown, new CanvasKeys(this, handler)::press);
@@ -125,10 +127,18 @@ public final class StructureCanvas extends Canvas {
     void shape(Deformation newDeformation, double newFactor) {
         if (newDeformation != deformation) {
             hover(null);
+            touched.forget();
         }
         deformation = newDeformation;
         factor = newFactor;
-        redraw();
+        if (newDeformation == null || !isLooking() || !fitted) {
+            touched.forget();
+            redraw();
+            return;
+        }
+        Projection projection = camera.projection(raster.width(), raster.height());
+        touched.include(camera, drawing.scene().bounds(), Math.abs(factor) * deformation.largest(), projection, scale());
+        touched.redraw(this);
     }
 
     void select(Set<String> ids) {
@@ -206,7 +216,7 @@ public final class StructureCanvas extends Canvas {
         redraw();
     }
 
-    private void paint(GC gc) {
+    private void paint(GC gc, Rectangle damaged) {
         Rectangle area = getClientArea();
         if (area.isEmpty()) {
             return;
@@ -220,7 +230,7 @@ public final class StructureCanvas extends Canvas {
         options.theme(theme());
         renderer.render(drawing.scene(), camera, deformation, factor, options, raster);
         frames++;
-        image.draw(gc, raster, area);
+        image.draw(gc, raster, area, damaged);
         overlay.accept(gc);
         paintRubberBand(gc);
         if (isFocusControl()) {
