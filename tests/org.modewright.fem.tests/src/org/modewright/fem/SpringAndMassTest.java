@@ -144,4 +144,18 @@ class SpringAndMassTest {
         assertArrayEquals(total, structure.assemble().ledger().movable(), 1e-12);
         assertTrue(Arrays.stream(structure.assemble().ledger().onSupports()).allMatch(value -> value == 0.0));
     }
+
+    /** The rounding of the centre leaves no lever, so a rotation about it moves no mass and has no share in any mode. */
+    @Test
+    void aMassInItsOwnAxisHasNoRotaryInertia() {
+        Random random = new Random(23);
+        for (int trial = 0; trial < 200; trial++) {
+            TestStructure structure = new TestStructure();
+            structure.hold(structure.node(10 * random.nextGaussian(), 10 * random.nextGaussian(), 0), TestStructure.ALL);
+            Node node = structure.node(10 * random.nextGaussian(), 10 * random.nextGaussian(), 10 * random.nextGaussian());
+            structure.mass(node, 0, 100 + 1000 * random.nextDouble(), 0, 0, 0, 0);
+            structure.spring(node, null, 1e6, 1e6, 1e6, 1e6, 1e6, 1e6);
+            assertArrayEquals(new double[3], structure.assemble().ledger().rotary(), 0.0, "trial " + trial);
+        }
+    }
 }

@@ -1,6 +1,7 @@
 package org.modewright.fem.internal;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 import org.modewright.fem.LoadMass;
@@ -72,9 +73,16 @@ public final class LedgerBuilder {
         double[] rotary = new double[3];
         for (int i = 0; i < 3; i++) {
             double[] rotation = rigid.ofUnknowns(i + 3, centre);
-            rotary[i] = mass.quadratic(rotation);
+            double inertia = mass.quadratic(rotation);
+            rotary[i] = inertia <= roundOff(i + 3, movable) ? 0.0 : inertia;
         }
         return books(iota, movable, centre, rotary);
+    }
+
+    /** Rotary inertia that the rounding of coordinates leaves to masses in the axis of a rotation. */
+    private double roundOff(int direction, double[] movable) {
+        double arm = Arrays.stream(rigid.ofNodes(direction, new double[3])).map(Math::abs).max().orElse(0.0) * 16.0 * Math.ulp(1.0);
+        return (movable[0] + movable[1] + movable[2]) * arm * arm;
     }
 
     private double[] centre(double[][] iota, double[][] product, double[] movable) {
