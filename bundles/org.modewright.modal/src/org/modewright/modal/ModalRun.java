@@ -7,6 +7,7 @@ import org.modewright.fem.Assembly;
 import org.modewright.fem.NodePoint;
 import org.modewright.fem.Snapshot;
 import org.modewright.numerics.EigenPairs;
+import org.modewright.numerics.IndefiniteMassException;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SingularPencilException;
 
@@ -31,6 +32,7 @@ public final class ModalRun {
      * {@link ModalResult#instabilities()} names them.
      *
      * @param progress told of the stages; a cancel is obeyed within a second
+     * @throws IndefiniteMassException if loads take away so much mass that some motion would have a negative kinetic energy
      * @throws org.modewright.numerics.CancelledException on a cancel
      */
     public static ModalResult run(Snapshot snapshot, ModalRequest request, Progress progress) {
@@ -54,6 +56,8 @@ public final class ModalRun {
             solve(figures);
         } catch (SingularPencilException e) {
             builder.certificate(new Certificate(false, 0, 0, 0, 0, 0), false).instabilities(List.of(withoutStiffnessOrMass(e)));
+        } catch (IndefiniteMassException e) {
+            throw NegativeLoads.sentence(snapshot).map(IndefiniteMassException::new).orElse(e);
         }
         return builder.build();
     }

@@ -22,6 +22,7 @@ import org.modewright.fem.Snapshot;
 import org.modewright.model.Snapshots;
 import org.modewright.model.structure.StructuralModel;
 import org.modewright.numerics.CancelledException;
+import org.modewright.numerics.IndefiniteMassException;
 import org.modewright.workspace.internal.MonitorProgress;
 
 /**
@@ -112,7 +113,7 @@ public final class AuditJob extends Job {
         } catch (OutOfMemoryError exhausted) {
             return failed("The run needs more memory than it was given. Ask for fewer modes, or start with a larger memory limit.",
                     exhausted);
-        } catch (RulePackException | IOException fault) {
+        } catch (RulePackException | IndefiniteMassException | IOException fault) {
             return failed(fault.getMessage(), null);
         } catch (RuntimeException fault) {
             ILog.of(AuditJob.class).error("The audit of " + file.getFullPath() + " failed.", fault);

@@ -11,13 +11,16 @@ import java.util.EnumSet;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.modewright.fem.Assembly;
+import org.modewright.model.structure.LoadPattern;
 import org.modewright.numerics.CancelledException;
 import org.modewright.numerics.EigenPairs;
 import org.modewright.numerics.EigenProblem;
 import org.modewright.numerics.EigenRequest;
 import org.modewright.numerics.EigenSolvers;
+import org.modewright.numerics.IndefiniteMassException;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SymmetricMatrix;
+import org.modewright.testmodels.Parts;
 
 /** How many modes a run finds, its certificate, the sign of shapes, matrices without a model. */
 class ModalRunTest {
@@ -243,6 +246,27 @@ class ModalRunTest {
     void timesAreKept() {
         assertEquals(List.of("factor", "eigen", "assemble").stream().sorted().toList(),
                 building(3).allModes().seconds().keySet().stream().sorted().toList());
+    }
+
+    /**
+     * A bar fixed at one end, of 20 kg with consistent mass: M of its free end along X is 20/3 kg, less than the 10 kg of a lumped mass. A
+     * load that takes 8 kg away leaves a negative kinetic energy, and one that takes 6 kg does not.
+     */
+    @Test
+    void loadsThatTakeAwayTooMuchMassAreNamed() {
+        assertEquals(1, bar(6).allModes().modes().size());
+        String sentence = assertThrows(IndefiniteMassException.class, () -> bar(8).allModes()).getMessage();
+        assertTrue(sentence.contains("pattern uplift") && sentence.contains("node tip (\u22128.00 kg)"), sentence);
+        assertEquals(1, bar(8).lumped().allModes().modes().size());
+    }
+
+    private static Structures bar(double lifted) {
+        Structures s = new Structures("bar").material("steel", 2e11, 0.3, 1000).section("rod", 0.01, 0, 0, 0);
+        s.node("root", 0, 0, 0).node("tip", 2, 0, 0).support("root", "ux uy uz rx ry rz").support("tip", "uy uz");
+        s.member("rod", "root", "tip").setAxialOnly(true);
+        LoadPattern uplift = new Parts(s.model()).pattern("uplift", 1);
+        Parts.load(uplift, s.node("tip"), -9.80665 * lifted);
+        return s;
     }
 
     @Test

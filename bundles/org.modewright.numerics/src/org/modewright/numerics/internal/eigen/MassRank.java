@@ -5,6 +5,7 @@ import java.util.Arrays;
 import org.modewright.numerics.Factorisation;
 import org.modewright.numerics.Factoriser;
 import org.modewright.numerics.Factorisers;
+import org.modewright.numerics.IndefiniteMassException;
 import org.modewright.numerics.Progress;
 import org.modewright.numerics.SymmetricMatrix;
 import org.modewright.numerics.internal.sparse.SparseFactoriser;
@@ -21,15 +22,15 @@ final class MassRank {
      * cheaper order of its own.
      *
      * @param factoriser of the problem
-     * @throws IllegalArgumentException if the mass has a negative eigenvalue
+     * @throws IndefiniteMassException if the mass has a negative eigenvalue
      */
     static int of(SymmetricMatrix mass, SparseFactoriser factoriser, Progress progress) {
         Factoriser own = isCoupledThroughout(mass) ? factoriser.forPart(mass) : Factorisers.sparse(mass, progress);
         Factorisation factorisation = own.factorise(mass, null, 0.0, progress);
         int negative = factorisation.inertia().negative();
         if (negative > 0) {
-            throw new IllegalArgumentException("The mass matrix has " + negative
-                    + " negative eigenvalue(s); mass must be positive semidefinite. Look for negative masses or densities.");
+            throw new IndefiniteMassException("The mass matrix has " + (negative == 1 ? "a negative eigenvalue" : negative
+                    + " negative eigenvalues") + "; mass must be positive semidefinite. Look for negative masses or densities.");
         }
         return mass.order() - factorisation.inertia().zero();
     }
