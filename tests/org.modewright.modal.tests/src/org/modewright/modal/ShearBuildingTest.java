@@ -196,8 +196,8 @@ class ShearBuildingTest {
 
     /**
      * Modal contribution factors of the roof displacement and the base shear of the uniform five-storey frame under a roof load:
-     * A. K. Chopra, Dynamics of Structures (2nd ed.), section 12.11, as reproduced in published course notes (read, recomputed); printed with three
-     * decimals. Mode n: roof &phi;<sub>N</sub>&sup2;/&lambda; over N/k, base shear &Gamma;&phi;<sub>N</sub>.
+     * A. K. Chopra, Dynamics of Structures (2nd ed.), section 12.11, as reproduced in published course notes (read,
+     * recomputed); printed with three decimals. Mode n: roof &phi;<sub>N</sub>&sup2;/&lambda; over N/k, base shear &Gamma;&phi;<sub>N</sub>.
      */
     @Test
     void modalContributionFactors() {
