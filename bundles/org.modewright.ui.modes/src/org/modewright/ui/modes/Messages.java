@@ -42,6 +42,8 @@ final class Messages extends NLS {
     public static String Modes_sentenceRigid;
     public static String Modes_sentenceNone;
     public static String Modes_carry;
+    public static String Modes_carryOne;
+    public static String Modes_carryAllOne;
     public static String Modes_carryAll;
     public static String Modes_local;
     public static String Modes_incomplete;

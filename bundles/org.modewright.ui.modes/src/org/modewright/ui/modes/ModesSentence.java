@@ -42,10 +42,18 @@ public final class ModesSentence {
         return local == 0 ? "" : NLS.bind(Messages.Modes_local, Numbers.count(local));
     }
 
+    /** The one of X and Y of which less is captured; null where nothing moves in either. */
+    private static Direction weaker(ModalResult result) {
+        if (!result.hasMass(Direction.X)) {
+            return result.hasMass(Direction.Y) ? Direction.Y : null;
+        }
+        return result.hasMass(Direction.Y) && result.capture(Direction.Y) < result.capture(Direction.X) ? Direction.Y : Direction.X;
+    }
+
     /** How many modes, the largest first, it takes to carry most of the weaker captured of X and Y. */
     private static String carried(ModalResult result) {
-        Direction direction = result.capture(Direction.X) <= result.capture(Direction.Y) ? Direction.X : Direction.Y;
-        if (!result.hasMass(direction)) {
+        Direction direction = weaker(result);
+        if (direction == null) {
             return "";
         }
         double[] shares = result.modes().stream().mapToDouble(mode -> mode.effectiveMassShare(direction)).sorted().toArray();
@@ -53,9 +61,11 @@ public final class ModesSentence {
         for (int i = shares.length - 1; i >= 0; i--) {
             sum += shares[i];
             if (sum >= CARRIED) {
-                return NLS.bind(Messages.Modes_carry, new Object[] {Numbers.count(shares.length - i), Numbers.percent(CARRIED), direction.name()});
+                int count = shares.length - i;
+                return NLS.bind(count == 1 ? Messages.Modes_carryOne : Messages.Modes_carry,
+                        new Object[] {Numbers.count(count), Numbers.percent(CARRIED), direction.name()});
             }
         }
-        return NLS.bind(Messages.Modes_carryAll, Numbers.percent(sum), direction.name());
+        return NLS.bind(shares.length == 1 ? Messages.Modes_carryAllOne : Messages.Modes_carryAll, Numbers.percent(sum), direction.name());
     }
 }

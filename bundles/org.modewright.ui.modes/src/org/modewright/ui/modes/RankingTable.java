@@ -124,7 +124,7 @@ final class RankingTable {
     }
 
     private String label(DominanceRow row) {
-        if (row.kind() != null && row.kind() != Kind.MEMBER) {
+        if (row.kind() != null && row.kind() != Kind.MEMBER && !row.label().startsWith(row.kind().word())) {
             return row.kind().word() + " " + row.label();
         }
         return row.label().isEmpty() ? Messages.Dominance_none : row.label();

@@ -250,9 +250,14 @@ public final class StructureDrawing {
     private double[] values(PrimitiveKind kind, Map<String, Double> shares) {
         double[] values = new double[scene.count(kind)];
         for (int i = 0; i < values.length; i++) {
-            String id = objects.id(kind, scene.id(kind, i));
+            String id = carrierId(objects.id(kind, scene.id(kind, i)));
             values[i] = id == null ? Double.NaN : shares.getOrDefault(id, Double.NaN);
         }
         return values;
+    }
+
+    /** A mass is coloured as the node that carries its energy. */
+    private String carrierId(String id) {
+        return objects.object(id) instanceof NodalMass mass ? mass.getNode().getId() : id;
     }
 }

@@ -150,6 +150,12 @@ class ModeTableContentTest {
     }
 
     @Test
+    void theSentenceSpeaksOfADirectionThatMoves() {
+        String sentence = ModesSentence.of(new SmallResults().withoutMassInY().mode(1, 0.97, 0).mode(2, 0.03, 0).build());
+        assertTrue(sentence.contains("1 carries 95.0 % of X"), sentence);
+    }
+
+    @Test
     void theSentenceOfNoModeSaysSo() {
         assertTrue(ModesSentence.of(new SmallResults().build()).startsWith("No mode was found"));
     }

@@ -36,6 +36,12 @@ final class SmallResults {
         builder.certificate(new Certificate(true, 10, 0, 0, 1e-12, 1e-14), false);
     }
 
+    /** Lets nothing move in Y. */
+    SmallResults withoutMassInY() {
+        builder.mass(new MassLedger(new double[] {4000, 0, 0}, new double[3], new double[3], new double[3], List.of(), 0), 0);
+        return this;
+    }
+
     private static Carrier carrier(Kind kind, String id, String name, String group, String level) {
         return new Carrier(kind, id, name, new int[] {0, 1}, group, null, null, level);
     }

@@ -32,12 +32,17 @@ import org.modewright.model.structure.StructuralModel;
 import org.modewright.model.structure.StructureFactory;
 import org.modewright.model.structure.Support;
 import org.modewright.model.structure.Vector;
+import org.modewright.render.Camera;
 import org.modewright.render.ColourRamp;
 import org.modewright.render.Deformation;
 import org.modewright.render.Mark;
 import org.modewright.render.Pick;
 import org.modewright.render.PrimitiveKind;
+import org.modewright.render.Raster;
+import org.modewright.render.RenderOptions;
 import org.modewright.render.Scene;
+import org.modewright.render.SceneRenderer;
+import org.modewright.render.StandardView;
 import org.modewright.ui.canvas.drawing.StructureDrawing;
 
 /** What a model's drawing holds, how it is marked and coloured, and how it moves. */
@@ -259,6 +264,23 @@ class StructureDrawingTest {
         assertEquals(0.75, drawing.colour(result, 0, Energy.STRAIN, ColourRamp.energy()), 1e-12);
         assertEquals(0.6, drawing.colour(result, 0, Energy.KINETIC, ColourRamp.energy()), 1e-12);
         assertEquals(0, drawing.colour(result, 0, null, ColourRamp.energy()));
+    }
+
+    @Test
+    void aMassTakesTheColourOfItsNode() {
+        long withMass = darkPixels(StructureDrawing.of(model));
+        model.getMasses().clear();
+        assertTrue(withMass > 2 * darkPixels(StructureDrawing.of(model)), "the disc of the mass is larger than the node's square");
+    }
+
+    /** Pixels of the ramp's dark end in plan: those of the node with the largest share of the kinetic energy. */
+    private long darkPixels(StructureDrawing drawing) {
+        drawing.colour(result(new double[3], new double[3]), 0, Energy.KINETIC, ColourRamp.energy());
+        Raster raster = new Raster(400, 300);
+        Camera camera = Camera.standard(StandardView.PLAN, drawing.scene().bounds(), 400, 300);
+        new SceneRenderer().render(drawing.scene(), camera, null, 0, new RenderOptions(), raster);
+        int dark = ColourRamp.energy().argb(1);
+        return IntStream.of(raster.colour()).filter(pixel -> pixel == dark).count();
     }
 
     /** All nodes move as one body; the first member holds 0.75 of the strain energy, the fourth node 0.6 of the kinetic energy. */
