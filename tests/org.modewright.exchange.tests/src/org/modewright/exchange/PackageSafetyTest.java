@@ -60,6 +60,15 @@ class PackageSafetyTest {
         assertTrue(problem.text().contains("200 times its stored size"), problem.text());
     }
 
+    /** What the zip declares is judged before a row is read: rows by the million would fill the memory on the way to the limit. */
+    @Test
+    void rowsOfAnEntryThatExpandsTooFarAreNotRead() throws IOException {
+        String nodes = "id,x,y,z\n" + "N,0,0,0\n".repeat(1 << 20);
+        Problem problem = only(new PackageFixture().put("nodes.csv", nodes).zip(temporary.resolve("p.zip")));
+        assertEquals("nodes.csv", problem.file());
+        assertTrue(problem.text().contains("200 times its stored size"), problem.text());
+    }
+
     @Test
     void anHonestLargeTableIsRead() throws IOException {
         StringBuilder nodes = new StringBuilder("id,x,y,z\nN1,0,0,0\nN2,0,0,3\nN3,4,0,3\nN4,4,0,0\n");

@@ -88,7 +88,11 @@ final class ZipContent implements PackageContent {
     @Override
     public InputStream open(String path) throws IOException {
         ZipEntry entry = files.get(path);
-        return new Limited(zip.getInputStream(entry), Math.max(1, entry.getCompressedSize()));
+        long stored = Math.max(1, entry.getCompressedSize());
+        // What the zip itself declares to be too much need not be read until the limit, and fill the memory, to be refused.
+        checkSize(entry.getSize(), stored);
+        checkTotal(expanded + Math.max(0, entry.getSize()));
+        return new Limited(zip.getInputStream(entry), stored);
     }
 
     @Override
@@ -135,12 +139,20 @@ final class ZipContent implements PackageContent {
         private void count(int bytes) throws IOException {
             read += bytes;
             expanded += bytes;
-            if (expanded > limits.expanded()) {
-                throw new UnsafeContentException("the files of the zip expand to more than " + limits.expanded() + " bytes");
-            }
-            if (read > limits.harmless() && read > stored * limits.ratio()) {
-                throw new UnsafeContentException("the entry expands to more than " + limits.ratio() + " times its stored size");
-            }
+            checkTotal(expanded);
+            checkSize(read, stored);
+        }
+    }
+
+    private void checkTotal(long bytes) throws UnsafeContentException {
+        if (bytes > limits.expanded()) {
+            throw new UnsafeContentException("the files of the zip expand to more than " + limits.expanded() + " bytes");
+        }
+    }
+
+    private void checkSize(long bytes, long stored) throws UnsafeContentException {
+        if (bytes > limits.harmless() && bytes > stored * limits.ratio()) {
+            throw new UnsafeContentException("the entry expands to more than " + limits.ratio() + " times its stored size");
         }
     }
 }
