@@ -1,33 +1,18 @@
 package org.modewright.ui.editor;
 
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collection;
-import java.util.EventObject;
 import java.util.List;
 import java.util.Set;
 import java.util.function.Function;
-import java.util.stream.Collectors;
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IMarker;
-import org.eclipse.core.resources.IResource;
-import org.eclipse.core.runtime.CoreException;
-import org.eclipse.core.runtime.ILog;
-import org.eclipse.core.runtime.IPath;
 import org.eclipse.core.runtime.IProgressMonitor;
-import org.eclipse.core.runtime.Status;
-import org.eclipse.emf.common.command.BasicCommandStack;
 import org.eclipse.emf.common.command.Command;
 import org.eclipse.emf.ecore.EObject;
-import org.eclipse.emf.edit.domain.AdapterFactoryEditingDomain;
 import org.eclipse.emf.edit.domain.EditingDomain;
 import org.eclipse.emf.edit.domain.IEditingDomainProvider;
-import org.eclipse.jface.dialogs.ErrorDialog;
-import org.eclipse.jface.dialogs.IDialogConstants;
-import org.eclipse.jface.dialogs.MessageDialog;
-import org.eclipse.osgi.util.NLS;
-import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Display;
@@ -36,16 +21,12 @@ import org.eclipse.ui.IEditorInput;
 import org.eclipse.ui.IEditorSite;
 import org.eclipse.ui.IFileEditorInput;
 import org.eclipse.ui.PartInitException;
-import org.eclipse.ui.dialogs.SaveAsDialog;
 import org.eclipse.ui.ide.IGotoMarker;
 import org.eclipse.ui.part.FileEditorInput;
 import org.eclipse.ui.part.MultiPageEditorPart;
 import org.eclipse.ui.views.contentoutline.IContentOutlinePage;
 import org.modewright.audit.Finding;
 import org.modewright.audit.ObjectRef;
-import org.modewright.model.ModelFile;
-import org.modewright.model.ModelFileException;
-import org.modewright.model.Names;
 import org.modewright.model.edit.StructureEditAdapterFactory;
 import org.modewright.model.edit.commands.Deletion;
 import org.modewright.model.edit.commands.StructureCommands;
@@ -66,26 +47,17 @@ import org.modewright.workspace.FindingMarkers;
 public final class StructureEditor extends MultiPageEditorPart
         implements StructureEditorPart, IEditingDomainProvider, IGotoMarker, EditorContext {
 
-    private static final int NAMED = 8;
-
     private final Pages pages = new Pages();
     private final List<Runnable> modelListeners = new ArrayList<>();
-    private final FileWatch watch = new FileWatch(this::fileChanged, this::fileMoved);
+    private final EditorFile file = new EditorFile(this);
     private final AuditSession.Listener sessionListener = this::sessionChanged;
-    private StructureEditAdapterFactory adapterFactory;
-    private AdapterFactoryEditingDomain domain;
-    private StructuralModel model;
-    private ModelFileException failure;
-    private ModelIndex index;
+    private OpenModel open;
     private AuditSession session;
     private Checks checks;
     private CheckLine checkLine;
     private StructureOutline outline;
     private EditorActions actions;
     private boolean changePending;
-    private boolean changedOutside;
-    private boolean gone;
-    private boolean asking;
     private boolean reloading;
 
     @Override
@@ -100,38 +72,18 @@ public final class StructureEditor extends MultiPageEditorPart
         site.setSelectionProvider(new ObjectSelections());
         load();
         session.addListener(sessionListener);
-        watch.start(getModelFile());
     }
 
-    /** Reads the file; afterwards there is a model, or the reason why there is none. */
     private void load() {
-        adapterFactory = new StructureEditAdapterFactory();
-        BasicCommandStack stack = new BasicCommandStack();
-        domain = new AdapterFactoryEditingDomain(adapterFactory, stack);
-        model = null;
-        index = null;
-        failure = null;
-        changedOutside = false;
-        gone = false;
-        try {
-            model = ModelFile.load(path());
-            domain.getResourceSet().getResources().add(model.eResource());
-            stack.addCommandStackListener(this::commandStackChanged);
-            checks.request(model);
-        } catch (ModelFileException fault) {
-            failure = fault;
+        file.watch();
+        open = OpenModel.read(getModelFile().getLocation().toFile().toPath(), this::edited);
+        if (model() != null) {
+            checks.request(model());
         }
-    }
-
-    private Path path() {
-        return getModelFile().getLocation().toFile().toPath();
     }
 
     private ModelIndex index() {
-        if (index == null) {
-            index = new ModelIndex(model);
-        }
-        return index;
+        return open.index();
     }
 
     @Override
@@ -143,8 +95,8 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     protected void createPages() {
-        if (model == null) {
-            addPage(Messages.Error_page, ErrorPage.class, parent -> new ErrorPage(parent, failure, this::reload));
+        if (model() == null) {
+            addPage(Messages.Error_page, ErrorPage.class, parent -> new ErrorPage(parent, open.failure(), this::reload));
         } else {
             addPage(Messages.Page_space, SpaceTab.class, parent -> new SpaceTab(parent, this));
             addPage(Messages.Page_tables, TablesPage.class, parent -> new TablesPage(parent, this));
@@ -154,7 +106,7 @@ public final class StructureEditor extends MultiPageEditorPart
         if (actions == null) {
             actions = new EditorActions(this);
         }
-        checkLine.show(model != null);
+        checkLine.show(model() != null);
     }
 
     private void addPage(String title, Class<? extends EditorPage> kind, Function<Composite, EditorPage> maker) {
@@ -178,8 +130,7 @@ public final class StructureEditor extends MultiPageEditorPart
         if (pages.top() != null) {
             pages.top().setFocus();
         }
-        watch.look();
-        display().asyncExec(this::askAboutChange);
+        file.userIsHere();
     }
 
     /** The page on top. */
@@ -210,11 +161,10 @@ public final class StructureEditor extends MultiPageEditorPart
     }
 
     StructureEditAdapterFactory adapterFactory() {
-        return adapterFactory;
+        return open.adapterFactory();
     }
 
-    private void commandStackChanged(EventObject event) {
-        index = null;
+    private void edited() {
         if (!changePending) {
             changePending = true;
             display().asyncExec(this::publishChange);
@@ -225,13 +175,13 @@ public final class StructureEditor extends MultiPageEditorPart
         return getSite().getShell().getDisplay();
     }
 
-    private boolean isClosed() {
+    boolean isClosed() {
         return getContainer() == null || getContainer().isDisposed();
     }
 
     private void publishChange() {
         changePending = false;
-        if (isClosed() || model == null) {
+        if (isClosed() || model() == null) {
             return;
         }
         firePropertyChange(PROP_DIRTY);
@@ -241,7 +191,7 @@ public final class StructureEditor extends MultiPageEditorPart
             outline.modelChanged();
         }
         actions.update();
-        checks.request(model);
+        checks.request(model());
         List.copyOf(modelListeners).forEach(Runnable::run);
     }
 
@@ -261,7 +211,7 @@ public final class StructureEditor extends MultiPageEditorPart
     }
 
     private void checked() {
-        if (isClosed() || model == null) {
+        if (isClosed() || model() == null) {
             return;
         }
         checkLine.refresh();
@@ -272,7 +222,7 @@ public final class StructureEditor extends MultiPageEditorPart
     }
 
     private void sessionChanged(AuditSession.Change change) {
-        if (change != AuditSession.Change.SELECTION || model == null || isClosed() || !isCurrent()) {
+        if (change != AuditSession.Change.SELECTION || model() == null || isClosed() || !isCurrent()) {
             return;
         }
         Set<String> ids = session.selection().elementIds();
@@ -288,7 +238,7 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public boolean isDirty() {
-        return domain != null && ((BasicCommandStack) domain.getCommandStack()).isSaveNeeded();
+        return open != null && open.isDirty();
     }
 
     @Override
@@ -296,135 +246,42 @@ public final class StructureEditor extends MultiPageEditorPart
         save(getModelFile(), monitor);
     }
 
-    private boolean save(IFile file, IProgressMonitor monitor) {
-        if (file.equals(getModelFile()) && watch.isOutOfStep() && !mayOverwrite()) {
-            cancel(monitor);
-            return false;
-        }
-        try {
-            ModelFile.save(model, file.getLocation().toFile().toPath());
-            file.refreshLocal(IResource.DEPTH_ZERO, monitor);
-            if (file.equals(getModelFile())) {
-                watch.contentKnown();
-            }
-            ((BasicCommandStack) domain.getCommandStack()).saveIsDone();
-            changedOutside = false;
-            gone = false;
+    private boolean save(IFile target, IProgressMonitor monitor) {
+        boolean done = file.save(target, monitor);
+        if (done) {
+            open.saved();
             firePropertyChange(PROP_DIRTY);
-            return true;
-        } catch (ModelFileException | CoreException fault) {
-            ILog.get().error(fault.getMessage(), fault);
-            ErrorDialog.openError(shell(), Messages.Save_failed, null, Status.error(fault.getMessage(), fault));
-            cancel(monitor);
-            return false;
         }
-    }
-
-    private static void cancel(IProgressMonitor monitor) {
-        if (monitor != null) {
-            monitor.setCanceled(true);
-        }
-    }
-
-    private boolean mayOverwrite() {
-        int answer = MessageDialog.open(MessageDialog.QUESTION, shell(), Messages.Changed_title,
-                NLS.bind(Messages.Changed_overwriteQuestion, getModelFile().getName()), SWT.NONE, Messages.Changed_overwrite,
-                Messages.Changed_reload, IDialogConstants.CANCEL_LABEL);
-        if (answer == 1) {
-            watch.look();
-            reload();
-        }
-        return answer == 0;
+        return done;
     }
 
     @Override
     public boolean isSaveAsAllowed() {
-        return model != null;
+        return model() != null;
     }
 
     @Override
     public void doSaveAs() {
-        SaveAsDialog dialog = new SaveAsDialog(shell());
-        dialog.setOriginalFile(getModelFile());
-        dialog.open();
-        if (dialog.getResult() == null) {
-            return;
-        }
-        IPath chosen = dialog.getResult();
-        if (!ModelFile.EXTENSION.equals(chosen.getFileExtension())) {
-            chosen = chosen.addFileExtension(ModelFile.EXTENSION);
-        }
-        IFile file = getModelFile().getWorkspace().getRoot().getFile(chosen);
-        if (save(file, null)) {
-            moveTo(file);
+        IFile target = file.askForFile();
+        if (target != null && save(target, null)) {
+            moveTo(target);
         }
     }
 
-    private void moveTo(IFile file) {
-        setInputWithNotify(new FileEditorInput(file));
-        setPartName(file.getName());
-        watch.start(file);
+    /** Goes on with another file that holds the same model. */
+    void moveTo(IFile target) {
+        setInputWithNotify(new FileEditorInput(target));
+        setPartName(target.getName());
+        file.watch();
         List.copyOf(modelListeners).forEach(Runnable::run);
     }
 
-    private void fileMoved(IFile file) {
-        if (isClosed()) {
-            return;
-        }
-        if (file != null) {
-            moveTo(file);
-        } else if (isDirty()) {
-            gone = true;
-            askAboutChange();
-        } else {
-            getSite().getPage().closeEditor(this, false);
-        }
+    void close() {
+        getSite().getPage().closeEditor(this, false);
     }
 
-    private void fileChanged() {
-        if (isClosed()) {
-            return;
-        }
-        if (isDirty()) {
-            changedOutside = true;
-            askAboutChange();
-        } else {
-            reload();
-        }
-    }
-
-    /** Asks what is to be done about a change from outside, once the user is here. */
-    private void askAboutChange() {
-        if (isClosed() || asking || getSite().getPage().getActivePart() != this) {
-            return;
-        }
-        asking = true;
-        try {
-            if (gone) {
-                askAboutGone();
-            } else if (changedOutside) {
-                changedOutside = false;
-                if (ask(Messages.Changed_title, Messages.Changed_question, Messages.Changed_reload, Messages.Changed_keep) == 0) {
-                    reload();
-                }
-            }
-        } finally {
-            asking = false;
-        }
-    }
-
-    private void askAboutGone() {
-        gone = false;
-        if (ask(Messages.Gone_title, Messages.Gone_question, Messages.Gone_keep, Messages.Gone_close) == 1) {
-            getSite().getPage().closeEditor(this, false);
-        }
-    }
-
-    private int ask(String title, String question, String... answers) {
-        return MessageDialog.open(MessageDialog.QUESTION, shell(), title, NLS.bind(question, getModelFile().getName()), SWT.NONE, answers);
-    }
-
-    private void reload() {
+    /** Reads the file anew; what was not saved is lost. */
+    void reload() {
         int active = getActivePage();
         reloading = true;
         try {
@@ -432,8 +289,7 @@ public final class StructureEditor extends MultiPageEditorPart
                 removePage(getPageCount() - 1);
             }
             pages.clear();
-            adapterFactory.dispose();
-            watch.contentKnown();
+            open.dispose();
             load();
             createPages();
         } finally {
@@ -443,7 +299,7 @@ public final class StructureEditor extends MultiPageEditorPart
         setActivePage(shown);
         pages.shown(shown, selectedIds());
         firePropertyChange(PROP_DIRTY);
-        if (model != null) {
+        if (model() != null) {
             forgetWhatIsGone();
         }
         if (outline != null) {
@@ -455,15 +311,15 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public void dispose() {
-        watch.stop();
+        file.stop();
         if (session != null) {
             session.removeListener(sessionListener);
         }
         if (checks != null) {
             checks.dispose();
         }
-        if (adapterFactory != null) {
-            adapterFactory.dispose();
+        if (open != null) {
+            open.dispose();
         }
         super.dispose();
     }
@@ -495,12 +351,12 @@ public final class StructureEditor extends MultiPageEditorPart
 
     /** Selects what a finding is about and shows it; what is about no object is about the settings. */
     private void goTo(List<String> ids) {
-        if (model == null) {
+        if (model() == null) {
             return;
         }
         Set<String> known = index().known(ids);
         if (known.isEmpty()) {
-            showPage(model.getNodes().isEmpty() ? TablesPage.class : AnalysisPage.class);
+            showPage(model().getNodes().isEmpty() ? TablesPage.class : AnalysisPage.class);
             return;
         }
         select(known, this);
@@ -516,7 +372,7 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public boolean reveal(String elementId) {
-        if (model == null || object(elementId) == null) {
+        if (model() == null || object(elementId) == null) {
             return false;
         }
         goTo(List.of(elementId));
@@ -531,12 +387,12 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public StructuralModel getLiveModel() {
-        return model;
+        return model();
     }
 
     @Override
     public EditingDomain getEditingDomain() {
-        return model == null ? null : domain;
+        return model() == null ? null : open.domain();
     }
 
     @Override
@@ -551,7 +407,7 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public StructuralModel model() {
-        return model;
+        return open == null ? null : open.model();
     }
 
     @Override
@@ -561,22 +417,22 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public FieldContext fields() {
-        return new FieldContext(domain, model);
+        return new FieldContext(open.domain(), model());
     }
 
     @Override
     public StructureCommands commands() {
-        return new StructureCommands(domain, model);
+        return new StructureCommands(open.domain(), model());
     }
 
     @Override
     public List<Identified> selected() {
-        return model == null || !isCurrent() ? List.of() : index().all(session.selection().elementIds());
+        return model() == null || !isCurrent() ? List.of() : index().all(session.selection().elementIds());
     }
 
     @Override
     public Identified object(String id) {
-        return model == null ? null : index().get(id);
+        return model() == null ? null : index().get(id);
     }
 
     @Override
@@ -587,7 +443,7 @@ public final class StructureEditor extends MultiPageEditorPart
     @Override
     public void execute(Command command) {
         if (command != null && command.canExecute()) {
-            domain.getCommandStack().execute(command);
+            open.domain().getCommandStack().execute(command);
         }
     }
 
@@ -600,19 +456,9 @@ public final class StructureEditor extends MultiPageEditorPart
         if (!deletion.command().canExecute()) {
             return;
         }
-        if (deletion.dependants().isEmpty() || MessageDialog.openQuestion(shell(), Messages.Delete_title, question(objects, deletion))) {
+        if (DeletionQuestion.isAgreed(shell(), objects, deletion)) {
             execute(deletion.command());
         }
-    }
-
-    private static String question(Collection<? extends EObject> objects, Deletion deletion) {
-        String what = objects.size() == 1 ? Names.describe(objects.iterator().next()) : objects.size() + " objects";
-        List<String> names = deletion.dependants().stream().limit(NAMED).map(Names::describe).collect(Collectors.toCollection(ArrayList::new));
-        if (deletion.dependants().size() > NAMED) {
-            names.add("…");
-        }
-        return NLS.bind(Messages.Delete_question, what)
-                + NLS.bind(Messages.Delete_more, deletion.dependants().size(), String.join(", ", names));
     }
 
     @Override
@@ -622,7 +468,7 @@ public final class StructureEditor extends MultiPageEditorPart
 
     @Override
     public Set<String> drawnIds() {
-        return model == null ? Set.of() : index().drawn();
+        return model() == null ? Set.of() : index().drawn();
     }
 
     @Override

@@ -35,6 +35,7 @@ final class StructureMenu {
     }
 
     private static void add(IMenuManager menu, IServiceLocator site, String command) {
-        menu.add(new CommandContributionItem(new CommandContributionItemParameter(site, null, command, CommandContributionItem.STYLE_PUSH)));
+        int push = CommandContributionItem.STYLE_PUSH;
+        menu.add(new CommandContributionItem(new CommandContributionItemParameter(site, null, command, push)));
     }
 }

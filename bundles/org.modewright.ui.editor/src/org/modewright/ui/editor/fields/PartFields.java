@@ -175,7 +175,8 @@ final class PartFields {
         }
 
         private static String text(SpringCoupling coupling) {
-            return coupling.getFirst().getLiteral() + " " + coupling.getSecond().getLiteral() + " " + NumberField.format(coupling.getStiffness());
+            String components = coupling.getFirst().getLiteral() + " " + coupling.getSecond().getLiteral();
+            return components + " " + NumberField.format(coupling.getStiffness());
         }
 
         @Override

@@ -2,6 +2,7 @@ package org.modewright.ui.editor.fields;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import org.eclipse.emf.common.util.Enumerator;
 import org.eclipse.emf.ecore.EEnum;
 import org.eclipse.emf.ecore.EEnumLiteral;
@@ -138,12 +139,13 @@ final class SimpleFields {
 
         @Override
         Object parse(String text) {
-            return Arrays.stream(text.split("[\\s,]+")).filter(word -> !word.isEmpty()).map(SimpleFields::component).distinct().sorted().toList();
+            return Arrays.stream(text.split("[\\s,]+")).filter(word -> !word.isEmpty()).map(SimpleFields::component).distinct().sorted()
+                    .toList();
         }
     }
 
     static Component component(String word) {
-        Component component = Component.get(word.toLowerCase(java.util.Locale.ROOT));
+        Component component = Component.get(word.toLowerCase(Locale.ROOT));
         if (component == null) {
             throw new IllegalArgumentException(NLS.bind(FieldMessages.notAComponent, word));
         }

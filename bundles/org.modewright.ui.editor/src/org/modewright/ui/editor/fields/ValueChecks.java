@@ -60,7 +60,8 @@ final class ValueChecks {
             pattern.getLoads().add(load);
             trial.getLoadPatterns().add(pattern);
         } else if (part instanceof Identified) {
-            trial.eClass().getEAllContainments().stream().filter(list -> list.isMany() && list.getEReferenceType().isInstance(part)).findFirst()
+            trial.eClass().getEAllContainments().stream()
+                    .filter(list -> list.isMany() && list.getEReferenceType().isInstance(part)).findFirst()
                     .ifPresent(list -> ((List<EObject>) trial.eGet(list)).add(part));
         }
         return trial;

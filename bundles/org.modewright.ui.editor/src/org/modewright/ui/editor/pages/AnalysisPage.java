@@ -141,8 +141,8 @@ public final class AnalysisPage implements EditorPage {
             return;
         }
         int answer = MessageDialog.open(MessageDialog.QUESTION, context.shell(), Messages.Units_title,
-                NLS.bind(Messages.Units_question, now.getLiteral(), chosen.getLiteral()), SWT.NONE, Messages.Units_convert, Messages.Units_keep,
-                IDialogConstants.CANCEL_LABEL);
+                NLS.bind(Messages.Units_question, now.getLiteral(), chosen.getLiteral()), SWT.NONE,
+                Messages.Units_convert, Messages.Units_keep, IDialogConstants.CANCEL_LABEL);
         Command command = answer == 0 ? context.commands().convertUnits(chosen)
                 : answer == 1 ? context.commands().set(context.model(), Literals.STRUCTURAL_MODEL__UNITS, chosen) : null;
         context.execute(command);

@@ -216,7 +216,8 @@ abstract class FieldControl {
             text.addListener(SWT.KeyDown, this::key);
             TextKeys.onUndo(text, this::takeBack);
             if (!field.choices().isEmpty()) {
-                ContentProposalAdapter proposals = new ContentProposalAdapter(text, new TextContentAdapter(), new NameProposals(field), null, null);
+                ContentProposalAdapter proposals = new ContentProposalAdapter(text, new TextContentAdapter(), new NameProposals(field),
+                        null, null);
                 proposals.setProposalAcceptanceStyle(ContentProposalAdapter.PROPOSAL_REPLACE);
                 proposals.setPropagateKeys(true);
             }

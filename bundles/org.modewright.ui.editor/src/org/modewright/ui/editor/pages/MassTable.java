@@ -17,6 +17,7 @@ import org.modewright.model.structure.StructurePackage.Literals;
 import org.modewright.ui.UiIds;
 import org.modewright.ui.editor.EditorContext;
 import org.modewright.ui.editor.Messages;
+import org.modewright.ui.editor.fields.Field;
 import org.modewright.ui.editor.fields.Fields;
 import org.modewright.ui.widgets.Numbers;
 
@@ -46,7 +47,8 @@ final class MassTable {
         layout.marginWidth = 0;
         layout.marginHeight = 0;
         factor.setLayout(layout);
-        selfMass = FieldControl.create(factor, Fields.one(context.fields(), context.model(), Literals.STRUCTURAL_MODEL__SELF_MASS_FACTOR), context);
+        Field selfMassFactor = Fields.one(context.fields(), context.model(), Literals.STRUCTURAL_MODEL__SELF_MASS_FACTOR);
+        selfMass = FieldControl.create(factor, selfMassFactor, context);
         table = new Table(parent, SWT.FULL_SELECTION | SWT.MULTI | SWT.BORDER);
         table.setHeaderVisible(true);
         table.setData(UiIds.WIDGET_ID, "loads.masses");

@@ -1,6 +1,7 @@
 package org.modewright.ui.editor.pages;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.Collections;
 import java.util.Comparator;
@@ -152,8 +153,8 @@ final class ObjectTable {
     private void selectRows(Predicate<EObject> chosen, boolean scroll) {
         int[] wanted = IntStream.range(0, rows.length).filter(index -> chosen.test(rows[index])).toArray();
         int[] now = table.getSelectionIndices();
-        java.util.Arrays.sort(now);
-        if (java.util.Arrays.equals(now, wanted)) {
+        Arrays.sort(now);
+        if (Arrays.equals(now, wanted)) {
             return;
         }
         if (wanted.length == rows.length) {

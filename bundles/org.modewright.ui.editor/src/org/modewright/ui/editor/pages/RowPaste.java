@@ -40,7 +40,8 @@ public final class RowPaste {
      * @throws IllegalArgumentException if a cell is refused; the message names row, column and reason
      */
     public Command command(String text) {
-        List<String[]> rows = Arrays.stream(text.split("\r\n|\n|\r")).filter(line -> !line.isBlank()).map(line -> line.split("\t", -1)).toList();
+        List<String[]> rows = Arrays.stream(text.split("\r\n|\n|\r")).filter(line -> !line.isBlank())
+                .map(line -> line.split("\t", -1)).toList();
         if (rows.isEmpty()) {
             return null;
         }
@@ -95,7 +96,8 @@ public final class RowPaste {
         return targets;
     }
 
-    private static void appendCells(CompoundCommand command, String[] cells, List<Field> columns, int nameColumn, Identified target, int row) {
+    private static void appendCells(CompoundCommand command, String[] cells, List<Field> columns, int nameColumn, Identified target,
+            int row) {
         for (int column = 0; column < Math.min(cells.length, columns.size()); column++) {
             if (column == nameColumn || cells[column].isBlank()) {
                 continue;

@@ -68,7 +68,8 @@ public final class TablesPage implements EditorPage {
         Tools tools = new Tools(bar);
         tools.add(Images.descriptor(Images.ADD), Messages.Tables_add, "tables.add", this::add);
         duplicate = tools.add(Tools.image("duplicate"), Messages.Tables_duplicate, "tables.duplicate", this::duplicate);
-        delete = tools.add(Images.descriptor(Images.DELETE), Messages.Tables_delete, "tables.delete", () -> context.delete(table().selected()));
+        delete = tools.add(Images.descriptor(Images.DELETE), Messages.Tables_delete, "tables.delete",
+                () -> context.delete(table().selected()));
         tools.add(Images.descriptor(Images.COPY), Messages.Tables_copy, "tables.copy", this::copy);
         tools.add(Tools.image("paste"), Messages.Tables_paste, "tables.paste", this::paste);
         filter = filter(bar);

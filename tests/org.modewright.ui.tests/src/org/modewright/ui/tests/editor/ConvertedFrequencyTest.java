@@ -24,7 +24,8 @@ class ConvertedFrequencyTest {
     private static final double TOLERANCE = 1e-9;
 
     private static List<Double> frequencies(StructuralModel model) {
-        return ModalRun.run(Snapshot.of(model), new ModalRequest(6, 0, null, 500, 1), Progress.NONE).modes().stream().map(Mode::frequency).toList();
+        ModalRequest sixModes = new ModalRequest(6, 0, null, 500, 1);
+        return ModalRun.run(Snapshot.of(model), sixModes, Progress.NONE).modes().stream().map(Mode::frequency).toList();
     }
 
     @ParameterizedTest

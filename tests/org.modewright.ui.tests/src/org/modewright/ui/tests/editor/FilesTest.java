@@ -222,7 +222,8 @@ class FilesTest {
         dialog.waitUntilClosed();
         driver.until("the new file", () -> "copy.modewright".equals(editor.getTitle()));
         assertFalse(driver.ask(editor::isDirty));
-        assertEquals("N0", ModelFile.load(file.getLocation().toFile().toPath()).getNodes().get(0).getName(), "the first file stays as it was");
+        StructuralModel first = ModelFile.load(file.getLocation().toFile().toPath());
+        assertEquals("N0", first.getNodes().get(0).getName(), "the first file stays as it was");
         driver.until("the session to be about the new file", () -> editor.getModelFile().equals(workbench.session().modelFile()));
     }
 }
