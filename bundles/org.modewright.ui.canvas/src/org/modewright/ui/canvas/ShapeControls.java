@@ -30,7 +30,8 @@ final class ShapeControls {
         layout.marginHeight = 0;
         layout.marginWidth = 8;
         bar.setLayout(layout);
-        amplitude = scale(bar, Messages.Shape_amplitude, "shape.amplitude", position(AnimationPreferences.amplitude(), LEAST_AMPLITUDE, MOST_AMPLITUDE));
+        amplitude = scale(bar, Messages.Shape_amplitude, "shape.amplitude",
+                position(AnimationPreferences.amplitude(), LEAST_AMPLITUDE, MOST_AMPLITUDE));
         speed = scale(bar, Messages.Shape_speed, "shape.speed", position(AnimationPreferences.speed(), LEAST_SPEED, MOST_SPEED));
         phase = scale(bar, Messages.Shape_phase, "shape.phase", 0);
         amplitude.addListener(SWT.Selection, event -> whenMoved.run());

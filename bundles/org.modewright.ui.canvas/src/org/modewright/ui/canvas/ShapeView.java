@@ -185,7 +185,8 @@ public final class ShapeView extends ViewPart {
         MenuManager views = new MenuManager(Messages.Shape_views);
         ViewActions.views(canvas).forEach(views::add);
         menu.add(views);
-        menu.add(ViewActions.toggle(canvas, Messages.Shape_ghost, Images.GHOST, () -> canvas.options().ghost(), on -> canvas.options().ghost(on)));
+        menu.add(ViewActions.toggle(canvas, Messages.Shape_ghost, Images.GHOST, () -> canvas.options().ghost(),
+                on -> canvas.options().ghost(on)));
         ViewActions.options(canvas).forEach(menu::add);
     }
 

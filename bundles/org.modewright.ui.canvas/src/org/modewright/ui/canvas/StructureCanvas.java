@@ -32,8 +32,8 @@ import org.modewright.ui.widgets.ThemeColours;
 
 /**
  * Shows a structure in space. A drag orbits, with Shift it moves; the wheel zooms at the pointer; a click picks, with Ctrl it adds; a drag
- * with Ctrl picks what lies in the rectangle; a double click opens. On the keyboard: arrows orbit, with Shift they move, + and &minus; zoom,
- * Home fits, 0 to 3 give the standard views, Escape picks nothing.
+ * with Ctrl picks what lies in the rectangle; a double click opens. On the keyboard: arrows orbit, with Shift they move, + and &minus;
+ * zoom, Home fits, 0 to 3 give the standard views, Escape picks nothing.
  */
 public final class StructureCanvas extends Canvas {
 

@@ -35,7 +35,8 @@ public final class CaptureSentence {
             return NLS.bind(Messages.Capture_enough, new Object[] {name, Numbers.percent(reached), verdict.reachedAtMode()});
         }
         String remedy = verdict.moreModes() > 0
-                ? NLS.bind(Messages.Capture_moreModes, Numbers.counted(verdict.moreModes(), Messages.Capture_modeMore, Messages.Capture_modesMore))
+                ? NLS.bind(Messages.Capture_moreModes, Numbers.counted(verdict.moreModes(), Messages.Capture_modeMore,
+                        Messages.Capture_modesMore))
                 : Messages.Capture_moreUnknown;
         return NLS.bind(Messages.Capture_short,
                 new Object[] {name, Numbers.percent(verdict.captured()), modal.modes().size(), Numbers.percent(-verdict.margin()), remedy});

@@ -47,7 +47,8 @@ public record DominanceRow(String label, Kind kind, String elementId, double str
         collect(pairs, dominance.ranked(mode, Energy.KINETIC, by), 1);
         List<DominanceRow> rows = new ArrayList<>(pairs.size());
         pairs.values().forEach(pair -> rows.add(merge(pair)));
-        Comparator<DominanceRow> order = Comparator.comparingDouble(rankedBy == Energy.STRAIN ? DominanceRow::strain : DominanceRow::kinetic);
+        Comparator<DominanceRow> order = Comparator.comparingDouble(rankedBy == Energy.STRAIN ? DominanceRow::strain
+                : DominanceRow::kinetic);
         rows.sort(order.reversed());
         return withRunning(rows, rankedBy);
     }

@@ -44,7 +44,8 @@ public final class DominanceSentence {
         }
         String first = NLS.bind(Messages.Dominance_strainSentence,
                 new Object[] {mode.number(), Numbers.period(mode.period()), total(strain), counted(strain) + commonGroup(result, strain)});
-        return first + (kinetic.isEmpty() ? "" : NLS.bind(Messages.Dominance_kineticSentence, new Object[] {total(kinetic), counted(kinetic), where}));
+        return first + (kinetic.isEmpty() ? "" : NLS.bind(Messages.Dominance_kineticSentence,
+                new Object[] {total(kinetic), counted(kinetic), where}));
     }
 
     /** The modes in which the selected elements take part, in one sentence. */
@@ -57,7 +58,8 @@ public final class DominanceSentence {
         if (modes.isEmpty()) {
             return NLS.bind(one ? Messages.Dominance_modesOfNone : Messages.Dominance_modesOfNoneTogether, who, Numbers.percent(share));
         }
-        return NLS.bind(one ? Messages.Dominance_modesOf : Messages.Dominance_modesOfTogether, new Object[] {who, Numbers.percent(share), modes.size(), result.modes().size()});
+        return NLS.bind(one ? Messages.Dominance_modesOf : Messages.Dominance_modesOfTogether,
+                new Object[] {who, Numbers.percent(share), modes.size(), result.modes().size()});
     }
 
     private static String who(ModalResult result, Set<String> elementIds) {
@@ -68,7 +70,8 @@ public final class DominanceSentence {
             }
         }
         if (names.size() != elementIds.size() || names.size() > FEW) {
-            return NLS.bind(Messages.Dominance_selected, Numbers.counted(elementIds.size(), Messages.Dominance_selectedOne, Messages.Dominance_selectedMany));
+            return NLS.bind(Messages.Dominance_selected, Numbers.counted(elementIds.size(), Messages.Dominance_selectedOne,
+                    Messages.Dominance_selectedMany));
         }
         String who = String.join(", ", names);
         return Character.toUpperCase(who.charAt(0)) + who.substring(1);

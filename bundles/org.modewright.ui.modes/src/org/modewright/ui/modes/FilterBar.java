@@ -41,7 +41,8 @@ final class FilterBar {
         kind.setData(UiIds.WIDGET_ID, "modes.filter");
         kind.setItems(Messages.Filter_all, Messages.Filter_local, Messages.Filter_notLocal);
         for (double share : SHARES) {
-            kind.add(NLS.bind(Messages.Filter_atLeast, share * 100 < 1 ? Double.toString(share * 100) : Long.toString(Math.round(share * 100))));
+            kind.add(NLS.bind(Messages.Filter_atLeast, share * 100 < 1 ? Double.toString(share * 100)
+                    : Long.toString(Math.round(share * 100))));
         }
         kind.select(0);
         inLabel = new Label(bar, SWT.NONE);

@@ -29,7 +29,8 @@ public record MassRow(String label, double[] kilograms, boolean isTotal) {
             rows.add(new MassRow(source.name(), source.movable(), false));
         }
         double[] captured = captured(result);
-        rows.add(new MassRow(NLS.bind(Messages.Mass_captured, Numbers.counted(result.modes().size(), Messages.Mass_mode, Messages.Mass_modes)),
+        rows.add(new MassRow(NLS.bind(Messages.Mass_captured, Numbers.counted(result.modes().size(), Messages.Mass_mode,
+                Messages.Mass_modes)),
                 captured, true));
         rows.add(new MassRow(Messages.Mass_missing, missing(ledger.movable(), captured), true));
         rows.add(new MassRow(Messages.Mass_onSupports, ledger.onSupports(), true));

@@ -52,7 +52,8 @@ public enum ModeColumn {
 
     public String header() {
         if (direction != null) {
-            String pattern = isRunning() ? Messages.Column_running : direction.isTranslation() ? Messages.Column_mass : Messages.Column_rotary;
+            String pattern = isRunning() ? Messages.Column_running : direction.isTranslation() ? Messages.Column_mass
+                    : Messages.Column_rotary;
             return NLS.bind(pattern, axis());
         }
         return switch (this) {

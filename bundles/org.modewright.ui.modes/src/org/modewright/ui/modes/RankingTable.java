@@ -135,7 +135,8 @@ final class RankingTable {
             return;
         }
         DominanceRow row = rows.get(event.index);
-        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), label(row), Numbers.percentNumber(row.kinetic()),
+        ((TableItem) event.item).setText(new String[] {Numbers.percentNumber(row.strain()), label(row),
+                Numbers.percentNumber(row.kinetic()),
             Numbers.percentNumber(row.running())});
     }
 
@@ -205,7 +206,8 @@ final class RankingTable {
     /** All rows as text, tab-separated, in full precision. */
     String text() {
         StringBuilder text = new StringBuilder();
-        text.append(table.getColumn(NAME).getText()).append('\t').append(Messages.Dominance_strain).append('\t').append(Messages.Dominance_kinetic);
+        text.append(table.getColumn(NAME).getText()).append('\t').append(Messages.Dominance_strain).append('\t')
+                .append(Messages.Dominance_kinetic);
         for (DominanceRow row : rows) {
             text.append('\n').append(label(row)).append('\t').append(Numbers.exact(row.strain() * 100)).append('\t')
                     .append(Numbers.exact(row.kinetic() * 100));

@@ -63,7 +63,8 @@ final class StaircasePlot extends Canvas {
                 event.result = Messages.Capture_accessibleName;
             }
         });
-        addListener(SWT.Traverse, event -> event.doit = event.detail != SWT.TRAVERSE_ARROW_NEXT && event.detail != SWT.TRAVERSE_ARROW_PREVIOUS);
+        addListener(SWT.Traverse, event -> event.doit = event.detail != SWT.TRAVERSE_ARROW_NEXT
+                && event.detail != SWT.TRAVERSE_ARROW_PREVIOUS);
     }
 
     void show(AuditResult result) {

@@ -100,7 +100,8 @@ public final class StructureDrawing {
         double[] p = drawn.start();
         double[] q = drawn.end();
         int pieces = drawn.isStraight() ? 1 : segments;
-        moving.member(builder.member(number, p[0], p[1], p[2], q[0], q[1], q[2], pieces, drawn.localY(), drawn.width(), drawn.depth()), drawn);
+        moving.member(builder.member(number, p[0], p[1], p[2], q[0], q[1], q[2], pieces, drawn.localY(), drawn.width(), drawn.depth()),
+                drawn);
         addArm(number, member.getStart(), drawn.startArm(), drawn.hasStartArm());
         addArm(number, member.getEnd(), drawn.endArm(), drawn.hasEndArm());
     }

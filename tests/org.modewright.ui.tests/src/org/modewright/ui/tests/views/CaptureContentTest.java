@@ -96,7 +96,8 @@ class CaptureContentTest {
     @Test
     void ticksAreRoundAndFew() {
         assertEquals(List.of("1", "2", "3"), new CaptureScale(result(), false).ticks().stream().map(CaptureScale.Tick::text).toList());
-        assertEquals(List.of("1", "0.5", "0.2", "0.1"), new CaptureScale(result(), true).ticks().stream().map(CaptureScale.Tick::text).toList());
+        assertEquals(List.of("1", "0.5", "0.2", "0.1"), new CaptureScale(result(),
+                true).ticks().stream().map(CaptureScale.Tick::text).toList());
         SmallResults many = new SmallResults();
         for (int mode = 1; mode <= 96; mode++) {
             many.mode(mode, 0.01, 0.01);

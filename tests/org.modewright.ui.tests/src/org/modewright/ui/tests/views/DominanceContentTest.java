@@ -90,7 +90,8 @@ class DominanceContentTest {
         assertEquals("Member B1 holds less than 60.0 % in every mode found.",
                 DominanceSentence.modesOf(result, Set.of("m1"), 0.6, List.of()));
         Set<String> both = Set.of("m1", "m2");
-        assertTrue(DominanceSentence.modesOf(result, both, 0.6, new Dominance(result).modesOf(both, 0.6)).contains("together hold at least 60.0 %"));
+        assertTrue(DominanceSentence.modesOf(result, both, 0.6,
+                new Dominance(result).modesOf(both, 0.6)).contains("together hold at least 60.0 %"));
         assertTrue(DominanceSentence.modesOf(result, Set.of(), 0.5, List.of()).startsWith("Select an element"));
     }
 }

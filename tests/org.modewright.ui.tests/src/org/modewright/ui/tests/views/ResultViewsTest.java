@@ -17,6 +17,7 @@ import org.eclipse.swt.SWT;
 import org.eclipse.swt.dnd.Clipboard;
 import org.eclipse.swt.dnd.TextTransfer;
 import org.eclipse.swt.graphics.ImageData;
+import org.eclipse.swt.graphics.Point;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -178,6 +179,26 @@ class ResultViewsTest {
         assertEquals(Set.of(), workbench.ask(() -> session.selection().elementIds()));
     }
 
+    @Test
+    void aClickInSpacePicksWhatLiesThere() {
+        modesTable().select(0);
+        ViewObject shape = workbench.view(UiIds.SHAPE_VIEW);
+        ShapeView view = (ShapeView) shape.part();
+        workbench.ui().waitUntil("the shape", () -> view.canvas().frames() > 0);
+        shape.press("canvas", ' ', ' ');
+        settledPixels(view);
+        Point size = workbench.ask(() -> view.canvas().getSize());
+        int x = IntStream.range(0, size.x).filter(at -> idInTheMiddle(view, at, size.y) != null).findFirst().orElseThrow();
+        String there = idInTheMiddle(view, x, size.y);
+        shape.click("canvas", (x + 0.5) / size.x, 0.5);
+        assertEquals(Set.of(there), workbench.ask(() -> session.selection().elementIds()));
+        assertEquals(0, selectedMode(), "the mode stays selected");
+    }
+
+    private String idInTheMiddle(ShapeView view, int x, int height) {
+        return workbench.ask(() -> view.canvas().idAt(x, height / 2));
+    }
+
     /** The picture once it stands still. */
     private int[] settledPixels(ShapeView view) {
         int[][] last = {workbench.ask(() -> view.canvas().pixels())};
@@ -233,7 +254,8 @@ class ResultViewsTest {
         List<Dominance.ModeShare> expected = new Dominance(modal).modesOf(picked, 0.05);
         TableObject modes = dominance.table("dominance.modes");
         assertEquals(expected.size(), modes.rowCount());
-        assertTrue(dominance.sentence().contains(" in " + expected.size() + " of " + modal.modes().size() + " modes"), dominance.sentence());
+        assertTrue(dominance.sentence().contains(" in " + expected.size() + " of " + modal.modes().size() + " modes"),
+                dominance.sentence());
         modes.select(expected.size() - 1);
         assertEquals(expected.get(expected.size() - 1).mode(), selectedMode());
         assertEquals(picked, workbench.ask(() -> session.selection().elementIds()), "the elements stay selected");

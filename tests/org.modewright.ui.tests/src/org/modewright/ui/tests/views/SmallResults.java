@@ -28,7 +28,8 @@ final class SmallResults {
     SmallResults() {
         builder.model("by hand", 3, 0, 6);
         builder.nodes(List.of(new NodePoint("n1", "1", 0, 0, 0), new NodePoint("n2", "2", 0, 0, 3)));
-        builder.carriers(List.of(carrier(Kind.MEMBER, "m1", "B1", "braces", "level 1"), carrier(Kind.MEMBER, "m2", "B2", "braces", "level 1"),
+        builder.carriers(List.of(carrier(Kind.MEMBER, "m1", "B1", "braces", "level 1"),
+                carrier(Kind.MEMBER, "m2", "B2", "braces", "level 1"),
                 carrier(Kind.MEMBER, "m3", "C1", "columns", "level 1"), carrier(Kind.NODE, "n2", "2", null, "level 2")));
         builder.mass(new MassLedger(new double[] {4000, 4000, 0}, new double[] {1000, 1000, 5000}, new double[3], new double[3],
                 List.of(new MassSource("self", new double[] {1000, 1000, 0}, new double[] {1000, 1000, 2000}),
@@ -51,8 +52,10 @@ final class SmallResults {
         double omega = 2 * Math.PI * frequency;
         double period = frequency > 0 ? 1 / frequency : Double.POSITIVE_INFINITY;
         frequencies.add(frequency);
-        builder.mode(new Mode(frequencies.size(), omega * omega, frequency, period, 1e-12, 1e-13, NOT_MEASURED, new double[] {x, y, 0, 0, 0, 0}, 2,
-                new double[] {1, 0, 0, 0}, new Character(kind, kind == Character.Kind.LOCAL ? "local: 2 members" : "sway")), new double[12], strain,
+        builder.mode(new Mode(frequencies.size(), omega * omega, frequency, period, 1e-12, 1e-13, NOT_MEASURED,
+                new double[] {x, y, 0, 0, 0, 0}, 2,
+                new double[] {1, 0, 0, 0}, new Character(kind, kind == Character.Kind.LOCAL ? "local: 2 members" : "sway")),
+                        new double[12], strain,
                 kinetic);
         return this;
     }

@@ -56,8 +56,8 @@ class StructureDrawingTest {
     private final List<Node> nodes = new ArrayList<>();
 
     /**
-     * An L-shaped floor of eight nodes with a beam along every edge, over one column with a rigid zone and an offset; a bar, a link, a spring
-     * between nodes, one to ground, a support and a mass. The floor's nodes stand at z = 3.
+     * An L-shaped floor of eight nodes with a beam along every edge, over one column with a rigid zone and an offset; a bar, a link, a
+     * spring between nodes, one to ground, a support and a mass. The floor's nodes stand at z = 3.
      */
     @BeforeEach
     void makeModel() {
