@@ -36,6 +36,7 @@ import org.modewright.ui.widgets.Images;
 final class ObjectTable {
 
     private static final int LEAST_WIDTH = 48;
+    private static final int REST = 4;
     private static final int MOST_WIDTH = 240;
     private static final int HEADER_ROOM = 28;
     private static final int CELL_ROOM = 20;
@@ -194,7 +195,9 @@ final class ObjectTable {
                 for (int i = 0; i < fields.size(); i++) {
                     addColumn(i, gc);
                 }
-                new TableColumn(table, SWT.LEFT).setResizable(false);
+                TableColumn rest = new TableColumn(table, SWT.LEFT);
+                rest.setResizable(false);
+                rest.setWidth(REST);
             } finally {
                 gc.dispose();
             }
@@ -326,8 +329,8 @@ final class ObjectTable {
     }
 
     private void key(Event event) {
-        boolean opens = event.keyCode == SWT.F2 || event.keyCode == SWT.CR || event.keyCode == SWT.KEYPAD_CR;
-        if (opens && event.stateMask == 0) {
+        boolean enter = event.keyCode == SWT.CR || event.keyCode == SWT.KEYPAD_CR;
+        if (enter && event.stateMask == 0) {
             editCell();
             event.doit = false;
         }

@@ -320,7 +320,7 @@ public final class TablesPage implements EditorPage {
 
     @Override
     public void rename() {
-        table.editCell();
+        table.editName();
     }
 
     @Override
