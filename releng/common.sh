@@ -15,7 +15,7 @@ fail() {
 need_jdk() {
     local java=java version
     [ -z "${JAVA_HOME:-}" ] || java=$JAVA_HOME/bin/java
-    version=$("$java" -version 2>&1 | sed -n '1s/.*version "\([0-9]*\).*/\1/p')
+    version=$("$java" -version 2>&1 | sed -n 's/.* version "\([0-9]*\).*/\1/p;T;q')
     if [ -z "$version" ] || [ "$version" -lt 17 ] || ! "$java" --list-modules 2>/dev/null | grep -q '^jdk.compiler@'; then
         fail "A JDK 17 or newer is needed (found: ${version:-none}). On Debian: apt-get install openjdk-17-jdk-headless; else set JAVA_HOME."
     fi
