@@ -35,7 +35,7 @@ final class RunOptions {
             description = "The directions judged. Without it: those of the model's settings, else x,y.")
     private List<Direction> directions;
 
-    @Option(names = "--threads", paramLabel = "N", converter = PositiveInteger.class, description = "Threads to use. Without it: all.")
+    @Option(names = "--threads", paramLabel = "N", converter = PositiveInteger.class, description = "Threads at most; the solver of this version uses one.")
     private Integer threads;
 
     @Option(names = "--quiet", description = "No progress on standard error.")
