@@ -13,7 +13,7 @@ public enum ModeColumn {
     MASS_X(Direction.X, true, 52), MASS_Y(Direction.Y, true, 52), MASS_Z(Direction.Z, true, 52),
     RUNNING_X(Direction.X, true, 60), RUNNING_Y(Direction.Y, true, 60), RUNNING_Z(Direction.Z, false, 60),
     MASS_RX(Direction.RX, false, 88), MASS_RY(Direction.RY, false, 88), MASS_RZ(Direction.RZ, false, 88),
-    CHARACTER(null, true, 96), SPREAD(null, false, 64), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100);
+    SPREAD(null, false, 64), RESIDUAL(null, false, 88), ERROR_BOUND(null, false, 100), CHARACTER(null, true, 96);
 
     private final Direction direction;
     private final boolean shownAtFirst;
