@@ -145,9 +145,12 @@ public final class Names {
 
     /**
      * @param kind class of an object of a model
-     * @return how sentences call it: "member", "frame section", "tie"
+     * @return how sentences call it: "member", "frame section", "tie", "gravity pattern"
      */
     public static String kind(EClass kind) {
+        if (kind == StructurePackage.Literals.LOAD_PATTERN) {
+            return "gravity pattern";
+        }
         return kind == StructurePackage.Literals.MULTI_POINT_TIE ? "tie" : words(kind.getName());
     }
 

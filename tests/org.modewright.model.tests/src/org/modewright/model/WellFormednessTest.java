@@ -246,7 +246,7 @@ class WellFormednessTest {
         StructuralModel model = Fixtures.sound();
         nodeLoad(model, 0, 5, -110);
         Defect defect = WellFormedness.check(model).get(0);
-        assertEquals("Load pattern Live gives node N6 a negative mass, -3.06 t.", defect.text());
+        assertEquals("Gravity pattern Live gives node N6 a negative mass, -3.06 t.", defect.text());
         assertSame(model.getLoadPatterns().get(0).getLoads().get(0), defect.object());
     }
 

@@ -50,7 +50,7 @@ class TreeTest {
     void aModelShowsOneCategoryAKindThenTheSettings() {
         List<String> labels = tree(shop.model).getChildren(shop.model).stream().map(this::label).toList();
         assertEquals(List.of("Materials (1)", "Sections (1)", "Groups (1)", "Levels (1)", "Nodes (6)", "Members (4)", "Springs (1)",
-                "Supports (2)", "Nodal masses (1)", "Rigid floors (1)", "Rigid links (1)", "Ties (1)", "Load patterns (1)",
+                "Supports (2)", "Nodal masses (1)", "Rigid floors (1)", "Rigid links (1)", "Ties (1)", "Gravity patterns (1)",
                 "Analysis settings", "Audit settings"), labels);
     }
 
@@ -123,7 +123,7 @@ class TreeTest {
         assertEquals("Rigid link Arm  (C to E)", label(shop.model.getRigidLinks().get(0)));
         assertEquals("Tie Pair  (2 terms)", label(shop.model.getTies().get(0)));
         assertEquals("Tie term  (1 · uz C)", label(shop.model.getTies().get(0).getTerms().get(0)));
-        assertEquals("Load pattern Crowd  (mass factor 0.3)", label(shop.model.getLoadPatterns().get(0)));
+        assertEquals("Gravity pattern Crowd  (mass factor 0.3)", label(shop.model.getLoadPatterns().get(0)));
         assertEquals("Member load  (Beam: 5 kN/m)", label(shop.model.getLoadPatterns().get(0).getLoads().get(0)));
         assertEquals("Node load  (D: 12 kN)", label(shop.model.getLoadPatterns().get(0).getLoads().get(1)));
     }

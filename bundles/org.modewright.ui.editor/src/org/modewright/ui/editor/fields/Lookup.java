@@ -3,11 +3,11 @@ package org.modewright.ui.editor.fields;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.osgi.util.NLS;
+import org.modewright.model.Names;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.StructuralModel;
 
@@ -46,7 +46,7 @@ final class Lookup {
         Identified found = remembered == null ? search(kind, wanted)
                 : remembered.computeIfAbsent(kind, this::byName).get(wanted);
         if (found == null) {
-            throw new IllegalArgumentException(NLS.bind(FieldMessages.noSuchObject, word(kind), wanted));
+            throw new IllegalArgumentException(NLS.bind(FieldMessages.noSuchObject, Names.kind(kind), wanted));
         }
         return found;
     }
@@ -59,10 +59,5 @@ final class Lookup {
         Map<String, Identified> names = new HashMap<>();
         all(model, kind).forEach(object -> names.putIfAbsent(object.getName(), object));
         return names;
-    }
-
-    /** A kind as sentences say it. */
-    static String word(EClass kind) {
-        return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 }

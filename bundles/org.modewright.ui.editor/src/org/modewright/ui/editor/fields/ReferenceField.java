@@ -6,6 +6,7 @@ import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.eclipse.osgi.util.NLS;
+import org.modewright.model.Names;
 import org.modewright.model.structure.Identified;
 import org.modewright.model.structure.StructurePackage;
 
@@ -48,7 +49,7 @@ final class ReferenceField extends FeatureField {
     Object parse(String text) {
         if (text.isEmpty() || hasFew() && text.equals(FieldMessages.none)) {
             if (feature().isRequired()) {
-                throw new IllegalArgumentException(NLS.bind(FieldMessages.missing, Lookup.word(kind)));
+                throw new IllegalArgumentException(NLS.bind(FieldMessages.missing, Names.kind(kind)));
             }
             return null;
         }

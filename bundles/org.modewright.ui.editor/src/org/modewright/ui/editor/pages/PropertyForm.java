@@ -16,6 +16,7 @@ import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
 import org.eclipse.swt.widgets.Label;
 import org.modewright.audit.Finding;
+import org.modewright.model.Names;
 import org.modewright.model.edit.Labels;
 import org.modewright.model.structure.Identified;
 import org.modewright.ui.UiIds;
@@ -197,7 +198,7 @@ final class PropertyForm {
         if (objects.size() == 1) {
             return Labels.of(objects.get(0));
         }
-        return sameKind() ? NLS.bind(Messages.Form_many, objects.size(), Tables.word(kind()))
+        return sameKind() ? NLS.bind(Messages.Form_many, objects.size(), Names.kind(kind()))
                 : NLS.bind(Messages.Form_mixed, objects.size()) + ". " + Messages.Form_kinds;
     }
 

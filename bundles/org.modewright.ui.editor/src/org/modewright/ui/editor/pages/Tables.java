@@ -2,7 +2,6 @@ package org.modewright.ui.editor.pages;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
@@ -41,11 +40,6 @@ final class Tables {
     @SuppressWarnings("unchecked")
     static List<Identified> objects(StructuralModel model, EReference list) {
         return (List<Identified>) model.eGet(list);
-    }
-
-    /** A kind as sentences say it: "frame section". */
-    static String word(EClass kind) {
-        return kind.getName().replaceAll("(?<=[a-z])(?=[A-Z])", " ").toLowerCase(Locale.ROOT);
     }
 
     /** A new object of a list's kind; what it must refer to is the first there is, so that it can be edited from there. */
