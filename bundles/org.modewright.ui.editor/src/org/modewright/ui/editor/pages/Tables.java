@@ -2,7 +2,6 @@ package org.modewright.ui.editor.pages;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.ecore.EReference;
 import org.modewright.model.structure.Identified;
